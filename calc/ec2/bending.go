@@ -1,0 +1,352 @@
+package ec2
+
+import "soffit/calc/clause"
+
+// Ultimate bending with strain compatibility, 6.1 and 3.1.7(3). Sagging: the top is compressed. Row i is a row of
+// tendons at depth d_i, row j one of bars at depth d_j, part n a trapezoid of the section whose upper edge is at
+// depth z_{c,n}. ε_{p0,i} is the strain of the steel when the concrete beside it has none.
+
+const compatible = "6.1(2)P"
+
+// PrestressForce is P at the station.
+var PrestressForce = clause.Define(&clause.Formula{
+	ID: "prestress-force", Name: "Prestressing force at the station", Ref: en("5.10.8(1)", ""),
+	Text: "P_d = γ_P·Σ_i(A_{p,i}·σ_{pt,i})", Unit: "kN",
+	Examples: hand("1273.2 kN", "γ_P = 1.0", "A_{p,i} = 1112 mm²", "σ_{pt,i} = 1145 MPa"),
+})
+
+// PrestressMoment is the moment of P about the centroid.
+var PrestressMoment = clause.Define(&clause.Formula{
+	ID: "prestress-moment", Name: "Its moment about the centroid, tension below", Ref: en("5.10.8(1)", ""),
+	Text: "M_P = γ_P·Σ_i(A_{p,i}·σ_{pt,i}·e_i)", Unit: "kN·m",
+	Examples: hand("560.23 kN·m", "γ_P = 1.0", "A_{p,i} = 1112 mm²", "σ_{pt,i} = 1145 MPa", "e_i = 440 mm"),
+})
+
+// ConcreteStressAtTendon is σ_cp.
+var ConcreteStressAtTendon = clause.Define(&clause.Formula{
+	ID: "concrete-stress-at-tendon", Name: "Concrete stress at each row from the prestress alone, compression positive",
+	Text: "σ_{cp,i} = P_d/A_c + M_P·e_i/I_c", Unit: "MPa",
+	Examples: append(hand("7.96 MPa", "P_d = 1273.2 kN", "A_c = 420000 mm²", "M_P = 560.2 kN·m", "I_c = 50000 10⁶ mm⁴", "e_i = 440 mm"),
+		by("Lin & Burns, Design of Prestressed Concrete Structures, 3rd ed., Ex. 1-1: 600 + 720 psi at the soffit", clause.Recalled, "9.1 MPa",
+			"P_d = 1601.36 kN", "A_c = 387096 mm²", "M_P = 244.048 kN·m", "I_c = 18730.9 10⁶ mm⁴", "e_i = 381 mm")),
+})
+
+// Prestrain is ε_p0.
+var Prestrain = clause.Define(&clause.Formula{
+	ID: "prestrain", Name: "Strain of the steel at zero strain of the concrete beside it", Ref: en("6.1(2)P", ""),
+	Text: "ε_{p0,i} = γ_P·σ_{pt,i}/E_{p,i} + σ_{cp,i}/E_cm", Unit: "‰", Digits: 6,
+	Examples: hand("6.0870 ‰", "γ_P = 1.0", "σ_{pt,i} = 1145 MPa", "E_{p,i} = 195 GPa", "σ_{cp,i} = 7.96 MPa", "E_cm = 36.99 GPa"),
+})
+
+// LimitForce is the steel force with every tendon row at what it can carry.
+var LimitForce = clause.Define(&clause.Formula{
+	ID: "limit-force", Name: "Tension with every row at its limit, to be confirmed", Ref: en(compatible, ""),
+	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i})", Unit: "kN",
+	Examples: hand("1585.8 kN", "A_{p,i} = 1112 mm²", "σ_{av,i} = 1426.1 MPa"),
+})
+
+// LimitForceWithBars is LimitForce with bars.
+var LimitForceWithBars = clause.Define(&clause.Formula{
+	ID: "limit-force-with-bars", Name: "Tension with every row and every bar at its limit, to be confirmed", Ref: en(compatible, ""),
+	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i}) + Σ_j(A_{s,j}·σ_{sa,j})", Unit: "kN",
+	Examples: hand("1935.5 kN", "A_{p,i} = 1112 mm²", "σ_{av,i} = 1426.1 MPa", "A_{s,j} = 804.25 mm²", "σ_{sa,j} = 434.78 MPa"),
+})
+
+// SteelAnchored asks whether any steel counts at the station.
+var SteelAnchored = &clause.Condition{
+	ID: "steel-anchored", Name: "Steel at the station", Ref: en("8.10.2.3", ""), Text: "F_lim > 0·[kN]",
+	Yes: "steel is anchored here", No: "no steel is anchored here",
+}
+
+// NoResistance is the resistance where no steel is anchored.
+var NoResistance = clause.Define(&clause.Formula{
+	ID: "no-resistance", Name: "Moment resistance: none is counted", Ref: en(compatible, ""),
+	Text: "M_Rd = 0·[kN·m]", Unit: "kN·m", Digits: 6, Examples: hand("0 kN·m"),
+})
+
+// FlangeTrial is the neutral axis with the block in the flange.
+var FlangeTrial = clause.Define(&clause.Formula{
+	ID: "axis-flange-trial", Name: "Depth of the neutral axis if the block lies in the top part", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "x_f = F_lim/(λ·η·f_cd·b_f)", Unit: "mm", Digits: 6,
+	Examples: hand("118.936 mm", "F_lim = 1585.8 kN", "λ = 0.8", "η = 1", "f_cd = 33.333 MPa", "b_f = 500 mm"),
+})
+
+// BlockInFlange asks whether the block lies in the top part.
+var BlockInFlange = &clause.Condition{
+	ID: "block-in-flange", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_f ≤ h_f",
+	Yes: "block in the flange", No: "block below the flange",
+}
+
+// HaunchTrial is the neutral axis with the lower edge of the block in the haunch below the flange.
+var HaunchTrial = clause.Define(&clause.Formula{
+	ID: "axis-haunch-trial", Name: "Depth of the neutral axis if the block ends in the haunch", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "x_h = (h_f + h_h/(b_f − b_w)·(b_f − sqrt(b_f^2 − 2·(b_f − b_w)/h_h·(F_lim/(η·f_cd) − b_f·h_f))))/λ", Unit: "mm", Digits: 6,
+	Examples: hand("177.605 mm", "h_f = 100 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "F_lim = 1350 kN", "η = 1", "f_cd = 20 MPa", "λ = 0.8"),
+})
+
+// BlockInHaunch asks whether the block ends in the haunch.
+var BlockInHaunch = &clause.Condition{
+	ID: "block-in-haunch", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "F_lim ≤ η·f_cd·(b_f·h_f + (b_f + b_w)/2·h_h)",
+	Yes: "block ends in the haunch", No: "block reaches the web",
+}
+
+// WebTrial is the neutral axis with the lower edge of the block in the web.
+var WebTrial = clause.Define(&clause.Formula{
+	ID: "axis-web-trial", Name: "Depth of the neutral axis if the block ends in the web", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "x_w = (h_f + h_h + (F_lim/(η·f_cd) − b_f·h_f − (b_f + b_w)/2·h_h)/b_w)/λ", Unit: "mm", Digits: 6,
+	Examples: hand("312.5 mm", "h_f = 100 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "F_lim = 1700 kN", "η = 1", "f_cd = 20 MPa", "λ = 0.8"),
+})
+
+// BlockInWeb asks whether the block ends above the lower flange.
+var BlockInWeb = &clause.Condition{
+	ID: "block-in-web", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_w ≤ h_w",
+	Yes: "block ends in the web", No: "block reaches below the web",
+}
+
+// Trial is a neutral axis that supposes every row of steel at its limit, by where the block ends: the strains
+// on it, the questions that confirm it, and the axis if it stands.
+type Trial struct {
+	Strain, BarStrain, Axis *clause.Formula
+	RowsYield, BarsYield    *clause.Condition
+}
+
+func trial(place, x string) Trial {
+	return Trial{
+		Strain: clause.Define(&clause.Formula{
+			ID: "trial-strain-" + place, Name: "Strain of each row on the trial", Ref: en(compatible, ""),
+			Text: "ε_{t,i} = ε_{p0,i} + ε_cu3·(d_i − " + x + ")/" + x, Unit: "‰",
+			Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "ε_cu3 = 3.5 ‰", "d_i = 1140 mm", x+" = 118.93 mm"),
+		}),
+		BarStrain: clause.Define(&clause.Formula{
+			ID: "trial-bar-strain-" + place, Name: "Strain of each bar row on the trial", Ref: en(compatible, ""),
+			Text: "ε_{ts,j} = ε_cu3·(d_j − " + x + ")/" + x, Unit: "‰",
+			Examples: hand("12.686 ‰", "ε_cu3 = 3.5 ‰", "d_j = 550 mm", x+" = 118.93 mm"),
+		}),
+		Axis: clause.Define(&clause.Formula{ID: "axis-" + place, Name: "Depth of the neutral axis: the trial stands", Ref: en(compatible, ""),
+			Text: "x = " + x, Unit: "mm", Digits: 6, Examples: hand("118.93 mm", x+" = 118.93 mm")}),
+		RowsYield: &clause.Condition{
+			ID: "every-row-yields-" + place, Name: "Tendons on the trial", Ref: en(compatible, ""), Text: "min_i(ε_{t,i} − σ_{av,i}/E_{p,i}) ≥ 0",
+			Yes: "every row reaches its limit", No: "not every row reaches its limit: strains decide"},
+		BarsYield: &clause.Condition{
+			ID: "every-bar-yields-" + place, Name: "Bars on the trial", Ref: en(compatible, ""), Text: "min_j(ε_{ts,j} − σ_{sa,j}/E_s) ≥ 0",
+			Yes: "every bar reaches its limit", No: "not every bar reaches its limit: strains decide"},
+	}
+}
+
+// The three trials.
+var (
+	TrialInFlange = trial("flange", "x_f")
+	TrialInHaunch = trial("haunch", "x_h")
+	TrialInWeb    = trial("web", "x_w")
+)
+
+// Curvature is κ with the concrete at its limit.
+var Curvature = clause.Define(&clause.Formula{
+	ID: "curvature", Name: "Curvature, the top fibre at its ultimate strain", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = ε_cu3/x", Unit: "1/km", Digits: 6,
+	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm"),
+})
+
+// CurvatureWithLimit is κ with the concrete or the outermost steel at its limit.
+var CurvatureWithLimit = clause.Define(&clause.Formula{
+	ID: "curvature-with-limit", Name: "Curvature: the top fibre at its ultimate strain, or a tendon row at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_i(cases(d_i > x and σ_{av,i} > 0·[MPa]: (ε_{ud,i} − ε_{p0,i})/(d_i − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_i = 1140 mm", "ε_{ud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1400 MPa"),
+})
+
+// CurvatureWithBarLimit is CurvatureWithLimit with bars that have a limit too.
+var CurvatureWithBarLimit = clause.Define(&clause.Formula{
+	ID: "curvature-with-bar-limit", Name: "Curvature: the top fibre at its ultimate strain, or a bar row at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_j(cases(d_j > x and σ_{sa,j} > 0·[MPa]: ε_{ud,j}/(d_j − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_j = 1140 mm", "ε_{ud,j} = 45 ‰", "σ_{sa,j} = 400 MPa"),
+})
+
+// CurvatureWithBothLimits has tendons and bars with limits.
+var CurvatureWithBothLimits = clause.Define(&clause.Formula{
+	ID: "curvature-with-both-limits", Name: "Curvature: the top fibre at its ultimate strain, or a row of steel at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_i(cases(d_i > x and σ_{av,i} > 0·[MPa]: (ε_{ud,i} − ε_{p0,i})/(d_i − x); otherwise: ε_cu3/x)); min_j(cases(d_j > x and σ_{sa,j} > 0·[MPa]: ε_{ud,j}/(d_j − x); otherwise: ε_cu3/x)))",
+	Unit: "1/km", Digits: 6,
+	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_i = 1140 mm", "ε_{ud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1400 MPa",
+		"d_j = 1140 mm", "ε_{ud,j} = 45 ‰", "σ_{sa,j} = 400 MPa"),
+})
+
+// TopStrain is the strain of the top fibre.
+var TopStrain = clause.Define(&clause.Formula{
+	ID: "top-strain", Name: "Strain of the top fibre", Ref: en("6.1(3)P", ""), Text: "ε_c = κ·x", Unit: "‰",
+	Examples: hand("3.5 ‰", "κ = 29.429 1/km", "x = 118.93 mm"),
+})
+
+// TendonStrain is ε_p.
+var TendonStrain = clause.Define(&clause.Formula{
+	ID: "tendon-strain", Name: "Strain of each row: prestrain and that of bending", Ref: en(compatible, ""),
+	Text: "ε_{p,i} = ε_{p0,i} + κ·(d_i − x)", Unit: "‰", Digits: 6,
+	Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "κ = 29.429 1/km", "d_i = 1140 mm", "x = 118.93 mm"),
+})
+
+// BarStrain is ε_s.
+var BarStrain = clause.Define(&clause.Formula{
+	ID: "bar-strain", Name: "Strain of each bar row", Ref: en(compatible, ""), Text: "ε_{s,j} = κ·(d_j − x)", Unit: "‰", Digits: 6,
+	Examples: hand("12.686 ‰", "κ = 29.429 1/km", "d_j = 550 mm", "x = 118.93 mm"),
+})
+
+// TendonStress is σ_p on the horizontal branch.
+var TendonStress = clause.Define(&clause.Formula{
+	ID: "tendon-stress", Name: "Stress of each row, at most what is anchored", Ref: en("3.3.6(7) Figure 3.10", ""),
+	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i}; σ_{av,i}))", Unit: "MPa",
+	Examples: append(hand("1426.1 MPa", "σ_{av,i} = 1426.1 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 36 ‰", "f_{pd,i} = 1426.1 MPa"),
+		hand("975 MPa", "σ_{av,i} = 1426.1 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 5 ‰", "f_{pd,i} = 1426.1 MPa")...),
+})
+
+// TendonStressOnIncline is σ_p on the inclined branch.
+var TendonStressOnIncline = clause.Define(&clause.Formula{
+	ID: "tendon-stress-inclined", Name: "Stress of each row on the inclined branch, at most what is anchored", Ref: en("3.3.6(7) Figure 3.10", ""),
+	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{p,i} − ε_{py,i})/(ε_{uk,i} − ε_{py,i}); σ_{av,i}))", Unit: "MPa",
+	Examples: hand("1593.2 MPa", "σ_{av,i} = 1600 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 31.5 ‰", "f_{pd,i} = 1426.1 MPa", "f_{pk,i} = 1860 MPa",
+		"γ_S = 1.15", "ε_{py,i} = 7.3133 ‰", "ε_{uk,i} = 35 ‰"),
+})
+
+// BarStress is σ_s on the horizontal branch, the same in compression.
+var BarStress = clause.Define(&clause.Formula{
+	ID: "bar-stress", Name: "Stress of each bar row, at most what is anchored", Ref: en("3.2.7(2) Figure 3.8", ""),
+	Text: "σ_{s,j} = max(−σ_{sa,j}; min(E_s·ε_{s,j}; σ_{sa,j}))", Unit: "MPa",
+	Examples: append(hand("434.78 MPa", "σ_{sa,j} = 434.78 MPa", "E_s = 200 GPa", "ε_{s,j} = 12 ‰"),
+		hand("-200 MPa", "σ_{sa,j} = 434.78 MPa", "E_s = 200 GPa", "ε_{s,j} = -1 ‰")...),
+})
+
+// BarStressOnIncline is σ_s on the inclined branch, the same in compression.
+var BarStressOnIncline = clause.Define(&clause.Formula{
+	ID: "bar-stress-inclined", Name: "Stress of each bar row on the inclined branch, at most what is anchored", Ref: en("3.2.7(2) Figure 3.8", ""),
+	Text: "σ_{s,j} = max(−σ_{sa,j}; −f_{yd,j}·(1 + (k_j − 1)·max(0; −ε_{s,j} − ε_{sy,j})/(ε_{uk,j} − ε_{sy,j})); " +
+		"min(E_s·ε_{s,j}; f_{yd,j}·(1 + (k_j − 1)·max(0; ε_{s,j} − ε_{sy,j})/(ε_{uk,j} − ε_{sy,j})); σ_{sa,j}))", Unit: "MPa",
+	Examples: hand("465.9 MPa", "σ_{sa,j} = 480 MPa", "E_s = 200 GPa", "ε_{s,j} = 45 ‰", "f_{yd,j} = 434.78 MPa", "k_j = 1.08",
+		"ε_{sy,j} = 2.1739 ‰", "ε_{uk,j} = 50 ‰"),
+})
+
+// TendonForce is F_p.
+var TendonForce = clause.Define(&clause.Formula{
+	ID: "tendon-force", Name: "Force of each row", Ref: en(compatible, ""), Text: "F_{p,i} = A_{p,i}·σ_{p,i}", Unit: "kN", Digits: 6,
+	Examples: hand("1585.82 kN", "A_{p,i} = 1112 mm²", "σ_{p,i} = 1426.1 MPa"),
+})
+
+// BarForce is F_s.
+var BarForce = clause.Define(&clause.Formula{
+	ID: "bar-force", Name: "Force of each bar row", Ref: en(compatible, ""), Text: "F_{s,j} = A_{s,j}·σ_{s,j}", Unit: "kN", Digits: 6,
+	Examples: hand("349.672 kN", "A_{s,j} = 804.25 mm²", "σ_{s,j} = 434.78 MPa"),
+})
+
+// BlockDepth is the depth of the block.
+var BlockDepth = clause.Define(&clause.Formula{
+	ID: "block-depth", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ·x", Unit: "mm", Digits: 6,
+	Examples: hand("95.144 mm", "λ = 0.8", "x = 118.93 mm"),
+})
+
+// BlockPartDepth is how deep the block reaches into each part.
+var BlockPartDepth = clause.Define(&clause.Formula{
+	ID: "block-part-depth", Name: "Depth of the block within each part",
+	Text: "c_{c,n} = max(0; min(h_{c,n}; a − z_{c,n}))", Unit: "mm", Digits: 6,
+	Examples: hand("20 mm", "h_{c,n} = 60 mm", "a = 120 mm", "z_{c,n} = 100 mm"),
+})
+
+// BlockPartWidth is the width of each part at the lower edge of the block.
+var BlockPartWidth = clause.Define(&clause.Formula{
+	ID: "block-part-width", Name: "Width of each part where the block ends",
+	Text: "b_{c,n} = b_{o,n} + (b_{u,n} − b_{o,n})·c_{c,n}/h_{c,n}", Unit: "mm", Digits: 6,
+	Examples: hand("380 mm", "b_{o,n} = 500 mm", "b_{u,n} = 140 mm", "c_{c,n} = 20 mm", "h_{c,n} = 60 mm"),
+})
+
+// BlockPartArea is the area of the block in each part.
+var BlockPartArea = clause.Define(&clause.Formula{
+	ID: "block-part-area", Name: "Area of the block within each part",
+	Text: "A_{cc,n} = c_{c,n}·(b_{o,n} + b_{c,n})/2", Unit: "mm²", Digits: 7,
+	Examples: hand("8800 mm²", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
+})
+
+// BlockPartDepthOfCentroid is the depth of the centroid of the block's area in each part.
+var BlockPartDepthOfCentroid = clause.Define(&clause.Formula{
+	ID: "block-part-centroid", Name: "Depth of the centroid of that area from the top",
+	Text: "z_{cc,n} = z_{c,n} + c_{c,n}/3·(b_{o,n} + 2·b_{c,n})/(b_{o,n} + b_{c,n})", Unit: "mm", Digits: 6,
+	Examples: hand("109.545 mm", "z_{c,n} = 100 mm", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
+})
+
+// ConcreteForce is F_c.
+var ConcreteForce = clause.Define(&clause.Formula{
+	ID: "concrete-force", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "F_c = η·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
+	Examples: hand("1585.72 kN", "η = 1", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
+})
+
+// ConcreteForceDepth is the depth of F_c.
+var ConcreteForceDepth = clause.Define(&clause.Formula{
+	ID: "concrete-force-depth", Name: "Depth of that force from the top", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "d_c = Σ_n(A_{cc,n}·z_{cc,n})/Σ_n(A_{cc,n})", Unit: "mm", Digits: 6,
+	Examples: hand("47.572 mm", "A_{cc,n} = 47572 mm², 0 mm²", "z_{cc,n} = 47.572 mm, 100 mm"),
+})
+
+func steelSums(with, without *clause.Formula) (*clause.Formula, *clause.Formula) {
+	return clause.Define(with), clause.Define(without)
+}
+
+// Sums over the steel, with and without bars.
+var (
+	ResidualWithBars, Residual = steelSums(
+		&clause.Formula{ID: "residual-with-bars", Name: "Equilibrium: what is left of the forces", Ref: en(compatible, ""),
+			Text: "ΔF = F_c − Σ_i(F_{p,i}) − Σ_j(F_{s,j})", Unit: "kN",
+			Examples: hand("0.1 kN", "F_c = 1935.6 kN", "F_{p,i} = 1000 kN, 585.8 kN", "F_{s,j} = 349.7 kN")},
+		&clause.Formula{ID: "residual", Name: "Equilibrium: what is left of the forces", Ref: en(compatible, ""),
+			Text: "ΔF = F_c − Σ_i(F_{p,i})", Unit: "kN",
+			Examples: hand("0.1 kN", "F_c = 1585.9 kN", "F_{p,i} = 1000 kN, 585.8 kN")})
+	ResistanceWithBars, Resistance = steelSums(
+		&clause.Formula{ID: "moment-resistance-with-bars", Name: "Moment resistance about the line of the concrete force", Ref: en(compatible, ""),
+			Text: "M_Rd = Σ_i(F_{p,i}·z_i) + Σ_j(F_{s,j}·z_j)", Unit: "kN·m", Digits: 6, Domain: balanced,
+			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN", "z_i = 1 m", "F_{s,j} = 2 kN", "z_j = 600 mm")},
+		&clause.Formula{ID: "moment-resistance", Name: "Moment resistance about the line of the concrete force", Ref: en(compatible, ""),
+			Text: "M_Rd = Σ_i(F_{p,i}·z_i)", Unit: "kN·m", Digits: 6, Domain: balanced,
+			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN, 2 kN", "z_i = 1000 mm, 600 mm")})
+	EffectiveDepthWithBars, EffectiveDepth = steelSums(
+		&clause.Formula{ID: "effective-depth-with-bars", Name: "Effective depth, to the resultant of the steel forces", Ref: en(compatible, ""),
+			Text: "d = (Σ_i(F_{p,i}·d_i) + Σ_j(F_{s,j}·d_j))/(Σ_i(F_{p,i}) + Σ_j(F_{s,j}))", Unit: "mm",
+			Examples: hand("850 mm", "F_{p,i} = 1 kN", "d_i = 1000 mm", "F_{s,j} = 1 kN", "d_j = 700 mm")},
+		&clause.Formula{ID: "effective-depth", Name: "Effective depth, to the resultant of the steel forces", Ref: en(compatible, ""),
+			Text: "d = Σ_i(F_{p,i}·d_i)/Σ_i(F_{p,i})", Unit: "mm",
+			Examples: hand("850 mm", "F_{p,i} = 1 kN, 1 kN", "d_i = 1000 mm, 700 mm")})
+)
+
+// balanced is the domain of a resistance: the forces balance to a thousandth.
+const balanced = "abs(ΔF) ≤ 0.001·F_c"
+
+// TendonLever and BarLever are lever arms about the line of F_c.
+var (
+	TendonLever = clause.Define(&clause.Formula{ID: "tendon-lever", Name: "Lever arm of each row about the concrete force", Ref: en(compatible, ""),
+		Text: "z_i = d_i − d_c", Unit: "mm", Digits: 6, Examples: hand("1092.43 mm", "d_i = 1140 mm", "d_c = 47.57 mm")})
+	BarLever = clause.Define(&clause.Formula{ID: "bar-lever", Name: "Lever arm of each bar row about the concrete force", Ref: en(compatible, ""),
+		Text: "z_j = d_j − d_c", Unit: "mm", Digits: 6, Examples: hand("502.43 mm", "d_j = 550 mm", "d_c = 47.57 mm")})
+)
+
+// AxisRatio is x/d.
+var AxisRatio = clause.Define(&clause.Formula{
+	ID: "axis-ratio", Name: "Relative depth of the neutral axis", Ref: en(compatible, ""), Text: "ξ_x = x/d", Unit: "",
+	Examples: hand("0.10432", "x = 118.93 mm", "d = 1140 mm"),
+})
+
+// OutermostYields asks whether the outermost row of tendons is beyond its yield strain.
+var OutermostYields = &clause.Condition{
+	ID: "outermost-yields", Name: "Kind of failure", Ref: en("5.10.1(5)P", ""),
+	Text: "max_i(cases(d_i ≥ d_max: ε_{p,i} − ε_{py,i}; otherwise: −ε_{py,i})) ≥ 0",
+	Yes:  "the outermost row yields before the concrete crushes",
+	No:   "over-reinforced: the concrete crushes before the outermost row yields",
+}
+
+// AxisRoot is the neutral axis found from compatible strains.
+func axisRoot(residual *clause.Formula, equation string) *clause.Root {
+	return &clause.Root{ID: "axis-root", Name: "Depth of the neutral axis from compatible strains", Ref: en(compatible, ""),
+		Unknown: "x", Unit: "mm", Digits: 7, Equation: equation, Residual: residual, Scale: "F_c", Tolerance: 2e-4}
+}
+
+// The unknown depth of the neutral axis, with and without bars.
+var (
+	AxisRootWithBars = axisRoot(ResidualWithBars, "F_c = Σ_i(F_{p,i}) + Σ_j(F_{s,j})")
+	AxisRoot         = axisRoot(Residual, "F_c = Σ_i(F_{p,i})")
+)
+
+// BendingSufficient is M_Ed ≤ M_Rd.
+var BendingSufficient = &clause.Check{ID: "bending-sufficient", Name: "Bending at ultimate, sagging", Ref: en("6.1", ""), Demand: "M_Ed", Limit: "M_Rd"}

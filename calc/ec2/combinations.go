@@ -1,0 +1,118 @@
+package ec2
+
+import "soffit/calc/clause"
+
+// Combinations of actions, EN 1990 6.4.3, 6.5.3 and A1. Load i is permanent (P_i = 1) or variable (P_i = 0); each
+// load counts with its upper factor where that is unfavourable and with its lower one where it is favourable,
+// station by station. Combination n has the leading variable action marked by l_{i,n} = 1.
+
+// CombinationFactor is ψ of a load in an ultimate or characteristic combination.
+var CombinationFactor = clause.Define(&clause.Formula{
+	ID: "combination-factor", Name: "Combination factor of each load: 1 for the leading variable action, ψ₀ for the others", Ref: en1990("6.4.3.2", "6.10"),
+	Text: "ψ_{i,n} = cases(l_{i,n} = 1: 1; otherwise: ψ_{0,i})", Unit: "", Digits: 3,
+	Examples: []clause.Example{by("EN 1990 Table A1.1, category A", clause.Recalled, "0.7", "l_{i,n} = 0", "ψ_{0,i} = 0.7")},
+})
+
+// FrequentFactor is ψ of a load in a frequent combination.
+var FrequentFactor = clause.Define(&clause.Formula{
+	ID: "frequent-factor", Name: "Factor of each load: ψ₁ for the leading variable action, ψ₂ for the others", Ref: en1990("6.5.3(2)b", "6.15"),
+	Text: "ψ_{i,n} = cases(l_{i,n} = 1: ψ_{1,i}; otherwise: ψ_{2,i})", Unit: "", Digits: 3,
+	Examples: []clause.Example{by("EN 1990 Table A1.1, category A", clause.Recalled, "0.5", "l_{i,n} = 1", "ψ_{1,i} = 0.5", "ψ_{2,i} = 0.3")},
+})
+
+// PermanentReduction is ξ where 6.10b reduces the permanent actions.
+var PermanentReduction = clause.Define(&clause.Formula{
+	ID: "permanent-reduction", Name: "Reduction of the permanent actions in 6.10b", Ref: en1990("6.4.3.2", "6.10b"),
+	Text: "ξ_{G,n} = cases(k_{r,n} = 1: ξ; otherwise: 1)", Unit: "", Digits: 3,
+	Examples: hand("0.85", "k_{r,n} = 1", "ξ = 0.85"),
+})
+
+// UpperFactor is the factor of a load where it is unfavourable.
+var UpperFactor = clause.Define(&clause.Formula{
+	ID: "upper-factor", Name: "Factor where the load is unfavourable", Ref: en1990("6.4.3.2, Table A1.2(B)", "6.10"),
+	Text: "γ_{u,i,n} = cases(P_i = 1: ξ_{G,n}·γ_{G,sup}; otherwise: γ_Q·ψ_{i,n})", Unit: "",
+	Examples: append(hand("1.35", "P_i = 1", "ξ_{G,n} = 1", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0"),
+		hand("1.05", "P_i = 0", "ξ_{G,n} = 1", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0.7")...),
+})
+
+// LowerFactor is the factor of a load where it is favourable.
+var LowerFactor = clause.Define(&clause.Formula{
+	ID: "lower-factor", Name: "Factor where the load is favourable", Ref: en1990("6.4.3.2, Table A1.2(B)", "6.10"),
+	Text: "γ_{f,i} = cases(P_i = 1: γ_{G,inf}; otherwise: 0)", Unit: "",
+	Examples: hand("0", "P_i = 0", "γ_{G,inf} = 1"),
+})
+
+func ultimate(id, name, symbol, op, effect string) *clause.Formula {
+	return clause.Define(&clause.Formula{
+		ID: id, Name: name, Ref: en1990("6.4.3.2", "6.10"),
+		Text: symbol + " = Σ_i(" + op + "(γ_{u,i,n}·" + effect + "; γ_{f,i}·" + effect + "))",
+		Unit: unitOf(effect), Digits: 6, Examples: factorExample(op, effect),
+	})
+}
+
+func unitOf(effect string) string {
+	if effect == "M_i" {
+		return "kN·m"
+	}
+	return "kN"
+}
+
+// factorExample adds a permanent load of 100 and a variable one of −20 in units of the effect.
+func factorExample(op, effect string) []clause.Example {
+	u := unitOf(effect)
+	want := "135 " + u // 1.35·100 + 0
+	if op == "min" {
+		want = "70 " + u // 1.0·100 − 1.5·20
+	}
+	return hand(want, "γ_{u,i,n} = 1.35, 1.5", effect+" = 100 "+u+", -20 "+u, "γ_{f,i} = 1, 0")
+}
+
+// Ultimate effects of each combination, largest and smallest.
+var (
+	UltimateMoment        = ultimate("ultimate-moment", "Largest moment of each combination", "M_{Ed,n}", "max", "M_i")
+	UltimateMomentMin     = ultimate("ultimate-moment-least", "Least moment of each combination", "M_{Ed,min,n}", "min", "M_i")
+	UltimateShearLeft     = ultimate("ultimate-shear-left", "Largest shear force of each combination, left of the station", "V_{Ed,l,n}", "max", "V_{l,i}")
+	UltimateShearRight    = ultimate("ultimate-shear-right", "Largest shear force of each combination, right of the station", "V_{Ed,r,n}", "max", "V_{r,i}")
+	UltimateShearLeftMin  = ultimate("ultimate-shear-left-least", "Least shear force of each combination, left of the station", "V_{Ed,l,min,n}", "min", "V_{l,i}")
+	UltimateShearRightMin = ultimate("ultimate-shear-right-least", "Least shear force of each combination, right of the station", "V_{Ed,r,min,n}", "min", "V_{r,i}")
+)
+
+func envelope(id, name, symbol, op, of, unit string) *clause.Formula {
+	return clause.Define(&clause.Formula{ID: id, Name: name, Ref: clause.Ref{}, Text: symbol + " = " + op + "_n(" + of + ")", Unit: unit, Digits: 6,
+		Examples: envelopeExample(op, of, unit)})
+}
+
+func envelopeExample(op, of, unit string) []clause.Example {
+	want := "30 " + unit
+	if op == "min" {
+		want = "-10 " + unit
+	}
+	return hand(want, of+" = 20 "+unit+", 30 "+unit+", -10 "+unit)
+}
+
+// Envelopes over the combinations.
+var (
+	MomentEnvelope        = envelope("moment", "Largest moment at the station", "M_Ed", "max", "M_{Ed,n}", "kN·m")
+	MomentEnvelopeMin     = envelope("moment-least", "Least moment at the station", "M_{Ed,min}", "min", "M_{Ed,min,n}", "kN·m")
+	ShearLeftEnvelope     = envelope("shear-left", "Largest shear force left of the station", "V_{Ed,l}", "max", "V_{Ed,l,n}", "kN")
+	ShearRightEnvelope    = envelope("shear-right", "Largest shear force right of the station", "V_{Ed,r}", "max", "V_{Ed,r,n}", "kN")
+	ShearLeftEnvelopeMin  = envelope("shear-left-least", "Least shear force left of the station", "V_{Ed,l,min}", "min", "V_{Ed,l,min,n}", "kN")
+	ShearRightEnvelopeMin = envelope("shear-right-least", "Least shear force right of the station", "V_{Ed,r,min}", "min", "V_{Ed,r,min,n}", "kN")
+)
+
+func service(id, name, sub string, equation string) (moment, largest *clause.Formula) {
+	moment = clause.Define(&clause.Formula{
+		ID: id + "-moment", Name: name + ", each combination", Ref: en1990("6.5.3(2)", equation),
+		Text: "M_{" + sub + ",n} = Σ_i(max((P_i + (1 − P_i)·ψ_{i,n})·M_i; P_i·M_i))", Unit: "kN·m", Digits: 6,
+		Examples: hand("114 kN·m", "P_i = 1, 0", "ψ_{i,n} = 0, 0.7", "M_i = 100 kN·m, 20 kN·m"),
+	})
+	largest = envelope(id, name, "M_{"+sub+"}", "max", "M_{"+sub+",n}", "kN·m")
+	return moment, largest
+}
+
+// Service moments: characteristic, frequent, quasi-permanent.
+var (
+	CharacteristicMoment, CharacteristicEnvelope = service("characteristic", "Largest moment, characteristic", "char", "6.14b")
+	FrequentMoment, FrequentEnvelope             = service("frequent", "Largest moment, frequent", "freq", "6.15b")
+	QuasiPermanentMoment, QuasiPermanentEnvelope = service("quasi-permanent", "Largest moment, quasi-permanent", "qp", "6.16b")
+)
