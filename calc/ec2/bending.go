@@ -257,7 +257,7 @@ var BlockPartWidth = clause.Define(&clause.Formula{
 // BlockPartArea is the area of the block in each part.
 var BlockPartArea = clause.Define(&clause.Formula{
 	ID: "block-part-area", Name: "Area of the block within each part",
-	Text: "A_{cc,n} = c_{c,n}·(b_{o,n} + b_{c,n})/2", Unit: "mm²", Digits: 7,
+	Text: "A_{cc,n} = c_{c,n}·(b_{o,n} + b_{c,n})/2", Unit: "mm²", Digits: 6,
 	Examples: hand("8800 mm²", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
 })
 
@@ -290,10 +290,10 @@ func steelSums(with, without *clause.Formula) (*clause.Formula, *clause.Formula)
 var (
 	ResidualWithBars, Residual = steelSums(
 		&clause.Formula{ID: "residual-with-bars", Name: "Equilibrium: what is left of the forces", Ref: en(compatible, ""),
-			Text: "ΔF = F_c − Σ_i(F_{p,i}) − Σ_j(F_{s,j})", Unit: "kN",
+			Text: "ΔF = F_c − Σ_i(F_{p,i}) − Σ_j(F_{s,j})", Unit: "kN", Digits: 2,
 			Examples: hand("0.1 kN", "F_c = 1935.6 kN", "F_{p,i} = 1000 kN, 585.8 kN", "F_{s,j} = 349.7 kN")},
 		&clause.Formula{ID: "residual", Name: "Equilibrium: what is left of the forces", Ref: en(compatible, ""),
-			Text: "ΔF = F_c − Σ_i(F_{p,i})", Unit: "kN",
+			Text: "ΔF = F_c − Σ_i(F_{p,i})", Unit: "kN", Digits: 2,
 			Examples: hand("0.1 kN", "F_c = 1585.9 kN", "F_{p,i} = 1000 kN, 585.8 kN")})
 	ResistanceWithBars, Resistance = steelSums(
 		&clause.Formula{ID: "moment-resistance-with-bars", Name: "Moment resistance about the line of the concrete force", Ref: en(compatible, ""),

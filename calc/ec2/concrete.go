@@ -59,7 +59,7 @@ var PeakStrain = clause.Define(&clause.Formula{
 // UltimateStrain1 is ε_cu1.
 var UltimateStrain1 = clause.Define(&clause.Formula{
 	ID: "ultimate-strain-nonlinear", Name: "Ultimate strain, nonlinear analysis", Ref: en("3.1.5 Table 3.1", ""),
-	Text: "ε_cu1 = cases(f_ck < 50·[MPa]: 3.5; otherwise: min(3.5; 2.8 + 27·((98·[MPa] − f_cm)/(100·[MPa]))^4))·[‰]", Unit: "‰",
+	Text: "ε_cu1 = cases(f_ck ≤ 50·[MPa]: 3.5; otherwise: min(3.5; 2.8 + 27·((98·[MPa] − f_cm)/(100·[MPa]))^4))·[‰]", Unit: "‰",
 	Domain:   strengthDomain,
 	Examples: []clause.Example{by(table31, clause.Recalled, "3.2 ‰", "f_ck = 55 MPa", "f_cm = 63 MPa"), by(table31, clause.Recalled, "3.5 ‰", "f_ck = 30 MPa", "f_cm = 38 MPa")},
 })
@@ -75,7 +75,7 @@ var ParabolaStrain = clause.Define(&clause.Formula{
 // UltimateStrain2 is ε_cu2.
 var UltimateStrain2 = clause.Define(&clause.Formula{
 	ID: "ultimate-strain-parabola", Name: "Ultimate strain, parabola–rectangle", Ref: en("3.1.7(1) Table 3.1", ""),
-	Text: "ε_cu2 = cases(f_ck < 50·[MPa]: 3.5; otherwise: min(3.5; 2.6 + 35·((90·[MPa] − f_ck)/(100·[MPa]))^4))·[‰]", Unit: "‰",
+	Text: "ε_cu2 = cases(f_ck ≤ 50·[MPa]: 3.5; otherwise: min(3.5; 2.6 + 35·((90·[MPa] − f_ck)/(100·[MPa]))^4))·[‰]", Unit: "‰",
 	Domain:   strengthDomain,
 	Examples: []clause.Example{by(table31, clause.Recalled, "2.9 ‰", "f_ck = 60 MPa"), by(table31, clause.Recalled, "2.6 ‰", "f_ck = 90 MPa")},
 })
@@ -83,7 +83,7 @@ var UltimateStrain2 = clause.Define(&clause.Formula{
 // ParabolaExponent is n.
 var ParabolaExponent = clause.Define(&clause.Formula{
 	ID: "parabola-exponent", Name: "Exponent of the parabola", Ref: en("3.1.7(1) Table 3.1", ""),
-	Text: "n = cases(f_ck < 50·[MPa]: 2.0; otherwise: min(2.0; 1.4 + 23.4·((90·[MPa] − f_ck)/(100·[MPa]))^4))", Unit: "",
+	Text: "n = cases(f_ck ≤ 50·[MPa]: 2.0; otherwise: min(2.0; 1.4 + 23.4·((90·[MPa] − f_ck)/(100·[MPa]))^4))", Unit: "", Digits: 4,
 	Domain:   strengthDomain,
 	Examples: []clause.Example{by(table31, clause.Recalled, "1.6", "f_ck = 60 MPa"), by(table31, clause.Recalled, "1.4", "f_ck = 90 MPa")},
 })
@@ -99,7 +99,7 @@ var BilinearStrain = clause.Define(&clause.Formula{
 // UltimateStrain3 is ε_cu3.
 var UltimateStrain3 = clause.Define(&clause.Formula{
 	ID: "ultimate-strain", Name: "Ultimate strain, rectangular block", Ref: en("3.1.7(3) Table 3.1", ""),
-	Text: "ε_cu3 = cases(f_ck < 50·[MPa]: 3.5; otherwise: min(3.5; 2.6 + 35·((90·[MPa] − f_ck)/(100·[MPa]))^4))·[‰]", Unit: "‰",
+	Text: "ε_cu3 = cases(f_ck ≤ 50·[MPa]: 3.5; otherwise: min(3.5; 2.6 + 35·((90·[MPa] − f_ck)/(100·[MPa]))^4))·[‰]", Unit: "‰",
 	Domain:   strengthDomain,
 	Examples: []clause.Example{by(table31, clause.Recalled, "3.1 ‰", "f_ck = 55 MPa"), by(table31, clause.Recalled, "3.5 ‰", "f_ck = 40 MPa")},
 })
@@ -107,14 +107,14 @@ var UltimateStrain3 = clause.Define(&clause.Formula{
 // BlockDepthFactor is λ.
 var BlockDepthFactor = clause.Define(&clause.Formula{
 	ID: "block-depth-factor", Name: "Depth factor of the rectangular block", Ref: en("3.1.7(3)", "3.19, 3.20"),
-	Text: "λ = cases(f_ck ≤ 50·[MPa]: 0.8; otherwise: 0.8 − (f_ck − 50·[MPa])/(400·[MPa]))", Unit: "", Domain: strengthDomain,
+	Text: "λ = cases(f_ck ≤ 50·[MPa]: 0.8; otherwise: 0.8 − (f_ck − 50·[MPa])/(400·[MPa]))", Unit: "", Digits: 3, Domain: strengthDomain,
 	Examples: append(hand("0.8", "f_ck = 50 MPa"), hand("0.7", "f_ck = 90 MPa")...),
 })
 
 // BlockStressFactor is η.
 var BlockStressFactor = clause.Define(&clause.Formula{
 	ID: "block-stress-factor", Name: "Stress factor of the rectangular block", Ref: en("3.1.7(3)", "3.21, 3.22"),
-	Text: "η = cases(f_ck ≤ 50·[MPa]: 1.0; otherwise: 1.0 − (f_ck − 50·[MPa])/(200·[MPa]))", Unit: "", Domain: strengthDomain,
+	Text: "η = cases(f_ck ≤ 50·[MPa]: 1.0; otherwise: 1.0 − (f_ck − 50·[MPa])/(200·[MPa]))", Unit: "", Digits: 3, Domain: strengthDomain,
 	Examples: append(hand("1.0", "f_ck = 50 MPa"), hand("0.8", "f_ck = 90 MPa")...),
 })
 

@@ -18,14 +18,14 @@ func hand(want string, given ...string) []clause.Example {
 
 // PartArea is the area of a part.
 var PartArea = clause.Define(&clause.Formula{
-	ID: "part-area", Name: "Area of each part", Text: "A_{c,n} = (b_{u,n} + b_{o,n})/2·h_{c,n}", Unit: "mm²", Digits: 8,
+	ID: "part-area", Name: "Area of each part", Text: "A_{c,n} = (b_{u,n} + b_{o,n})/2·h_{c,n}", Unit: "mm²", Digits: 6,
 	Examples: hand("12000 mm²", "b_{u,n} = 200 mm", "b_{o,n} = 100 mm", "h_{c,n} = 80 mm"),
 })
 
 // PartCentroid is the height of a part's centroid above the soffit.
 var PartCentroid = clause.Define(&clause.Formula{
 	ID: "part-centroid", Name: "Centroid of each part above the soffit",
-	Text: "y_{c,n} = y_{u,n} + h_{c,n}/3·(b_{u,n} + 2·b_{o,n})/(b_{u,n} + b_{o,n})", Unit: "mm", Digits: 7,
+	Text: "y_{c,n} = y_{u,n} + h_{c,n}/3·(b_{u,n} + 2·b_{o,n})/(b_{u,n} + b_{o,n})", Unit: "mm", Digits: 6,
 	Examples: hand("40 mm", "y_{u,n} = 0 mm", "b_{u,n} = 200 mm", "b_{o,n} = 200 mm", "h_{c,n} = 80 mm"),
 })
 

@@ -1,6 +1,8 @@
 package trace
 
 import (
+	"cmp"
+	"errors"
 	"fmt"
 	"math"
 
@@ -12,6 +14,7 @@ import (
 // Row reads operands for a solver at one row, from the carried or from the unrounded chain.
 type Row struct {
 	block  *Block
+	frames map[string]*frame // one per symbol, bound once for all rows
 	row    int
 	shadow bool
 	err    error
@@ -19,67 +22,81 @@ type Row struct {
 
 // Value is the value of a symbol in base units.
 func (r *Row) Value(symbol string) float64 {
-	v := r.read(symbol, "")
-	if len(v) == 0 {
+	f := r.bound(symbol)
+	if f == nil {
 		return 0
 	}
-	return v[0]
+	v := f.Value(0)
+	r.err = f.miss
+	return v
 }
 
 // Column is the values of an indexed symbol over the rows of its index, in base units.
 func (r *Row) Column(symbol string) []float64 {
-	s, err := formula.ParseSymbol(symbol)
-	if err != nil || len(s.Index) != 1 {
+	f := r.bound(symbol)
+	if f == nil {
+		return nil
+	}
+	index := ""
+	for _, l := range []string{"i", "j", "n"} {
+		if f.slots[0][0].stride[letter(l)] != 0 {
+			index = l
+		}
+	}
+	if index == "" {
 		r.err = fmt.Errorf("%s is no column", symbol)
 		return nil
 	}
-	return r.read(symbol, s.Index[0])
-}
-
-func (r *Row) read(symbol, index string) []float64 {
-	if r.err != nil {
-		return nil
-	}
-	s, err := formula.ParseSymbol(symbol)
-	if err != nil {
-		r.err = err
-		return nil
-	}
-	fr, err := r.block.bind([]*formula.Symbol{s})
-	if err != nil {
-		r.err = err
-		return nil
-	}
-	fr.shadow = r.shadow
-	fr.at[implicit] = r.row
-	n := 1
-	if index != "" {
-		n = fr.Len(index)
-	}
-	out := make([]float64, n)
+	out := make([]float64, f.Len(index))
 	for i := range out {
-		if index != "" {
-			fr.Set(index, i)
-		}
-		out[i] = fr.Value(0)
+		f.Set(index, i)
+		out[i] = f.Value(0)
 	}
-	r.err = fr.miss
+	r.err = f.miss
 	return out
 }
 
-// Found records what a second method finds on every active row. Such a value stands apart from the steps: it is
-// recorded like an input, with the way it was found as its source, and only differences are formed from it.
-func (b *Block) Found(g *clause.Given, digits int, source string, find func(*Row) (float64, error)) {
+// bound is the frame of one symbol, set to the row.
+func (r *Row) bound(symbol string) *frame {
+	if r.err != nil {
+		return nil
+	}
+	f := r.frames[symbol]
+	if f == nil {
+		s, err := formula.ParseSymbol(symbol)
+		if err == nil {
+			f, err = r.block.bind([]*formula.Symbol{s})
+		}
+		if err != nil {
+			r.err = err
+			return nil
+		}
+		r.frames[symbol] = f
+	}
+	f.shadow, f.at[implicit] = r.shadow, r.row
+	return f
+}
+
+// Found records what a second method finds on every active row from the carried values. Such values stand apart from
+// the steps: they are recorded like an input, with the way they were found as their source, and only differences
+// are formed from them.
+func (b *Block) Found(source string, digits int, find func(*Row) ([]float64, error), gs ...*clause.Given) {
 	if b.stopped() {
 		return
 	}
-	r := &clause.Root{ID: g.ID, Name: g.Name, Ref: g.Ref, Unknown: g.Symbol, Unit: g.Unit, Digits: digits}
-	l, err := b.solve(r, func(row *Row, i int) (float64, error) { return find(row) })
+	roots := make([]*clause.Root, len(gs))
+	for i, g := range gs {
+		roots[i] = &clause.Root{ID: g.ID, Name: g.Name, Ref: g.Ref, Unknown: g.Symbol, Unit: g.Unit, Digits: digits}
+	}
+	lines, err := b.solve(roots, []bool{false}, func(r *Row, _ int) ([]float64, error) { return find(r) })
 	if err != nil {
-		b.fail("%s: %w", g.ID, err)
+		b.fail("%w", err)
 		return
 	}
-	b.record(&Given{Line: *l, Source: source})
+	for _, l := range lines {
+		copy(l.Shadow, l.Values)
+		b.record(&Given{Line: *l, Source: source})
+	}
 }
 
 // Proposal is what a solver found: the unknown and the bracket it was found in, in base units.
@@ -114,22 +131,71 @@ func (b *Block) Prove(d *clause.Root) {
 func (b *Block) root(d *clause.Root, propose func(*Row) (Proposal, error)) error {
 	rows := len(b.build.mask)
 	lo, hi := make([]float64, rows), make([]float64, rows)
-	l, err := b.solve(d, func(r *Row, i int) (float64, error) {
+	l, err := b.solve([]*clause.Root{d}, []bool{false, true}, func(r *Row, i int) ([]float64, error) {
 		p, err := propose(r)
 		if !r.shadow {
 			lo[i], hi[i] = p.Lo, p.Hi
 		}
-		return p.X, err
+		return []float64{p.X}, err
 	})
 	if err != nil {
 		return err
 	}
-	b.record(&Root{Line: *l, Equation: d.Equation, Tolerance: d.Tolerance, Residual: b.build.path + "/" + d.Residual.ID, Lo: lo, Hi: hi})
+	b.record(&Root{Line: *l[0], Equation: d.Equation, Tolerance: d.Tolerance, Residual: b.build.path + "/" + d.Residual.ID, Lo: lo, Hi: hi})
 	return nil
 }
 
-// solve asks for a value on every active row, in the carried and in the unrounded chain, and rounds the column.
-func (b *Block) solve(d *clause.Root, find func(r *Row, i int) (float64, error)) (*Line, error) {
+// solve asks for values on every active row, in each of the chains asked for, and rounds the columns.
+func (b *Block) solve(ds []*clause.Root, chains []bool, find func(r *Row, i int) ([]float64, error)) ([]*Line, error) {
+	var axes []*Axis
+	if b.Over != nil {
+		axes = []*Axis{b.Over}
+	}
+	lines := make([]*Line, len(ds))
+	for k, d := range ds {
+		var err error
+		if lines[k], err = b.line(d, axes); err != nil {
+			return nil, err
+		}
+	}
+	frames := map[string]*frame{}
+	for i, active := range b.build.mask {
+		if !active {
+			continue
+		}
+		for _, shadow := range chains {
+			row := &Row{block: b, frames: frames, row: i, shadow: shadow}
+			v, err := find(row, i)
+			if row.err != nil {
+				err = row.err
+			}
+			for k := range v {
+				if err == nil && (math.IsNaN(v[k]) || math.IsInf(v[k], 0)) {
+					err = errors.New("no finite solution")
+				}
+			}
+			if err != nil {
+				return nil, fmt.Errorf("%s%s: %w", ds[0].Unknown, at(axes, i), err)
+			}
+			for k, l := range lines {
+				if shadow {
+					l.Shadow[i] = v[k]
+				} else {
+					l.Values[i] = v[k]
+				}
+			}
+		}
+	}
+	for k, l := range lines {
+		if err := l.round(b.build.mask, cmp.Or(ds[k].Digits, 5)); err != nil {
+			return nil, err
+		}
+	}
+	return lines, nil
+}
+
+// line is an empty column for an unknown.
+func (b *Block) line(d *clause.Root, axes []*Axis) (*Line, error) {
 	sym, err := formula.ParseSymbol(d.Unknown)
 	if err != nil {
 		return nil, err
@@ -138,51 +204,28 @@ func (b *Block) solve(d *clause.Root, find func(r *Row, i int) (float64, error))
 	if err != nil {
 		return nil, err
 	}
-	var axes []*Axis
-	if b.Over != nil {
-		axes = []*Axis{b.Over}
-	}
 	n := size(axes)
-	l := &Line{Head: b.head(d.ID, d.Name, d.Ref), Symbol: sym}
-	l.Series = Series{Axes: axes, Unit: unit, Shown: make([]string, n), Values: make([]float64, n), Shadow: make([]float64, n)}
-	digits := d.Digits
-	if digits == 0 {
-		digits = 5
-	}
+	return &Line{Head: b.head(d.ID, d.Name, d.Ref), Symbol: sym,
+		Series: Series{Axes: axes, Unit: unit, Shown: make([]string, n), Values: make([]float64, n), Shadow: make([]float64, n)}}, nil
+}
+
+// round gives the active rows of a column the decimals that show so many digits of its largest value.
+func (l *Line) round(active []bool, digits int) error {
 	largest := 0.0
-	for i := range n {
-		if !b.build.mask[i] {
-			continue
+	for i, v := range l.Values {
+		if active[i] {
+			largest = math.Max(largest, math.Abs(l.Unit.From(v)))
 		}
-		for _, shadow := range []bool{false, true} {
-			row := &Row{block: b, row: i, shadow: shadow}
-			v, err := find(row, i)
-			if row.err != nil {
-				err = row.err
-			}
-			if err == nil && (math.IsNaN(v) || math.IsInf(v, 0)) {
-				err = fmt.Errorf("no finite solution")
-			}
-			if err != nil {
-				return nil, fmt.Errorf("%s%s: %w", d.Unknown, at(axes, i), err)
-			}
-			if shadow {
-				l.Shadow[i] = v
-			} else {
-				l.Values[i] = unit.From(v)
-			}
-		}
-		largest = math.Max(largest, math.Abs(l.Values[i]))
 	}
 	l.Decimals = quantity.Decimals(largest, digits)
-	for i := range n {
-		if b.build.mask[i] {
-			if err := l.set(i, quantity.Format(l.Values[i], l.Decimals), l.Shadow[i]); err != nil {
-				return nil, err
+	for i, v := range l.Values {
+		if active[i] {
+			if err := l.set(i, quantity.Format(l.Unit.From(v), l.Decimals), l.Shadow[i]); err != nil {
+				return err
 			}
 		}
 	}
-	return l, nil
+	return nil
 }
 
 func (b *Block) prove(e *Root, d *clause.Root) error {

@@ -1,0 +1,61 @@
+package bending
+
+import "fmt"
+
+// Reason says why there is no neutral axis. A Reason is an error; errors.Is finds it in a Refusal.
+type Reason int
+
+const (
+	// NoTension: with the neutral axis at the very top no steel pulls, or not measurably: nothing balances
+	// the concrete. Have is the sum of the steel forces there, N, tension positive.
+	NoTension Reason = iota + 1
+	// WhollyCompressed: with the section wholly compressed the concrete still does not balance the steel.
+	// Have is the tension, N, Limit the concrete's force, N.
+	WhollyCompressed
+	// LimitSpent: the prestrain of a layer is not below its strain limit. Have is the prestrain, Limit ε_ud.
+	LimitSpent
+	// BadLayer: a layer is not a layer: area or cap negative, depth outside the section, a value that is no
+	// number, or no steel law. Have is the offending value, Limit the depth of the section, mm.
+	BadLayer
+	// BadConcrete: the concrete law is none. Have is the offending value.
+	BadConcrete
+	// Unbalanced: a place was found where the forces change sign, but they do not balance there. Have is the
+	// difference, N, Limit the greatest allowed; Have is NaN if the forces were no numbers somewhere.
+	Unbalanced
+)
+
+func (r Reason) Error() string {
+	switch r {
+	case NoTension:
+		return "no layer of steel pulls"
+	case WhollyCompressed:
+		return "the wholly compressed section cannot balance the steel"
+	case LimitSpent:
+		return "the prestrain leaves nothing below the strain limit"
+	case BadLayer:
+		return "not a layer of steel"
+	case BadConcrete:
+		return "not a law of concrete"
+	case Unbalanced:
+		return "the forces do not balance"
+	}
+	return fmt.Sprintf("reason %d", int(r))
+}
+
+// Refusal is the error of NeutralAxis and Fibres: a reason with its numbers, whose meaning stands beside
+// the reason.
+type Refusal struct {
+	Reason      Reason
+	Layer       int // index of the layer at fault, −1 if it is none
+	Have, Limit float64
+}
+
+func (r *Refusal) Error() string {
+	if r.Layer >= 0 {
+		return fmt.Sprintf("no neutral axis: layer %d: %v (%g, limit %g)", r.Layer+1, r.Reason, r.Have, r.Limit)
+	}
+	return fmt.Sprintf("no neutral axis: %v (%g, limit %g)", r.Reason, r.Have, r.Limit)
+}
+
+// Unwrap gives the Reason.
+func (r *Refusal) Unwrap() error { return r.Reason }

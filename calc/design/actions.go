@@ -1,0 +1,111 @@
+package design
+
+import (
+	"cmp"
+	"fmt"
+	"slices"
+
+	"soffit/calc/ec2"
+	"soffit/calc/mechanics"
+	"soffit/calc/quantity"
+	"soffit/calc/trace"
+	"soffit/templates"
+)
+
+// parts40 is in how many equal parts the span is cut for stations.
+const parts40 = 40
+
+// station is a place along the member at which everything is worked.
+type station struct {
+	name string
+	x    float64 // mm from end A
+}
+
+// stationList is the tenths and fortieths of the span, each load, and where the force of a row of tendons starts,
+// has been handed over and can be anchored in full. Places nearer than 1 mm to an earlier one are the same.
+func (j *job) stationList() []station {
+	length := j.m.Span.Length.Base()
+	a, b := j.m.Span.BearingA.FromEnd.Base(), length-j.m.Span.BearingB.FromEnd.Base()
+	var all []station
+	add := func(name string, x float64) {
+		if x < a || x > b {
+			return
+		}
+		for _, s := range all {
+			if s.x > x-1 && s.x < x+1 {
+				return
+			}
+		}
+		all = append(all, station{name, x})
+	}
+	add("bearing A", a)
+	add("bearing B", b)
+	add("mid-span", (a+b)/2)
+	for k := 1; k < parts40; k++ {
+		add(fmt.Sprintf("%g L", float64(k)/parts40), a+(b-a)*float64(k)/parts40)
+	}
+	for _, l := range j.loadRows()[1:] {
+		from, to := l.from.Quantity().Value, l.to.Quantity().Value
+		if from == to {
+			add(l.name, from)
+			continue
+		}
+		add(l.name+" from", from)
+		add(l.name+" to", to)
+	}
+	for i, r := range j.rows.Rows {
+		row := trace.Place{{Axis: j.rows, Row: i}}
+		debonded := j.base("given.tendons/debonded-length", row)
+		for _, p := range []struct {
+			name string
+			x    float64
+		}{{"start", debonded}, {"l_pt2", debonded + j.base("prestress.transmission/upper-transmission-length", row)},
+			{"l_bpd", debonded + j.base("prestress.transmission/anchorage-length", row)}} {
+			add(p.name+" "+r+" A", p.x)
+			add(p.name+" "+r+" B", length-p.x)
+		}
+	}
+	slices.SortFunc(all, func(s, t station) int { return cmp.Compare(s.x, t.x) })
+	return all
+}
+
+// base reads a recorded value, in base units; 0 where the record has stopped on an error.
+func (j *job) base(key string, at trace.Place) float64 {
+	l := trace.LineOf(j.n.Entry(key))
+	if l == nil {
+		return 0
+	}
+	i := trace.Flat(l.Axes, at)
+	if i < 0 {
+		return 0
+	}
+	return l.Values[i]
+}
+
+// actionsChapter gives moments and shear forces of each load at each station, and their combinations.
+func (j *job) actionsChapter(c *trace.Chapter) {
+	list := j.stationList()
+	names, x := make([]string, len(list)), make([]quantity.Literal, len(list))
+	for i, s := range list {
+		names[i], x[i] = s.name, number(s.x, "m", 3)
+	}
+	j.stations = j.n.Axis("station", "station along the member", "", names)
+
+	b := c.Block("loads", "Loads and reactions", nil, trace.Take(j.gross, j.span, j.actionData)...)
+	j.reactions = b
+	j.narrative(b, "actions")
+	b.Text("loads", templates.Text("loads"))
+	b.Steps(mechanics.Load, mechanics.ReactionB, mechanics.ReactionA)
+
+	b = c.Block("effects", "Effects of each load along the member", j.stations, trace.Take(j.span, j.actionData, j.reactions)...)
+	j.effects = b
+	b.Row = j.stations.Row("mid-span")
+	b.GivenRows(def("position", "x", "Distance of the station from end A", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", parts40))
+	b.Steps(mechanics.LoadMoment, mechanics.ShearLeft, mechanics.ShearRight)
+
+	j.ultimate = j.ultimateCombinations(c)
+	j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CombinationFactor, ec2.CharacteristicMoment, ec2.CharacteristicEnvelope)
+	j.frequent = j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, ec2.FrequentMoment, ec2.FrequentEnvelope)
+	j.combination(c, "quasi-permanent", "Quasi-permanent combination", noneLeads, ec2.FrequentFactor, ec2.QuasiPermanentMoment, ec2.QuasiPermanentEnvelope)
+	j.effectsFigure()
+}

@@ -1,0 +1,27 @@
+package design
+
+import (
+	"soffit/calc/mechanics"
+	"soffit/calc/trace"
+)
+
+// sectionChapter gives the properties of the gross concrete section and the places of the steel in it.
+func (j *job) sectionChapter(c *trace.Chapter) {
+	b := c.Block("gross", "Gross concrete section", nil, trace.Take(j.concrete, j.section)...)
+	j.gross = b
+	j.narrative(b, "section")
+	b.Steps(mechanics.PartArea, mechanics.PartCentroid, mechanics.PartInertia)
+	b.Steps(mechanics.Area, mechanics.Centroid, mechanics.Inertia, mechanics.LowerModulus, mechanics.UpperModulus)
+	b.Step(mechanics.SelfWeight)
+
+	takes := trace.Take(j.section, j.gross, j.tendons)
+	if j.hasBars() {
+		takes = append(takes, trace.Take(j.barData)...)
+	}
+	b = c.Block("positions", "Places of the steel", nil, takes...)
+	j.positions = b
+	b.Steps(mechanics.Eccentricity, mechanics.TendonDepth, mechanics.OutermostDepth)
+	if j.hasBars() {
+		b.Step(mechanics.BarDepth)
+	}
+}

@@ -1,0 +1,142 @@
+package design
+
+import (
+	"fmt"
+
+	"soffit/calc/member"
+	"soffit/calc/quantity"
+	"soffit/calc/trace"
+)
+
+// verdictChapter opens the note: what fails, and what would mend it, found by running the design again.
+func (j *job) verdictChapter(c *trace.Chapter) {
+	b := c.Block("checks", "Every check", nil)
+	j.narrative(b, "verdict")
+	if effect, check := j.n.Rounding(); check != nil {
+		b.Text("rounding", fmt.Sprintf("Rounding to the printed digits moves no ratio of demand to limit by more than %.4f (%s %s).", effect+0.00005, check.Number, check.Name))
+	}
+	if j.trying || j.n.Err() != nil {
+		return
+	}
+	var failing []*trace.Check
+	for _, k := range j.n.Checks() {
+		if k.Failed() {
+			failing = append(failing, k)
+		}
+	}
+	if len(failing) > 0 {
+		j.mends(c, failing)
+	}
+}
+
+// remedy is one way to change a member, step by step; apply changes a copy and says in words what it did, or
+// returns "" where the step cannot be taken.
+type remedy struct {
+	id    string
+	steps int
+	apply func(m *member.Member, step int) string
+}
+
+// remedies are tried in this order, each from its smallest step up.
+var remedies = []remedy{
+	{"more-tendons", 8, moreTendons},
+	{"stronger-concrete", 8, strongerConcrete},
+	{"deeper-section", 12, deeperSection},
+}
+
+// moreTendons adds to the lowest row that has room.
+func moreTendons(m *member.Member, step int) string {
+	low := 0
+	for i := range m.Strands.Rows {
+		if m.Strands.Rows[i].Height.Base() < m.Strands.Rows[low].Height.Base() {
+			low = i
+		}
+	}
+	r := &m.Strands.Rows[low]
+	before := r.Count.N
+	r.Count.N += step
+	f := formOf(&m.Shape)
+	edge := 2 * r.Height.Base() // as far from the sides as from the soffit
+	if float64(r.Count.N-1)*r.Spacing.Base() > f.lower[0].Quantity().Value-edge {
+		return ""
+	}
+	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
+}
+
+// strongerConcrete raises f_ck by 5 MPa a step, to 90 MPa at most; the strength at release stays.
+func strongerConcrete(m *member.Member, step int) string {
+	v := m.Concrete.Fck.Base() + 5*float64(step)
+	if v > 90 {
+		return ""
+	}
+	before := m.Concrete.Fck.String()
+	m.Concrete.Fck.Literal = number(v, "MPa", 0)
+	return fmt.Sprintf("f_ck %s instead of %s", m.Concrete.Fck, before)
+}
+
+// deeperSection raises the depth by 50 mm a step; what is stated of the tendons stays.
+func deeperSection(m *member.Member, step int) string {
+	before := m.Shape.Depth.String()
+	m.Shape.Depth.Literal = number(m.Shape.Depth.Base()+50*float64(step), "mm", places(m.Shape.Depth.Base()))
+	return fmt.Sprintf("depth %s instead of %s, tendons at the same heights, the stated losses kept", m.Shape.Depth, before)
+}
+
+// mends tries each remedy on each failing check until that check passes and nothing else fails that passed.
+func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
+	b := c.Block("mends", "What would mend a failing check", nil)
+	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and no other check fails, found by running the whole design again. It is a hint for the engineer, not a design.")
+	for _, k := range failing {
+		for _, r := range remedies {
+			words, ratio := j.try(r, k)
+			if words == "" {
+				continue
+			}
+			id := r.id + "-" + k.Key
+			symbol := fmt.Sprintf("r_%d", len(b.Entries))
+			b.Given(def(keyed(id), symbol, k.Name+": with "+words, ""), quantity.Literal{Number: ratio}, "the design run again; ratio then")
+		}
+	}
+}
+
+// keyed makes an ID of a key: no slash and no point.
+func keyed(key string) string {
+	out := []byte(key)
+	for i, c := range out {
+		if c == '/' || c == '.' {
+			out[i] = '-'
+		}
+	}
+	return string(out)
+}
+
+// try finds the smallest step of a remedy that mends a check, and the ratio it has then.
+func (j *job) try(r remedy, failing *trace.Check) (words, ratio string) {
+	for step := 1; step <= r.steps; step++ {
+		m := *j.m
+		m.Strands.Rows = append([]member.StrandRow(nil), m.Strands.Rows...)
+		words := r.apply(&m, step)
+		if words == "" {
+			return "", ""
+		}
+		n, err := run(&m, true)
+		if err != nil {
+			return "", ""
+		}
+		again, ok := n.Entry(failing.Key).(*trace.Check)
+		if ok && !again.Failed() && j.noneNew(n) {
+			return words, again.Ratio[again.Worst]
+		}
+	}
+	return "", ""
+}
+
+// noneNew says that no check fails that does not fail in the design at hand.
+func (j *job) noneNew(n *trace.Note) bool {
+	for _, k := range n.Checks() {
+		before, ok := j.n.Entry(k.Key).(*trace.Check)
+		if k.Failed() && (!ok || !before.Failed()) {
+			return false
+		}
+	}
+	return true
+}

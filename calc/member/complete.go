@@ -1,0 +1,38 @@
+package member
+
+import "soffit/calc/quantity"
+
+// complete puts in the defaults that follow from other values.
+func (m *Member) complete() {
+	b := &m.Basis
+	if level, ok := map[string]string{"CC1": "DSL1", "CC2": "DSL2", "CC3": "DSL3"}[b.ConsequenceClass.Text]; ok && b.SupervisionLevel == (Word{}) {
+		b.SupervisionLevel = Word{level, Origin{Pos: b.Pos, Why: "goes with " + b.ConsequenceClass.Text + ", EN 1990 Annex B"}}
+	}
+	single := func(v *Value, n Count, what string, row Origin) {
+		if n.N == 1 && *v == (Value{}) {
+			*v = Value{quantity.Literal{Number: "0", Unit: quantity.MustUnit("mm")}, Origin{Pos: row.Pos, Why: what}}
+		}
+	}
+	for i := range m.Strands.Rows {
+		s := &m.Strands.Rows[i]
+		single(&s.Spacing, s.Count, "a single strand", Origin{Pos: s.Pos})
+	}
+	for i := range m.Bars.Rows {
+		s := &m.Bars.Rows[i]
+		single(&s.Spacing, s.Count, "a single bar", Origin{Pos: s.Pos})
+	}
+	for i := range m.Actions {
+		for k := range m.Actions[i].Loads {
+			l := &m.Actions[i].Loads[k]
+			if !l.Uniform.Present() {
+				continue
+			}
+			if l.From == (Value{}) {
+				l.From = Value{quantity.Literal{Number: "0", Unit: quantity.MustUnit("m")}, Origin{Pos: l.Pos, Why: "from end A"}}
+			}
+			if l.To == (Value{}) && m.Span.Length.Present() {
+				l.To = Value{m.Span.Length.Literal, Origin{Pos: l.Pos, Why: "to end B"}}
+			}
+		}
+	}
+}
