@@ -90,7 +90,7 @@ func TestMetamorphic(t *testing.T) {
 
 // With every layer on the level branch the prestrain does not change the resistance.
 func TestPrestrainAtYield(t *testing.T) {
-	compared := 0
+	compared, total := 0, 0
 	rapid.Check(t, func(t *rapid.T) {
 		shape := anyShape(t)
 		block, parabola := anyConcrete(t)
@@ -110,6 +110,7 @@ func TestPrestrainAtYield(t *testing.T) {
 			more[i].Prestrain += rapid.Float64Range(0, 5e-3).Draw(t, "Δε_p0")
 		}
 		for name, solve := range both(s, block, parabola, layers) {
+			total++
 			a, err := solve(s, layers)
 			if err != nil {
 				continue
@@ -127,8 +128,8 @@ func TestPrestrainAtYield(t *testing.T) {
 			within(t, name+" M", b.Moment, a.Moment, 1e-11)
 		}
 	})
-	if compared < 1000 && !testing.Short() {
-		t.Errorf("only %d sections had all layers at yield", compared)
+	if 3*compared < total {
+		t.Errorf("only %d of %d states had all layers at yield", compared, total)
 	}
 }
 

@@ -155,6 +155,7 @@ func TestAnySection(t *testing.T) {
 			if name == "fibres" {
 				tol = 1.1e-6 * force // with a part for the quadrature
 			}
+			tol += 1e-13 * shape.Area() * parabola.Fcd // the area above, found here as a difference, is no better
 			if !(math.Abs(force-pull) <= tol) || !(math.Abs(a.Residual) <= 1e-6*a.Concrete) {
 				t.Errorf("%s: at x = %g the concrete gives %.12g, the steel %.12g, residual %g", name, a.X, force, pull, a.Residual)
 			}
@@ -166,8 +167,16 @@ func TestAnySection(t *testing.T) {
 	for name, n := range counts {
 		t.Logf("%6d %s", n, name)
 	}
-	if roots := counts["block: root, top fibre"] + counts["block: root, steel"]; roots < 2000 && !testing.Short() {
-		t.Errorf("only %d sections had a root", roots)
+	total := 0
+	for _, n := range counts {
+		total += n
+	}
+	roots := total
+	for _, r := range []Reason{NoTension, WhollyCompressed, LimitSpent} {
+		roots -= counts["block: "+r.Error()] + counts["fibres: "+r.Error()]
+	}
+	if 4*roots < 3*total {
+		t.Errorf("only %d of %d searches had a root", roots, total)
 	}
 }
 

@@ -213,6 +213,31 @@ func TestDepthWithinWhichSeveralMayBalance(t *testing.T) {
 	near(t, "reach with the lowest idle", p.several(), 0, 0)
 }
 
+// climb finds a peak that stays below zero, and stops early on one that does not.
+func TestClimb(t *testing.T) {
+	s := rectangle(t, 100, 1000)
+	brittle := ok[SteelLaw](t)(horizontal(t, 200e3, 200).WithLimit(2e-3))
+	for _, area := range []float64{430.0, 452.5, 454, 460, 475} {
+		p := problem{section: s, block: block20, epsCu: 3.5e-3, layers: []Layer{
+			{Area: 1, Depth: 300, Prestrain: 1.5e-3, Cap: inf, Law: brittle},
+			{Area: area, Depth: 950, Cap: inf, Law: horizontal(t, 200e3, 1600)},
+		}}
+		top, at := -inf, 0.0
+		for x := 50.0; x < 260; x += 0.01 {
+			if f := p.balance(x); f > top {
+				top, at = f, x
+			}
+		}
+		x, evals := p.climb(50, 260)
+		if top >= 0 && (p.balance(x) < 0 || evals > 20) || evals < 2 || evals > 40 {
+			t.Errorf("%g mm²: %g at %g mm after %d evaluations, top %g at %g mm", area, p.balance(x), x, evals, top, at)
+		}
+		if top < 0 {
+			near(t, "peak", x, at, 0.05)
+		}
+	}
+}
+
 // Steel that the section can hold only with the neutral axis just below it: at x = h and at x = 10·h the steel
 // prevails, in between the concrete, for bars near the top let go as the strain evens out.
 func TestBalanceBelowTheSectionOnly(t *testing.T) {

@@ -19,7 +19,6 @@ func (j *job) contents() {
 	j.sectionChapter(section)
 	j.prestressChapter(prestress)
 	j.actionsChapter(actions)
-	j.givenFigures(member)
 	j.alongChapter(prestress)
 	j.ultimateChapter(ultimate)
 	j.secondChapter(second)

@@ -23,6 +23,7 @@ func (j *job) givenChapter(c *trace.Chapter) {
 	}
 	j.givenSpan(c)
 	j.givenActions(c)
+	j.givenFigures(c)
 }
 
 func (j *job) givenConcrete(c *trace.Chapter) {
@@ -51,6 +52,7 @@ func (j *job) givenSection(c *trace.Chapter) {
 		b.Given(def("web-end", "h_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, line)
 	}
 	j.parts = j.n.Axis("part", "part of the section, from the soffit up", "n", f.names)
+	j.parts.Work = len(f.names) - 1 // the top, which is compressed
 	b.GivenRows(def("part-height", "h_{c,n}", "Height", "mm"), j.parts, f.height, line)
 	b.GivenRows(def("part-lower", "b_{u,n}", "Lower width", "mm"), j.parts, f.lower, line)
 	b.GivenRows(def("part-upper", "b_{o,n}", "Upper width", "mm"), j.parts, f.upper, line)
@@ -304,9 +306,9 @@ func (j *job) psi(category string, k int) quantity.Literal {
 	return plain("0", "")
 }
 
-// givenFigures draws the member; the self-weight among the loads is known only after the chapter on actions.
+// givenFigures draws the section; the elevation stands with the verdict.
 func (j *job) givenFigures(c *trace.Chapter) {
-	b := c.Block("drawings", "Drawings to scale", nil)
+	b := c.Block("drawings", "Section to scale", nil)
 	section := []trace.Plot{{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"},
 		{Role: "upper", Key: "given.section/part-upper"}, {Role: "count", Key: "given.tendons/count"}, {Role: "spacing", Key: "given.tendons/spacing"},
 		{Role: "level", Key: "given.tendons/level"}, {Role: "diameter", Key: "given.tendons/diameter"}}
@@ -315,11 +317,4 @@ func (j *job) givenFigures(c *trace.Chapter) {
 			trace.Plot{Role: "bar-level", Key: "given.bars/level"}, trace.Plot{Role: "bar-diameter", Key: "given.bars/diameter"})
 	}
 	b.Figure("section", "section", "Section, to scale; dimensions in mm.", "", section...)
-	b.Figure("elevation", "elevation", "Elevation with tendons, bearings and loads.", "",
-		trace.Plot{Role: "length", Key: "given.span/length"}, trace.Plot{Role: "depth", Key: "given.section/depth"},
-		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"},
-		trace.Plot{Role: "bearing-A", Key: "given.span/bearing-a-length"}, trace.Plot{Role: "bearing-B", Key: "given.span/bearing-b-length"},
-		trace.Plot{Role: "level", Key: "given.tendons/level"}, trace.Plot{Role: "debonded", Key: "given.tendons/debonded-length"},
-		trace.Plot{Role: "load-q", Key: "actions.loads/load"}, trace.Plot{Role: "load-F", Key: "given.actions/point"},
-		trace.Plot{Role: "load-from", Key: "given.actions/from"}, trace.Plot{Role: "load-to", Key: "given.actions/to"})
 }

@@ -59,7 +59,7 @@ func (j *job) trial(b *trace.Block) trace.Rows {
 		}
 		var inHaunch trace.Rows
 		inHaunch, inWeb = b.Choose(ec2.BlockInHaunch)
-		b.On(inHaunch, func() { b.Step(ec2.HaunchTrial) })
+		b.On(inHaunch, func() { b.Steps(ec2.HaunchRest, ec2.HaunchDepth, ec2.HaunchTrial) })
 		rest = rest.Or(j.stands(b, inHaunch, ec2.TrialInHaunch))
 	})
 	b.On(inWeb, func() {

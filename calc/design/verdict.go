@@ -12,6 +12,7 @@ import (
 func (j *job) verdictChapter(c *trace.Chapter) {
 	b := c.Block("checks", "Every check", nil)
 	j.narrative(b, "verdict")
+	j.elevation(b)
 	if effect, check := j.n.Rounding(); check != nil {
 		b.Text("rounding", fmt.Sprintf("Rounding to the printed digits moves no ratio of demand to limit by more than %.4f (%s %s).", effect+0.00005, check.Number, check.Name))
 	}
@@ -40,6 +41,7 @@ type remedy struct {
 // remedies are tried in this order, each from its smallest step up.
 var remedies = []remedy{
 	{"more-tendons", 8, moreTendons},
+	{"added-row", 6, addedRow},
 	{"stronger-concrete", 8, strongerConcrete},
 	{"deeper-section", 12, deeperSection},
 }
@@ -61,6 +63,30 @@ func moreTendons(m *member.Member, step int) string {
 		return ""
 	}
 	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
+}
+
+// addedRow puts a further row like the lowest one 50 mm above the rows of the lower half, two tendons a step.
+func addedRow(m *member.Member, step int) string {
+	rows := m.Strands.Rows
+	low, top := rows[0], 0.0
+	for _, r := range rows {
+		if r.Height.Base() < low.Height.Base() {
+			low = r
+		}
+		if h := r.Height.Base(); h < m.Shape.Depth.Base()/2 {
+			top = max(top, h)
+		}
+	}
+	like := low.Name.Text
+	low.Name.Text, low.Count.N = "added", 2*step
+	low.Height.Literal = number(top+50, "mm", places(top))
+	f := formOf(&m.Shape)
+	shape, err := f.shape()
+	if err != nil || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
+		return ""
+	}
+	m.Strands.Rows = append(rows, low)
+	return fmt.Sprintf("a further row of %d tendons like row %q at %s above the soffit", low.Count.N, like, low.Height)
 }
 
 // strongerConcrete raises f_ck by 5 MPa a step, to 90 MPa at most; the strength at release stays.
@@ -139,4 +165,15 @@ func (j *job) noneNew(n *trace.Note) bool {
 		}
 	}
 	return true
+}
+
+// elevation draws what the member is, in one picture.
+func (j *job) elevation(b *trace.Block) {
+	b.Figure("elevation", "elevation", "The member: tendons, bearings and loads.", "",
+		trace.Plot{Role: "length", Key: "given.span/length"}, trace.Plot{Role: "depth", Key: "given.section/depth"},
+		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"},
+		trace.Plot{Role: "bearing-A", Key: "given.span/bearing-a-length"}, trace.Plot{Role: "bearing-B", Key: "given.span/bearing-b-length"},
+		trace.Plot{Role: "level", Key: "given.tendons/level"}, trace.Plot{Role: "debonded", Key: "given.tendons/debonded-length"},
+		trace.Plot{Role: "load-q", Key: "actions.loads/load"}, trace.Plot{Role: "load-F", Key: "given.actions/point"},
+		trace.Plot{Role: "load-from", Key: "given.actions/from"}, trace.Plot{Role: "load-to", Key: "given.actions/to"})
 }

@@ -77,11 +77,26 @@ var BlockInFlange = &clause.Condition{
 	Yes: "block in the flange", No: "block below the flange",
 }
 
+// HaunchRest is the area of the block below the flange.
+var HaunchRest = clause.Define(&clause.Formula{
+	ID: "block-rest", Name: "Area that the block needs below the flange", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "A_r = F_lim/(η·f_cd) − b_f·h_f", Unit: "mm²", Digits: 6,
+	Examples: hand("17500 mm²", "F_lim = 1350 kN", "η = 1", "f_cd = 20 MPa", "b_f = 500 mm", "h_f = 100 mm"),
+})
+
+// HaunchDepth is how far the block reaches into the haunch, whose width falls from b_f to b_w over h_h.
+var HaunchDepth = clause.Define(&clause.Formula{
+	ID: "block-in-haunch-depth", Name: "Depth of the block within the haunch, whose width falls from that of the flange to that of the web",
+	Ref:  en("3.1.7(3) Figure 3.5", ""),
+	Text: "c_h = h_h/(b_f − b_w)·(b_f − sqrt(b_f^2 − 2·(b_f − b_w)/h_h·A_r))", Unit: "mm", Digits: 6,
+	Examples: hand("42.0844 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "A_r = 17500 mm²"),
+})
+
 // HaunchTrial is the neutral axis with the lower edge of the block in the haunch below the flange.
 var HaunchTrial = clause.Define(&clause.Formula{
 	ID: "axis-haunch-trial", Name: "Depth of the neutral axis if the block ends in the haunch", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_h = (h_f + h_h/(b_f − b_w)·(b_f − sqrt(b_f^2 − 2·(b_f − b_w)/h_h·(F_lim/(η·f_cd) − b_f·h_f))))/λ", Unit: "mm", Digits: 6,
-	Examples: hand("177.605 mm", "h_f = 100 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "F_lim = 1350 kN", "η = 1", "f_cd = 20 MPa", "λ = 0.8"),
+	Text: "x_h = (h_f + c_h)/λ", Unit: "mm", Digits: 6,
+	Examples: hand("177.606 mm", "h_f = 100 mm", "c_h = 42.0844 mm", "λ = 0.8"),
 })
 
 // BlockInHaunch asks whether the block ends in the haunch.

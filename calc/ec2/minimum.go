@@ -86,7 +86,7 @@ var FailureWithWarning = &clause.Check{ID: "failure-with-warning", Name: "No bri
 // OverhangStress is the tension at the top over a bearing.
 var OverhangStress = clause.Define(&clause.Formula{
 	ID: "hogging-stress", Name: "Tension at the top from the hogging moment, section uncracked, prestress not counted", Ref: en("12.6.1", ""),
-	Text: "σ_ct = −M_{Ed,min}/W_t", Unit: "MPa",
+	Text: "σ_ct = −M_{Ed,min}/W_t", Unit: "MPa", Digits: 3,
 	Examples: hand("0.002 MPa", "M_{Ed,min} = -0.16 kN·m", "W_t = 80000 10³ mm³"),
 })
 

@@ -8,7 +8,7 @@ import "soffit/calc/clause"
 // TendonArea is the area of a row.
 var TendonArea = clause.Define(&clause.Formula{
 	ID: "tendon-area", Name: "Area of the row", Ref: clause.Ref{},
-	Text: "A_{p,i} = n_i·A_{p1,i}", Unit: "mm²", Digits: 6,
+	Text: "A_{p,i} = n_i·A_{p1,i}", Unit: "mm²",
 	Examples: hand("1112 mm²", "n_i = 8", "A_{p1,i} = 139 mm²"),
 })
 

@@ -106,7 +106,7 @@ func TestOverhangs(t *testing.T) {
 func TestEndsAreExactlyFree(t *testing.T) {
 	beam := Beam{18.3e3, 151.7, 18153.1}
 	s := load(t, beam, Uniform(9.13, 151.7, 18153.1), Uniform(6.37, 2013.7, 9011.3), Point(45.1e3, 9147.3))
-	for _, x := range []float64{0, 77.7, 151.7, 18153.1, 18200.3, 18.3e3} {
+	for _, x := range []float64{0, 33.3, 77.7, 151.7, 18153.1, 18171.7, 18200.3, 18222.9, 18261.1, 18.3e3} {
 		near(t, "M", s.Moment(x), 0, 0)
 	}
 	for _, x := range []float64{77.7, 18200.3} {

@@ -60,11 +60,13 @@ type Drawing struct {
 	Title    string `json:"title,omitempty"`
 }
 
-// Axis is a named run of rows. Index is its letter in symbols, or empty for an implicit axis.
+// Axis is a named run of rows. Index is its letter in symbols, or empty for an implicit axis; Work is the row that
+// a sheet works in full where nothing else chooses one.
 type Axis struct {
 	Name  string   `json:"name"`
 	Title string   `json:"title"`
 	Index string   `json:"index,omitempty"`
+	Work  int      `json:"work,omitempty"`
 	Rows  []string `json:"rows"`
 }
 

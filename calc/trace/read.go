@@ -19,6 +19,9 @@ func (in *noteJSON) note() (*Note, error) {
 	n.Axes = in.Axes
 	r := &reader{axes: map[string]*Axis{}}
 	for _, a := range in.Axes {
+		if a.Work < 0 || a.Work >= len(a.Rows) {
+			return nil, fmt.Errorf("axis %q has no row %d", a.Name, a.Work)
+		}
 		r.axes[a.Name] = a
 	}
 	for _, cj := range in.Chapters {

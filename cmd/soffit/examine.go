@@ -1,0 +1,42 @@
+package main
+
+import (
+	"io"
+	"os"
+	"path/filepath"
+
+	"soffit/calc/design"
+	"soffit/calc/member"
+)
+
+type examineCommand struct {
+	Files []string `arg:"" name:"file" help:"Member files."`
+}
+
+func (c *examineCommand) run(out, problems io.Writer) int {
+	code := passes
+	for _, file := range c.Files {
+		m, err := read(file)
+		if err != nil {
+			say(problems, "%v\n", err)
+			code = noNote
+			continue
+		}
+		say(out, "%s: nothing found; %s\n", file, m.Document.Title.Text)
+	}
+	return code
+}
+
+// read takes a member file in; its error is all findings, one after another.
+func read(file string) (*member.Member, error) {
+	src, err := os.ReadFile(file)
+	if err != nil {
+		return nil, err
+	}
+	m, findings := member.Read(filepath.ToSlash(file), src, design.Options())
+	if err := findings.Err(); err != nil {
+		return nil, err
+	}
+	m.File = filepath.Base(file)
+	return m, nil
+}

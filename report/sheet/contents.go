@@ -1,0 +1,96 @@
+package sheet
+
+import (
+	"strconv"
+
+	"soffit/report/draw"
+	"soffit/report/text"
+	"soffit/templates"
+)
+
+// heading is one line of the contents and of the outline: level 0 for parts and chapters, 1 for blocks.
+type heading struct {
+	level                 int
+	number, title, anchor string
+}
+
+// headings lists parts, chapters and blocks in order.
+func (c *composer) headings() []heading {
+	out := []heading{{0, "", "Title sheet", "part:title"}, {0, "", "Contents", "part:contents"}}
+	for _, ch := range c.note.Chapters {
+		out = append(out, heading{0, ch.Number, ch.Title, ch.Slug})
+		for _, b := range ch.Blocks {
+			out = append(out, heading{1, b.Number, b.Title, b.Path()})
+		}
+	}
+	return append(out, heading{0, "", "Symbols", "part:symbols"}, heading{0, "", "References", "part:references"},
+		heading{0, "", "The member file as given", "part:input"})
+}
+
+// contents sets the list of parts with the sheets they begin on, and how to read a sheet; in two columns where one
+// would leave no room for that.
+func (c *composer) contents() {
+	c.heading("", "Contents", "part:contents", "")
+	c.elements[len(c.elements)-1].fresh = true
+	style := text.Style{Size: tableSize, Leading: 11.2, Gap: 3}
+	reading := templates.Text("reading")
+	if c.document != "" {
+		reading += "\n- **Clauses** without the name of a document are those of " + c.document + ".\n"
+	}
+	lines := c.standing(reading, fullColumn.w, style)
+	room := body - 60 - text.Height(lines)
+
+	list := c.headings()[2:]
+	cells := make([]cell, len(list))
+	total := draw.Pt(0)
+	for i, h := range list {
+		cells[i] = c.contentsLine(h, width)
+		total += cells[i].h
+	}
+	if total <= room {
+		for _, k := range cells {
+			c.add(&element{owner: "contents", height: k.h, paint: func(cv draw.Canvas, y draw.Pt) {
+				cv.Owner("full contents")
+				k.paint(cv, left, y)
+			}})
+		}
+	} else {
+		for i, h := range list {
+			cells[i] = c.contentsLine(h, twinWidth)
+		}
+		c.add(twin("contents", cells, 0))
+	}
+	c.partHead("How to read a sheet")
+	c.add(keepTogether(textElements(lines, fullColumn, "reading", 3, false, spanFull))...)
+}
+
+// contentsLine is one line of the contents, dots leading to the sheet's number.
+func (c *composer) contentsLine(h heading, w draw.Pt) cell {
+	const lead draw.Pt = 12.2
+	face, above, in := draw.Serif, draw.Pt(0), draw.Pt(26)
+	if h.level == 0 {
+		face, above, in = draw.Bold, 4, 0
+	}
+	at := in + 26 + in/8
+	if h.number == "" {
+		at = in
+	}
+	lines := wrap(face, textSize, w-34-at, h.title)
+	last := len(lines) - 1
+	return cell{lead*draw.Pt(len(lines)) + above, above, func(cv draw.Canvas, x, y draw.Pt) {
+		first := y + above + textSize*ascent
+		base := first + draw.Pt(last)*lead
+		sheet := strconv.Itoa(c.sheetOf[h.anchor])
+		end := x + w - draw.Width(face, textSize, sheet)
+		cv.Text(x+in, first, face, textSize, h.number)
+		for i, l := range lines {
+			cv.Text(x+at, first+draw.Pt(i)*lead, face, textSize, l)
+		}
+		cv.Text(end, base, face, textSize, sheet)
+		// The dots of all lines stand under each other.
+		if from := x + at + draw.Width(face, textSize, lines[last]) + 5; from < x+w-24 {
+			cv.Line(x+w-20, base-0.5, from, base-0.5, 0.5, 0.5, 3.5)
+		}
+		cv.Link(x, y+above, w, lead*draw.Pt(last+1), h.anchor)
+	}}
+}

@@ -1,0 +1,168 @@
+package sheet
+
+import (
+	"fmt"
+	"slices"
+	"strconv"
+	"strings"
+
+	"soffit/calc/trace"
+	"soffit/report/draw"
+	"soffit/report/mathset"
+)
+
+// run sets entries from the first on that run over the same index axes and are worked for one row, then one table
+// of all their rows. It returns how many entries it took.
+func (c *composer) run(b *trace.Block, entries []trace.Entry) int {
+	axes := indexAxes(entries[0])
+	if len(axes) == 0 {
+		return 0
+	}
+	n, start := 0, len(c.elements)
+	var lines []*trace.Line
+	for n < len(entries) && slices.Equal(indexAxes(entries[n]), axes) && kind(entries[n]) == kind(entries[0]) {
+		c.single(b, entries[n], n == 0)
+		lines = append(lines, trace.LineOf(entries[n]))
+		n++
+	}
+	switch {
+	case len(c.elements) == start:
+		return n // on no row was any of them computed
+	case n == 1:
+		c.elements[start].keep = true
+	case kind(entries[0]) == 1:
+		// Of a long list the first two lines stay together, and the last three with the table.
+		for i := start; i < len(c.elements); i++ {
+			c.elements[i].keep = i == start || len(c.elements)-i <= 3 || n <= 5
+		}
+	}
+	if size(axes) > 1 {
+		c.rowsTable(b, axes, lines)
+	} else {
+		c.elements[len(c.elements)-1].keep = false
+	}
+	return n
+}
+
+// indexAxes are the axes with an index letter of an entry that carries values.
+func indexAxes(e trace.Entry) []*trace.Axis {
+	l := trace.LineOf(e)
+	if l == nil {
+		return nil
+	}
+	var out []*trace.Axis
+	for _, a := range l.Axes {
+		if a.Index != "" {
+			out = append(out, a)
+		}
+	}
+	return out
+}
+
+func kind(e trace.Entry) int {
+	switch e.(type) {
+	case *trace.Given:
+		return 1
+	case *trace.Step:
+		return 2
+	case *trace.Root:
+		return 3
+	}
+	return 0
+}
+
+// rowsTable shows all rows of a run at the worked row of the implicit axis: the rows of the first index axis down the
+// table; those of a second across it where they are few.
+func (c *composer) rowsTable(b *trace.Block, axes []*trace.Axis, lines []*trace.Line) {
+	down, across := axes, []*trace.Axis(nil)
+	if len(axes) == 2 && len(axes[1].Rows)*len(lines) <= mostAcross {
+		down, across = axes[:1], axes[1:]
+		c.legend(axes[1])
+	}
+	t := &table{owner: lines[0].Number, mark: -1, heads: rowHeads(down)}
+	for i := range size(down) {
+		t.rows = append(t.rows, rowLabels(down, i))
+	}
+	for _, l := range lines {
+		w, _ := workedAt(b, l.Axes, len(l.Shown), l.Taken)
+		for k := range size(across) {
+			p := w.place
+			at := map[string]int{}
+			for _, q := range trace.PlaceAt(across, k) {
+				p = p.With(q.Axis, q.Row)
+				at[q.Axis.Index] = q.Row
+			}
+			col := c.tableColumn(l, rowNumbers(at))
+			for i := range size(down) {
+				for _, q := range trace.PlaceAt(down, i) {
+					p = p.With(q.Axis, q.Row)
+				}
+				f := trace.Flat(l.Axes, p)
+				if f == w.flat && kind(c.note.Entry(l.Key)) != 1 {
+					t.mark = i
+				}
+				col.cells = append(col.cells, cellOf(l, f))
+			}
+			t.columns = append(t.columns, col)
+		}
+	}
+	c.add(t.elements(4)...)
+}
+
+// mostAcross is how many columns a second index may make of a run.
+const mostAcross = 10
+
+func size(axes []*trace.Axis) int {
+	n := 1
+	for _, a := range axes {
+		n *= len(a.Rows)
+	}
+	return n
+}
+
+// legend says what the numbers of an index stand for that runs across a table.
+func (c *composer) legend(a *trace.Axis) {
+	var parts []string
+	for i, r := range a.Rows {
+		parts = append(parts, fmt.Sprintf("%s = %d: %s", a.Index, i+1, r))
+	}
+	s := stack{w: workColumn.w}
+	s.words(draw.Italic, noteSize, noteLead, 0, strings.Join(parts, "; "))
+	c.add(&element{owner: "legend", above: 4, height: s.bottom, ruled: true, keep: true, paint: func(cv draw.Canvas, y draw.Pt) {
+		cv.Owner("work legend")
+		s.paint(cv, workColumn.x, y)
+	}})
+}
+
+// rowHeads and rowLabels are the columns at the left of a table that name its rows: the number that stands in the
+// symbols, and the name.
+func rowHeads(axes []*trace.Axis) []string {
+	var out []string
+	for _, a := range axes {
+		if a.Index != "" {
+			out = append(out, a.Index)
+		}
+		out = append(out, "")
+	}
+	return out
+}
+
+func rowLabels(axes []*trace.Axis, i int) []string {
+	var out []string
+	for _, q := range trace.PlaceAt(axes, i) {
+		if q.Axis.Index != "" {
+			out = append(out, strconv.Itoa(q.Row+1))
+		}
+		out = append(out, q.Axis.Rows[q.Row])
+	}
+	return out
+}
+
+// tableColumn is a column of a table without its cells.
+func (c *composer) tableColumn(l *trace.Line, rows map[string]string) tableColumn {
+	var unit mathset.Box
+	if u := l.Unit.String(); u != "" {
+		unit = mathset.Upright(draw.Serif, smallSize, u)
+	}
+	return tableColumn{number: l.Number, key: l.Key, symbol: c.symbol(l.Symbol, tableSize, rows), unit: unit}
+}
