@@ -25,6 +25,7 @@ func (j *job) secondChapter(c *trace.Chapter) {
 	b.Steps(mechanics.AreaDifference, mechanics.CentroidDifference, mechanics.InertiaDifference)
 	j.secondStatics(c)
 	j.secondBending(c)
+	j.validation(c)
 }
 
 // secondStatics weighs the loads with the influence lines of each station, which need no reaction.

@@ -10,7 +10,7 @@ import (
 
 // verdictChapter opens the note: what fails, and what would mend it, found by running the design again.
 func (j *job) verdictChapter(c *trace.Chapter) {
-	b := c.Block("checks", "Every check", nil)
+	b := c.Block("checks", "The member in one picture", nil)
 	j.narrative(b, "verdict")
 	j.elevation(b)
 	if effect, check := j.n.Rounding(); check != nil {

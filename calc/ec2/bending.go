@@ -326,8 +326,9 @@ var (
 			Examples: hand("850 mm", "F_{p,i} = 1 kN, 1 kN", "d_i = 1000 mm, 700 mm")})
 )
 
-// balanced is the domain of a resistance: the forces balance to a thousandth.
-const balanced = "abs(ΔF) ≤ 0.001·F_c"
+// balanced is the domain of a resistance: the forces balance to a thousandth, and the section is not wholly
+// compressed, which the pivot at the top fibre does not cover (6.1(5) and (6)).
+const balanced = "abs(ΔF) ≤ 0.001·F_c and x ≤ h"
 
 // TendonLever and BarLever are lever arms about the line of F_c.
 var (

@@ -48,6 +48,7 @@ func (e *sideView) fitted(width draw.Pt, beside bool) *tape {
 	}
 }
 
+// sideView is what an elevation shows.
 type sideView struct {
 	length, depth, a, b, bearingA, bearingB, span cell
 	level, debonded                               column

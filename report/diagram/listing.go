@@ -45,7 +45,7 @@ func figures(c cell) entry { return entry{label{}.number(c), beforePoint(c)} }
 // Distances between columns, and of the names from the start of a line that has a mark.
 const (
 	columnGap draw.Pt = 7
-	markWidth draw.Pt = 7
+	markWidth draw.Pt = 8
 )
 
 // draw draws the listing right of x, its lines level with their rows as far as there is room.

@@ -51,14 +51,17 @@ func (p *placer) note(c draw.Canvas, at draw.Point, side direction, lines ...lab
 		if !b.Inside(p.within) {
 			cost += 1000
 		}
-		if cost < least {
-			if cost += p.clash(b.Grow(pad)) + p.crossed([2]draw.Point{at, {X: x, Y: y}}); cost < least {
+		const tie = 1e-6 // the first of equal places, whatever the rounding
+		if cost < least-tie {
+			cost += p.crossed([2]draw.Point{at, {X: x, Y: y}})
+			if cost += p.clash(b.Grow(pad), least-cost); cost < least-tie {
 				best, least = b, cost
 			}
 		}
 	}
-	for dy := draw.Pt(0); dy < h/2+most; dy += up {
-		for dx := draw.Pt(0); dx < w/2+most; dx += over {
+	near := func(d draw.Pt) bool { return float64(d) < min(float64(most), least) } // what is farther is no better
+	for dy := draw.Pt(0); near(dy - h/2); dy += up {
+		for dx := draw.Pt(0); near(dx - w/2); dx += over {
 			if dx < w/2+4 && dy < h/2+4 { // on the point itself
 				continue
 			}
@@ -75,14 +78,18 @@ func (p *placer) note(c draw.Canvas, at draw.Point, side direction, lines ...lab
 		c.Polyline(pts, draw.Style{Stroke: hair})
 		p.line(pts)
 	}
+	if p.clash(b, 1) > 0 { // nowhere is there room: lines are broken for the label
+		k := b.Grow(1)
+		c.Rect(k.X0, k.Y0, k.Width(), k.Height(), draw.Style{Fill: draw.White})
+	}
 	for i, l := range lines {
 		l.centre(c, (b.X0+b.X1)/2, b.Y0+lines[0].height+draw.Pt(i)*leading)
 	}
 	p.taken = append(p.taken, b)
 }
 
-// clash is how much a box is in the way: 100 for each line or label it meets.
-func (p *placer) clash(b draw.Box) float64 {
+// clash is how much a box is in the way: 100 for each line or label it meets, counted up to a limit.
+func (p *placer) clash(b draw.Box, limit float64) float64 {
 	var cost float64
 	for _, t := range p.taken {
 		if b.Overlaps(t) {
@@ -90,7 +97,11 @@ func (p *placer) clash(b draw.Box) float64 {
 		}
 	}
 	for _, s := range p.segments {
-		if meets(s, b) {
+		if cost >= limit {
+			break
+		}
+		if max(s[0].X, s[1].X) >= b.X0 && min(s[0].X, s[1].X) <= b.X1 &&
+			max(s[0].Y, s[1].Y) >= b.Y0 && min(s[0].Y, s[1].Y) <= b.Y1 && meets(s, b) {
 			cost += 100
 		}
 	}

@@ -29,6 +29,7 @@ func resistance(d *data, width draw.Pt) *tape {
 	g.curve(t, ed, medium, dashed...)
 	g.curve(t, rd, outline)
 	g.scaleY(t, titled(demand, "sagging downward"))
+	g.bearings(t)
 	if c, i := d.comparison(along, demand, capacity); c != nil {
 		x, e, r := along.x.cells[i], demand.cells[i], capacity.cells[i]
 		p, q := g.at(x.value, e.value), g.at(x.value, r.value)
@@ -55,7 +56,6 @@ func resistance(d *data, width draw.Pt) *tape {
 			}
 		}
 	}
-	g.bearings(t)
 	g.scaleX(t, g.ways.within.Y1+3)
 	return t
 }

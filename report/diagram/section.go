@@ -60,6 +60,7 @@ type dots struct {
 	bars                                      bool
 }
 
+// dots reads the rows whose roles begin with a prefix.
 func (d *data) dots(prefix, debonded string) dots {
 	r := dots{level: d.rows(prefix + "level"), bars: prefix != ""}
 	r.height = r.level.values()
@@ -113,6 +114,7 @@ func (r dots) ink(c draw.Canvas, f frame) {
 	}
 }
 
+// crossSection is what the drawing of a section shows.
 type crossSection struct {
 	parts         parts
 	tendons, bars dots

@@ -3,6 +3,7 @@ package diagram
 import (
 	"fmt"
 	"math"
+	"slices"
 
 	"soffit/calc/formula"
 	"soffit/report/draw"
@@ -295,14 +296,23 @@ func (u *equilibrium) forces(c draw.Canvas, f frame, x, run draw.Pt, in layout) 
 	for _, r := range u.rows {
 		ticks(c, line, u.depthAt(f, r.depth.value))
 	}
-	next := last // the first row below the force in the block
-	for _, r := range u.rows {
-		if y := u.depthAt(f, r.depth.value); y > origin+2 {
-			next = min(next, y)
+	if len(u.rows) > 0 { // the symbol where the line is free for longest
+		at := []draw.Pt{origin}
+		for _, r := range u.rows {
+			if y := u.depthAt(f, r.depth.value); y > origin {
+				at = append(at, y)
+			}
 		}
-	}
-	if len(u.rows) > 0 && next-origin > 20 {
-		label{}.symbol(u.rows[0].lever.line.Symbol).right(c, line-3, (origin+next)/2+middle)
+		slices.Sort(at)
+		var free, mid draw.Pt
+		for i := 1; i < len(at); i++ {
+			if d := at[i] - at[i-1]; d > free {
+				free, mid = d, (at[i]+at[i-1])/2
+			}
+		}
+		if free > 20 {
+			label{}.symbol(u.rows[0].lever.line.Symbol).right(c, line-3, mid+middle)
+		}
 	}
 	c.Circle(line, origin, 1.6, draw.Style{Stroke: hair, Fill: draw.White})
 	l := u.listing(f, line)
