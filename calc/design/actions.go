@@ -42,7 +42,7 @@ func (j *job) stationList() []station {
 	add("bearing B", b)
 	add("mid-span", (a+b)/2)
 	for k := 1; k < parts40; k++ {
-		add(fmt.Sprintf("%g L", float64(k)/parts40), a+(b-a)*float64(k)/parts40)
+		add(fmt.Sprintf("%g l", float64(k)/parts40), a+(b-a)*float64(k)/parts40)
 	}
 	for _, l := range j.loadRows()[1:] {
 		from, to := l.from.Quantity().Value, l.to.Quantity().Value
@@ -91,7 +91,7 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 	}
 	j.stations = j.n.Axis("station", "station along the member", "", names)
 
-	b := c.Block("loads", "Loads and reactions", nil, trace.Take(j.gross, j.span, j.actionData)...)
+	b := c.Block("loads", "Loads and reactions", nil, trace.Take(j.gross, j.span, j.spanLength, j.actionData)...)
 	j.reactions = b
 	j.narrative(b, "actions")
 	b.Text("loads", templates.Text("loads"))
@@ -100,12 +100,15 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 	b = c.Block("effects", "Effects of each load along the member", j.stations, trace.Take(j.span, j.actionData, j.reactions)...)
 	j.effects = b
 	b.Row = j.stations.Row("mid-span")
-	b.GivenRows(def("position", "x", "Distance of the station from end A", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", parts40))
+	b.GivenRows(def("position", "x_m", "Distance of the station from end A, rounded to 1 mm", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", parts40))
 	b.Steps(mechanics.LoadMoment, mechanics.ShearLeft, mechanics.ShearRight)
 
 	j.ultimate = j.ultimateCombinations(c)
-	j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CombinationFactor, ec2.CharacteristicMoment, ec2.CharacteristicEnvelope)
+	j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CharacteristicFactor, ec2.CharacteristicMoment, ec2.CharacteristicEnvelope)
 	j.frequent = j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, ec2.FrequentMoment, ec2.FrequentEnvelope)
-	j.combination(c, "quasi-permanent", "Quasi-permanent combination", noneLeads, ec2.FrequentFactor, ec2.QuasiPermanentMoment, ec2.QuasiPermanentEnvelope)
+	b = c.Block("quasi-permanent", "Quasi-permanent combination", j.stations, trace.Take(j.actionData, j.effects)...)
+	b.Row = j.stations.Row("mid-span")
+	b.Step(ec2.QuasiPermanentMoment)
+	b.Table("service", "Largest moments in service along the member", j.stations, "actions.effects/position", "actions.characteristic/characteristic", "actions.frequent/frequent", "quasi-permanent")
 	j.effectsFigure()
 }

@@ -135,10 +135,10 @@ func (j *job) combinationFactors(b *trace.Block, p *ec2.Parameter, own *member.N
 func (j *job) assumptions() string {
 	var b strings.Builder
 	add := func(format string, args ...any) { fmt.Fprintf(&b, "- "+format+"\n", args...) }
-	add("Losses of prestress are those stated in the member file, row by row. They decide the prestrain, and through it the resistance where tendons do not yield; the transmission length follows the stress after release.")
-	add("Tendons end at the ends of the concrete, less their debonded length; a debonded length carries nothing.")
+	add("Losses of prestress are those stated in the member file, row by row, and leave out what permanent loads add to the tendon stress. They decide the prestrain, and through it the resistance where tendons do not yield; the transmission length follows the stress after release.")
+	add("Tendons end at the ends of the concrete; their bond starts at the end of the debonded length, which carries nothing.")
 	add("Loads act on the whole width; their positions are measured from end A of the concrete. Bearings are knife edges at their middles.")
-	add("The compressed flange is fully effective (5.3.2.1 is to be checked by the engineer) and is held against lateral buckling.")
+	add("The compressed flange is held against lateral buckling.")
 	if len(j.m.Bars.Rows) > 0 {
 		add("Bars are straight and end %s from the ends of the concrete; each α of 8.4.4 is taken as 1.", endCover)
 	}

@@ -31,10 +31,16 @@ func leading(j *job) []combination {
 
 func noneLeads(*job) []combination { return []combination{{name: "no leading action", leads: -1}} }
 
+// reducing says that 6.10a and 6.10b stand in place of 6.10.
+func (j *job) reducing() bool { return j.m.Basis.Combination.Text == "6.10a/b" }
+
+// consequence is K_FI by class, EN 1990 Table B3; the relief of CC1 is not taken.
+var consequence = map[string]string{"CC1": "1.0", "CC2": "1.0", "CC3": "1.1"}
+
 // ultimateList is 6.10 with each leading action, or 6.10a and 6.10b with each.
 func (j *job) ultimateList() []combination {
 	list := leading(j)
-	if j.m.Basis.Combination.Text != "6.10a/b" {
+	if !j.reducing() {
 		for i := range list {
 			list[i].name = "6.10 " + list[i].name
 		}
@@ -57,7 +63,7 @@ func (j *job) marks(b *trace.Block, axis *trace.Axis, list []combination) {
 			marks = append(marks, flag(c.leads >= 0 && l.action == c.leads))
 		}
 	}
-	b.GivenOver(def("leads", "l_{i,n}", "1 where the load belongs to the leading action", ""), []*trace.Axis{j.loads, axis}, marks, "each variable action leads in turn")
+	b.GivenOver(def("leads", "l_{i,n}", "1 where the action of the load leads the combination", ""), []*trace.Axis{j.loads, axis}, marks, "kind of combination")
 }
 
 func names(list []combination) []string {
@@ -77,8 +83,16 @@ func (j *job) ultimateCombinations(c *trace.Chapter) *trace.Block {
 	for i, k := range list {
 		reduced[i] = flag(k.reduced)
 	}
-	b.GivenRows(def("reduced", "k_{r,n}", "1 where ξ reduces the permanent actions (6.10b)", ""), axis, reduced, "kind of combination")
-	b.Steps(ec2.PermanentReduction, ec2.CombinationFactor, ec2.UpperFactor, ec2.LowerFactor)
+	class := j.m.Basis.ConsequenceClass
+	b.Given(def("consequence-factor", "K_FI", "Factor on the actions by consequence class: "+class.Text, "", ref(ec2.Actions, "Table B3")), plain(consequence[class.Text], ""), origin(class.Origin))
+	b.Step(ec2.CombinationFactor)
+	if j.reducing() {
+		b.GivenRows(def("reduced", "k_{r,n}", "1 where ξ reduces the permanent actions (6.10b)", ""), axis, reduced, "kind of combination")
+		b.Steps(ec2.PermanentReduction, ec2.UpperFactorReduced)
+	} else {
+		b.Step(ec2.UpperFactor)
+	}
+	b.Step(ec2.LowerFactor)
 	b.Steps(ec2.UltimateMoment, ec2.UltimateMomentMin, ec2.UltimateShearLeft, ec2.UltimateShearRight, ec2.UltimateShearLeftMin, ec2.UltimateShearRightMin)
 	b.Steps(ec2.MomentEnvelope, ec2.MomentEnvelopeMin, ec2.ShearLeftEnvelope, ec2.ShearRightEnvelope, ec2.ShearLeftEnvelopeMin, ec2.ShearRightEnvelopeMin)
 	b.Row = j.stations.Row("mid-span")

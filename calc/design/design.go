@@ -24,7 +24,7 @@ type job struct {
 	rows, bars, parts, loads, stations *trace.Axis
 
 	parameters, constants, concrete, section, span, tendons, barData, actionData      *trace.Block
-	strengths, tendonStrengths, barStrengths, gross, positions                        *trace.Block
+	strengths, tendonStrengths, barStrengths, gross, positions, spanLength            *trace.Block
 	reactions, effects, ultimate, frequent, stress, transmission, barAnchorage, along *trace.Block
 	resistance                                                                        *trace.Block
 

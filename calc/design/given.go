@@ -33,7 +33,7 @@ func (j *job) givenConcrete(c *trace.Chapter) {
 	m := &j.m.Concrete
 	b.Given(def("strength", "f_ck", "Characteristic cylinder strength at 28 days", "MPa"), m.Fck.Literal, given(m.Fck))
 	b.Given(def("strength-at-release", "f_ck(t)", "Characteristic strength asked for at release", "MPa"), m.FckAtRelease.Literal, given(m.FckAtRelease))
-	b.Given(def("unit-weight", "γ_c", "Unit weight of the concrete with its steel", "kN/m³"), m.UnitWeight.Literal, given(m.UnitWeight))
+	b.Given(def("unit-weight", "γ_{conc}", "Unit weight of the concrete with its steel", "kN/m³"), m.UnitWeight.Literal, given(m.UnitWeight))
 	factor := map[string]string{"quartzite": "1.0", "limestone": "0.9", "sandstone": "0.7", "basalt": "1.2"}[m.Aggregate.Text]
 	b.Given(def("aggregate-factor", "k_agg", "Factor on the modulus for "+m.Aggregate.Text+" aggregate", "", ref(ec2.Code, "3.1.3(2)")), plain(factor, ""), origin(m.Aggregate.Origin))
 }
@@ -49,7 +49,7 @@ func (j *job) givenSection(c *trace.Chapter) {
 	if s.Kind.Text != "rectangle" {
 		b.Given(def("haunch-depth", "h_h", "Depth of the haunch below it", "mm"), f.haunch, line)
 		b.Given(def("web-width", "b_w", "Width of the web", "mm"), f.web, line)
-		b.Given(def("web-end", "h_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, line)
+		b.Given(def("web-end", "z_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, line)
 	}
 	j.parts = j.n.Axis("part", "part of the section, from the soffit up", "n", f.names)
 	j.parts.Work = len(f.names) - 1 // the top, which is compressed
@@ -130,17 +130,17 @@ func (j *job) givenTendons(c *trace.Chapter) {
 		}
 		b.GivenRows(g, j.rows, each(rows, f), source)
 	}
-	column("count", "n_i", "Number", "", line, func(t tendon) quantity.Literal { return whole(t.row.Count.N) })
-	column("spacing", "s_{t,i}", "Spacing between axes", "mm", line, func(t tendon) quantity.Literal { return t.row.Spacing.Literal })
+	column("count", "n_{p,i}", "Number", "", line, func(t tendon) quantity.Literal { return whole(t.row.Count.N) })
+	column("spacing", "s_{p,i}", "Spacing between axes", "mm", line, func(t tendon) quantity.Literal { return t.row.Spacing.Literal })
 	column("level", "y_{p,i}", "Height of the axes above the soffit", "mm", line, func(t tendon) quantity.Literal { return t.row.Height.Literal })
 	column("debonded-length", "l_{db,i}", "Debonded length from each end", "mm", line, func(t tendon) quantity.Literal { return t.row.DebondedLength.Literal })
-	column("diameter", "φ_i", "Nominal diameter", "mm", "product", func(t tendon) quantity.Literal { return t.diameter })
+	column("diameter", "φ_{p,i}", "Nominal diameter", "mm", "product", func(t tendon) quantity.Literal { return t.diameter })
 	column("area-of-one", "A_{p1,i}", "Area of one", "mm²", "product", func(t tendon) quantity.Literal { return t.area })
 	column("tensile-strength", "f_{pk,i}", "Characteristic tensile strength", "MPa", "product", func(t tendon) quantity.Literal { return t.fpk })
-	column("proof-force", "F_{p0,1,i}", "Force at 0.1 % proof strain of one", "kN", "product", func(t tendon) quantity.Literal { return t.proof })
+	column("proof-force", "F_{p0,1,i}", "0.1 % proof force of one", "kN", "product", func(t tendon) quantity.Literal { return t.proof })
 	column("modulus", "E_{p,i}", "Modulus of elasticity", "GPa", "product", func(t tendon) quantity.Literal { return t.ep }, "3.3.6(2), (3)")
 	if j.inclined() {
-		column("ultimate-strain", "ε_{uk,i}", "Characteristic strain at maximum force", "‰", "product", func(t tendon) quantity.Literal { return t.ultimate })
+		column("ultimate-strain", "ε_{puk,i}", "Characteristic strain at maximum force", "‰", "product", func(t tendon) quantity.Literal { return t.ultimate })
 	}
 	column("jacking-stress", "σ_{p,max,i}", "Stress at jacking", "MPa", line, func(t tendon) quantity.Literal { return t.row.JackingStress.Literal })
 	column("loss-at-release", "Δσ_{p0,i}", "Loss up to and at release, as stated", "MPa", lossSource(rows), func(t tendon) quantity.Literal { return t.row.StatedLosses.AtRelease.Literal })
@@ -151,7 +151,7 @@ func (j *job) givenTendons(c *trace.Chapter) {
 	release := map[string]string{"gradual": "1.0", "sudden": "1.25"}[j.m.Strands.Release.Text]
 	b.Given(def("release", "α_1", "Factor of the way of release: "+j.m.Strands.Release.Text, "", ref(ec2.Code, "8.10.2.2(2)")), plain(release, ""), origin(j.m.Strands.Release.Origin))
 	bond := map[string]string{"good": "1.0", "poor": "0.7"}[j.m.Strands.Bond.Text]
-	b.Given(def("bond-conditions", "η_1", "Factor of the bond conditions: "+j.m.Strands.Bond.Text, "", ref(ec2.Code, "8.4.2, 8.10.2.2(1)")), plain(bond, ""), origin(j.m.Strands.Bond.Origin))
+	b.Given(def("bond-conditions", "η_1", "Factor of the bond conditions of the lower zone: "+j.m.Strands.Bond.Text, "", ref(ec2.Code, "8.4.2, 8.10.2.2(1)")), plain(bond, ""), origin(j.m.Strands.Bond.Origin))
 	b.Text("products", "Products:\n\n"+strings.Join(sources, "\n"))
 }
 
@@ -187,9 +187,9 @@ func (j *job) givenBars(c *trace.Chapter) {
 	column := func(id, symbol, name, unit, source string, f func(member.BarRow) quantity.Literal) {
 		b.GivenRows(def(id, symbol, name, unit), j.bars, each(rows, f), source)
 	}
-	column("count", "n_j", "Number", "", line, func(r member.BarRow) quantity.Literal { return whole(r.Count.N) })
-	column("diameter", "φ_j", "Diameter", "mm", line, func(r member.BarRow) quantity.Literal { return r.Diameter.Literal })
-	column("spacing", "s_{t,j}", "Spacing between axes", "mm", line, func(r member.BarRow) quantity.Literal {
+	column("count", "n_{s,j}", "Number", "", line, func(r member.BarRow) quantity.Literal { return whole(r.Count.N) })
+	column("diameter", "φ_{s,j}", "Diameter", "mm", line, func(r member.BarRow) quantity.Literal { return r.Diameter.Literal })
+	column("spacing", "s_{s,j}", "Spacing between axes", "mm", line, func(r member.BarRow) quantity.Literal {
 		if !r.Spacing.Present() {
 			return plain("0", "mm")
 		}
@@ -198,8 +198,8 @@ func (j *job) givenBars(c *trace.Chapter) {
 	column("level", "y_{s,j}", "Height of the axes above the soffit", "mm", line, func(r member.BarRow) quantity.Literal { return r.Height.Literal })
 	column("yield-strength", "f_{yk,j}", "Characteristic yield strength", "MPa", line, func(r member.BarRow) quantity.Literal { return r.Fyk.Literal })
 	if j.barInclined() {
-		column("hardening", "k_j", "Ratio of tensile to yield strength by ductility class", "", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][0], "") })
-		column("ultimate-strain", "ε_{uk,j}", "Characteristic strain at maximum force by ductility class", "‰", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][1], "‰") })
+		column("hardening", "k_{s,j}", "Ratio of tensile to yield strength by ductility class", "", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][0], "") })
+		column("ultimate-strain", "ε_{suk,j}", "Characteristic strain at maximum force by ductility class", "‰", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][1], "‰") })
 	}
 	b.Given(def("steel-modulus", "E_s", "Modulus of elasticity", "GPa", ref(ec2.Code, "3.2.7(4)")), plain("200", "GPa"), "code")
 	b.Given(def("end-cover", "c_e", "Distance of the ends of the bars from the ends of the concrete", "mm"), plain("40", "mm"), "assumption")
@@ -275,7 +275,7 @@ func (j *job) givenActions(c *trace.Chapter) {
 	column("point", "F_i", "Point load, downward", "kN", func(l load) quantity.Literal { return l.f })
 	column("from", "a_i", "From, or at, measured from end A", "m", func(l load) quantity.Literal { return l.from })
 	column("to", "b_i", "To, measured from end A", "m", func(l load) quantity.Literal { return l.to })
-	column("permanent", "P_i", "1 for a permanent load, 0 for a variable one", "", func(l load) quantity.Literal { return flag(l.permanent) })
+	column("permanent", "k_{G,i}", "1 for a permanent load, 0 for a variable one", "", func(l load) quantity.Literal { return flag(l.permanent) })
 	for k, symbol := range []string{"ψ_{0,i}", "ψ_{1,i}", "ψ_{2,i}"} {
 		b.GivenRows(def(fmt.Sprintf("psi-%d", k), symbol, [...]string{"Combination factor", "Frequent factor", "Quasi-permanent factor"}[k], "", ref(ec2.Actions, "Table A1.1")), j.loads,
 			each(loads, func(l load) quantity.Literal { return j.psi(l.category, k) }), "category, from the national parameters")

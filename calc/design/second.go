@@ -20,7 +20,7 @@ func (j *job) secondChapter(c *trace.Chapter) {
 	p := j.shape.ByStrips(strips)
 	const how = "the section cut into 4000 strips of equal height"
 	b.Given(def("area", "A_{c,2}", "Area by strips", "mm²"), number(p.Area, "mm²", 0), how)
-	b.Given(def("centroid", "y_{s,2}", "Centroid by strips", "mm"), number(p.Centroid, "mm", 2), how)
+	b.Given(def("centroid", "y_{cg,2}", "Centroid by strips", "mm"), number(p.Centroid, "mm", 3), how)
 	b.Given(def("inertia", "I_{c,2}", "Second moment of area by strips", "10⁶ mm⁴"), number(p.Inertia, "10⁶ mm⁴", 1), how)
 	b.Steps(mechanics.AreaDifference, mechanics.CentroidDifference, mechanics.InertiaDifference)
 	j.secondStatics(c)
@@ -42,7 +42,7 @@ func (j *job) secondStatics(c *trace.Chapter) {
 		if err != nil {
 			return nil, err
 		}
-		m, _ := s.ByInfluence(r.Value("x"), pieces)
+		m, _ := s.ByInfluence(r.Value("x_m"), pieces)
 		return []float64{m}, nil
 	}, def("moment", "M_2", "Moment of all loads together, unfactored, from influence lines", "kN·m"))
 	b.Steps(mechanics.SumOfMoments, mechanics.MomentDifference)
@@ -64,7 +64,7 @@ func (j *job) secondBending(c *trace.Chapter) {
 			if err != nil {
 				return nil, err
 			}
-			a, err := beam.Fibres(bending.Parabola{N: r.Value("n"), EpsC2: r.Value("ε_c2"), EpsCu2: r.Value("ε_cu2"), Fcd: r.Value("f_cd")}, layers)
+			a, err := beam.Fibres(parabola(r), layers)
 			return []float64{a.X, a.Moment}, err
 		}, def("axis", "x_2", "Depth of the neutral axis with fibres", "mm"), def("resistance", "M_{Rd,2}", "Moment resistance with fibres", "kN·m"))
 		b.Step(mechanics.ResistanceDifference)

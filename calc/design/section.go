@@ -1,6 +1,7 @@
 package design
 
 import (
+	"soffit/calc/ec2"
 	"soffit/calc/mechanics"
 	"soffit/calc/trace"
 )
@@ -20,8 +21,17 @@ func (j *job) sectionChapter(c *trace.Chapter) {
 	}
 	b = c.Block("positions", "Places of the steel", nil, takes...)
 	j.positions = b
-	b.Steps(mechanics.Eccentricity, mechanics.TendonDepth, mechanics.OutermostDepth)
+	b.Steps(mechanics.Eccentricity, mechanics.TendonDepth)
 	if j.hasBars() {
 		b.Step(mechanics.BarDepth)
+	}
+
+	b = c.Block("flange", "Span and effective flange", nil, trace.Take(j.section, j.span)...)
+	j.spanLength = b
+	b.Step(mechanics.Span)
+	if j.m.Shape.Kind.Text != "rectangle" {
+		b.Steps(mechanics.FlangeOverhang, ec2.EffectiveFlange)
+		_, no := b.Choose(ec2.WholeFlange)
+		b.On(no, func() { b.Check(ec2.FlangeEffective) })
 	}
 }

@@ -1,13 +1,16 @@
 package design
 
 import (
+	"math"
+
 	"soffit/calc/bending"
+	"soffit/calc/clause"
 	"soffit/calc/ec2"
 	"soffit/calc/trace"
 	"soffit/templates"
 )
 
-// ultimateChapter justifies the member in bending, 6.1, 9.2.1.1 and 5.10.1(5)P.
+// ultimateChapter justifies the member in bending, 6.1, with what anchorage, shear and failure with warning ask of it.
 func (j *job) ultimateChapter(c *trace.Chapter) {
 	j.steel = trace.Take(j.parameters, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.ultimate, j.along)
 	if j.hasBars() {
@@ -18,6 +21,7 @@ func (j *job) ultimateChapter(c *trace.Chapter) {
 	j.narrative(b, "ultimate")
 	b.Text("bending", templates.Text("bending"))
 	j.bending(b)
+	j.cracked(c)
 	j.steelLimits(c)
 	j.hogging(c)
 }
@@ -32,6 +36,7 @@ func (j *job) bending(b *trace.Block) {
 			b.Root(pick(j.hasBars(), ec2.AxisRootWithBars, ec2.AxisRoot), j.neutralAxis())
 		})
 		j.compatible(b)
+		j.kindOfFailure(b)
 	})
 	b.On(bare, func() { b.Step(ec2.NoResistance) })
 	b.Check(ec2.BendingSufficient)
@@ -43,7 +48,7 @@ func (j *job) bending(b *trace.Block) {
 // trial takes every row of steel at its limit and finds where the block would lie. It returns the stations on
 // which the trial does not stand, so that strains decide. The inclined branch has no limit to try.
 func (j *job) trial(b *trace.Block) trace.Rows {
-	if j.inclined() || (j.hasBars() && j.barInclined()) {
+	if j.limited() {
 		return b.Active()
 	}
 	b.Step(ec2.FlangeTrial)
@@ -94,19 +99,25 @@ func (j *job) stands(b *trace.Block, rows trace.Rows, t ec2.Trial) trace.Rows {
 	return rest
 }
 
-// compatible gives strains, stresses and forces from the neutral axis, their balance, and the resistance.
-func (j *job) compatible(b *trace.Block) {
+// limited says that steel has a strain limit, so that the top fibre may stay below its ultimate strain.
+func (j *job) limited() bool { return j.inclined() || (j.hasBars() && j.barInclined()) }
+
+// curvature is the formula of κ for the steel diagrams chosen.
+func (j *job) curvature() *clause.Formula {
 	switch {
 	case j.inclined() && j.hasBars() && j.barInclined():
-		b.Step(ec2.CurvatureWithBothLimits)
+		return ec2.CurvatureWithBothLimits
 	case j.inclined():
-		b.Step(ec2.CurvatureWithLimit)
-	case j.hasBars() && j.barInclined():
-		b.Step(ec2.CurvatureWithBarLimit)
-	default:
-		b.Step(ec2.Curvature)
+		return ec2.CurvatureWithLimit
+	case j.limited():
+		return ec2.CurvatureWithBarLimit
 	}
-	b.Steps(ec2.TopStrain, ec2.TendonStrain)
+	return ec2.Curvature
+}
+
+// compatible gives strains, stresses and forces from the neutral axis, their balance, and the resistance.
+func (j *job) compatible(b *trace.Block) {
+	b.Steps(j.curvature(), ec2.TopStrain, ec2.TendonStrain)
 	b.Step(pick(j.inclined(), ec2.TendonStressOnIncline, ec2.TendonStress))
 	b.Step(ec2.TendonForce)
 	if j.hasBars() {
@@ -114,7 +125,16 @@ func (j *job) compatible(b *trace.Block) {
 		b.Step(pick(j.barInclined(), ec2.BarStressOnIncline, ec2.BarStress))
 		b.Step(ec2.BarForce)
 	}
-	b.Steps(ec2.BlockDepth, ec2.BlockPartDepth, ec2.BlockPartWidth, ec2.BlockPartArea, ec2.BlockPartDepthOfCentroid, ec2.ConcreteForce, ec2.ConcreteForceDepth)
+	if j.limited() {
+		b.Text("graded", templates.Text("graded"))
+		b.Steps(ec2.StrainRatio, ec2.Fullness, ec2.ResultantDepth, ec2.FullFullness, ec2.FullResultantDepth)
+		b.Steps(ec2.ReducedDepthFactor, ec2.ReducedStressFactor, ec2.ReducedBlockDepth)
+	} else {
+		b.Step(ec2.BlockDepth)
+	}
+	b.Steps(ec2.BlockPartDepth, ec2.BlockPartWidth, ec2.BlockPartArea, ec2.BlockPartDepthOfCentroid)
+	b.Step(pick(j.limited(), ec2.ReducedConcreteForce, ec2.ConcreteForce))
+	b.Step(ec2.ConcreteForceDepth)
 	b.Step(pick(j.hasBars(), ec2.ResidualWithBars, ec2.Residual))
 	b.Prove(pick(j.hasBars(), ec2.AxisRootWithBars, ec2.AxisRoot))
 	b.Step(ec2.TendonLever)
@@ -122,9 +142,22 @@ func (j *job) compatible(b *trace.Block) {
 		b.Step(ec2.BarLever)
 	}
 	b.Step(pick(j.hasBars(), ec2.ResistanceWithBars, ec2.Resistance))
-	b.Step(pick(j.hasBars(), ec2.EffectiveDepthWithBars, ec2.EffectiveDepth))
-	b.Step(ec2.AxisRatio)
-	b.Choose(ec2.OutermostYields)
+}
+
+// kindOfFailure says what ends the resistance: anchorage, steel or concrete.
+func (j *job) kindOfFailure(b *trace.Block) {
+	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
+	there, _ := b.Choose(ec2.TensionSteelThere)
+	b.On(there, func() {
+		b.Step(pick(j.hasBars(), ec2.TensionDepthWithBars, ec2.TensionDepth))
+		b.Step(ec2.AxisRatio)
+	})
+	b.Steps(ec2.OutermostBonded, ec2.OutermostAnchorage, ec2.OutermostStrain)
+	anchored, _ := b.Choose(ec2.OutermostAnchored)
+	b.On(anchored, func() { b.Decide(ec2.OutermostYields) })
+	if j.limited() {
+		b.Decide(ec2.ConcreteCrushes)
+	}
 }
 
 // pick is a where yes, else b.
@@ -143,20 +176,34 @@ func (j *job) neutralAxis() func(*trace.Row) (trace.Proposal, error) {
 		if err != nil {
 			return trace.Proposal{}, err
 		}
-		axis, err := beam.NeutralAxis(bending.BlockLaw{Lambda: r.Value("λ"), EtaFcd: r.Value("η") * r.Value("f_cd"), EpsCu: r.Value("ε_cu3")}, layers)
+		block := bending.BlockLaw{Lambda: r.Value("λ"), EtaFcd: r.Value("η") * r.Value("f_cd"), EpsCu: r.Value("ε_cu3")}
+		var axis bending.Axis
+		if j.limited() {
+			axis, err = beam.GradedAxis(bending.Graded{BlockLaw: block, Parabola: parabola(r)}, layers)
+		} else {
+			axis, err = beam.NeutralAxis(block, layers)
+		}
 		return trace.Proposal{X: axis.X, Lo: axis.Lo, Hi: axis.Hi}, err
 	}
 }
 
+// parabola is the parabola–rectangle law at a station.
+func parabola(r *trace.Row) bending.Parabola {
+	return bending.Parabola{N: r.Value("n"), EpsC2: r.Value("ε_c2"), EpsCu2: r.Value("ε_cu2"), Fcd: r.Value("f_cd")}
+}
+
 // layers are the rows of steel at a station for the kernels.
 func (j *job) layers(r *trace.Row) ([]bending.Layer, error) {
-	area, depth, prestrain, limit := r.Column("A_{p,i}"), r.Column("d_i"), r.Column("ε_{p0,i}"), r.Column("σ_{av,i}")
+	area, depth, prestrain, limit := r.Column("A_{p,i}"), r.Column("d_{p,i}"), r.Column("ε_{p0,i}"), r.Column("σ_{av,i}")
 	modulus, design := r.Column("E_{p,i}"), r.Column("f_{pd,i}")
 	var out []bending.Layer
 	for i := range area {
 		law, err := bending.Horizontal(modulus[i], design[i])
 		if j.inclined() {
-			law, err = bending.Inclined(modulus[i], design[i], r.Column("f_{pk,i}")[i]/r.Value("γ_S"), r.Column("ε_{uk,i}")[i], r.Column("ε_{ud,i}")[i])
+			law, err = bending.Inclined(modulus[i], design[i], r.Column("f_{pk,i}")[i]/r.Value("γ_S"), r.Column("ε_{puk,i}")[i], r.Column("ε_{pud,i}")[i])
+		}
+		if err == nil && limit[i] < design[i] { // slips before it yields: no strain limit
+			law, err = law.WithLimit(math.Inf(1))
 		}
 		if err != nil {
 			return nil, err
@@ -166,11 +213,14 @@ func (j *job) layers(r *trace.Row) ([]bending.Layer, error) {
 	if !j.hasBars() {
 		return out, nil
 	}
-	area, depth, limit, design = r.Column("A_{s,j}"), r.Column("d_j"), r.Column("σ_{sa,j}"), r.Column("f_{yd,j}")
+	area, depth, limit, design = r.Column("A_{s,j}"), r.Column("d_{s,j}"), r.Column("σ_{sa,j}"), r.Column("f_{yd,j}")
 	for i := range area {
 		law, err := bending.Horizontal(r.Value("E_s"), design[i])
 		if j.barInclined() {
-			law, err = bending.Inclined(r.Value("E_s"), design[i], design[i]*r.Column("k_j")[i], r.Column("ε_{uk,j}")[i], r.Column("ε_{ud,j}")[i])
+			law, err = bending.Inclined(r.Value("E_s"), design[i], design[i]*r.Column("k_{s,j}")[i], r.Column("ε_{suk,j}")[i], r.Column("ε_{sud,j}")[i])
+		}
+		if err == nil && limit[i] < design[i] {
+			law, err = law.WithLimit(math.Inf(1))
 		}
 		if err != nil {
 			return nil, err
@@ -183,8 +233,8 @@ func (j *job) layers(r *trace.Row) ([]bending.Layer, error) {
 func (j *job) bendingFigures(b *trace.Block) {
 	at := j.stations.Rows[b.Row]
 	plots := []trace.Plot{{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"}, {Role: "upper", Key: "given.section/part-upper"},
-		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b)}, {Role: "block-depth", Key: "block-depth"},
-		{Role: "block-stress", Key: "materials.concrete/design-strength"}, {Role: "block-force", Key: "concrete-force"}, {Role: "block-centroid", Key: "concrete-force-depth"},
+		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b)}, {Role: "block-depth", Key: pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID},
+		{Role: "block-stress", Key: "materials.concrete/design-strength"}, {Role: "block-force", Key: j.concreteForceID()}, {Role: "block-centroid", Key: "concrete-force-depth"},
 		{Role: "strain-top", Key: "top-strain"}, {Role: "depth", Key: "section.positions/tendon-depth"}, {Role: "prestrain", Key: "prestrain"},
 		{Role: "strain", Key: "tendon-strain"}, {Role: "force", Key: "tendon-force"}, {Role: "lever", Key: "tendon-lever"},
 		{Role: "resistance", Key: j.resistanceID()}}
@@ -197,7 +247,13 @@ func (j *job) bendingFigures(b *trace.Block) {
 	b.Figure("envelope", "resistance", "Design moment and moment resistance along the span.", "",
 		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "demand", Key: "actions.ultimate/moment"}, trace.Plot{Role: "resistance", Key: resistance},
 		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"})
-	b.Table("along", "Bending along the span", j.stations, "actions.effects/position", "limit-force"+pick(j.hasBars(), "-with-bars", ""), "concrete-force", "block-depth", "actions.ultimate/moment", resistance, "bending-sufficient")
+	b.Table("strains", "Strains and stresses of the rows along the span", j.stations, "actions.effects/position", "prestrain", "prestress.along/available-stress", j.curvature().ID, "tendon-strain", "tendon-stress"+pick(j.inclined(), "-inclined", ""))
+	b.Table("along", "Bending along the span", j.stations, "actions.effects/position", pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID, j.concreteForceID(), "concrete-force-depth", "actions.ultimate/moment", resistance, "bending-sufficient")
+}
+
+// concreteForceID is the ID of the formula that gives F_c.
+func (j *job) concreteForceID() string {
+	return pick(j.limited(), ec2.ReducedConcreteForce, ec2.ConcreteForce).ID
 }
 
 // resistanceID is the ID of the formula that gives M_Rd.
@@ -215,38 +271,84 @@ func (j *job) axisKey(b *trace.Block) string {
 	return "axis-root"
 }
 
-// steelLimits checks minimum and maximum steel and the failure with warning at the station where bending governs.
+// largest is the station with the largest value of a recorded column.
+func (j *job) largest(key string) string {
+	l := trace.LineOf(j.n.Entry(key))
+	if l == nil {
+		return j.stations.Rows[0]
+	}
+	best := 0
+	for i, v := range l.Values {
+		if v > l.Values[best] {
+			best = i
+		}
+	}
+	return j.stations.Rows[best]
+}
+
+// linkAngle is the flattest strut that 6.2.3(2) allows, cot θ = 2.5: it adds the most tension.
+const linkAngle = "21.8"
+
+// cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
+// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and the failure must announce itself (5.10.1(5)P).
+func (j *job) cracked(c *trace.Chapter) {
+	at := j.largest("actions.ultimate/moment")
+	most := c.Block("largest-moment", "Largest moment of the span, "+at, nil, trace.At(j.ultimate, at))
+	most.Step(ec2.LargestMoment)
+
+	takes := trace.Take(j.parameters, j.strengths, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.frequent, j.along, j.resistance, most)
+	b := c.Block("cracked", "Where the section cracks at the ultimate limit state", j.stations, takes...)
+	b.Row = j.resistance.Row
+	b.Text("cracked", templates.Text("cracked"))
+	b.Given(def("strut-angle", "θ", "Angle of the struts: the flattest allowed, shear not being justified here", "°", ref(ec2.Code, "6.2.3(2)")), plain(linkAngle, "°"), "assumption on the safe side")
+	b.Decide(ec2.NoLargerMoment)
+	b.Step(ec2.BottomStress)
+	cracked, _ := b.Choose(ec2.CrackedAtUltimate)
+	b.On(cracked, func() {
+		b.Steps(ec2.LargestShear, ec2.LeverArm, ec2.AddedMoment, ec2.MomentWithShear)
+		b.Check(ec2.BendingWithShear)
+		b.Text("warning", templates.Text("warning"))
+		b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
+		b.Check(ec2.FailureWithWarning)
+		b.Step(ec2.RemainingShare)
+		cracks, _ := b.Choose(ec2.CracksWhenTendonsFail)
+		b.On(cracks, func() {
+			b.Step(ec2.RemainingResistance)
+			b.Check(ec2.WarningWhenTendonsFail)
+		})
+	})
+}
+
+// steelLimits checks minimum steel at every station where steel is bonded in the tension zone, and maximum steel.
 func (j *job) steelLimits(c *trace.Chapter) {
-	at := j.stations.Rows[j.resistance.Row]
-	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.stress)
-	takes = append(takes, trace.At(j.resistance, at))
+	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.stress, j.along, j.resistance)
 	if j.hasBars() {
 		takes = append(takes, trace.Take(j.barData, j.barStrengths)...)
 	}
-	b := c.Block("steel-limits", "Minimum and maximum steel, failure with warning, "+at, nil, takes...)
-	strength, source := plain("500", "MPa"), "no bars: usual strength taken to compare with"
+	b := c.Block("steel-limits", "Minimum and maximum steel", j.stations, takes...)
+	b.Row = j.resistance.Row
+	strength, source := plain("500", "MPa"), "no bars: a usual strength to express the minimum in; it cancels but in 0.0013·b_t·d"
 	if j.hasBars() {
 		r := j.m.Bars.Rows[0]
 		strength, source = r.Fyk.Literal, given(r.Fyk)
 	}
 	b.Given(def("reference-strength", "f_yk", "Yield strength that the minimum is expressed in", "MPa"), strength, source)
 	b.Steps(ec2.TensionPartDepth, ec2.TensionPartArea, ec2.TensionWidth)
+	there, none := b.Choose(ec2.TensionSteelThere)
 	minimum, _ := j.formula(ec2.MinimumSteel)
-	b.Step(minimum)
+	b.On(there, func() { b.Step(minimum) })
+	b.On(none, func() { b.Step(ec2.MinimumSteelOfDepth) })
 	b.Step(pick(j.hasBars(), ec2.TensionSteelWithBars, ec2.TensionSteel))
 	b.Check(ec2.MinimumSteelProvided)
 	maximum, _ := j.formula(ec2.MaximumSteel)
 	b.Step(maximum)
 	b.Step(pick(j.hasBars(), ec2.TotalSteelWithBars, ec2.TotalSteel))
 	b.Check(ec2.MaximumSteelKept)
-	b.Text("warning", templates.Text("warning"))
-	b.Step(ec2.CrackingMoment)
-	b.Check(ec2.FailureWithWarning)
 }
 
 // hogging checks the stations where the least moment is negative: the ends beyond the bearings.
 func (j *job) hogging(c *trace.Chapter) {
-	b := c.Block("hogging", "Hogging moments", j.stations, trace.Take(j.parameters, j.strengths, j.gross, j.ultimate)...)
+	b := c.Block("hogging", "Hogging moments of the loads", j.stations, trace.Take(j.parameters, j.strengths, j.gross, j.ultimate)...)
 	yes, _ := b.Choose(ec2.Hogging)
 	b.On(yes, func() {
 		b.Steps(ec2.OverhangStress, ec2.PlainTensileStrength)

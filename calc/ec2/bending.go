@@ -3,7 +3,7 @@ package ec2
 import "soffit/calc/clause"
 
 // Ultimate bending with strain compatibility, 6.1 and 3.1.7(3). Sagging: the top is compressed. Row i is a row of
-// tendons at depth d_i, row j one of bars at depth d_j, part n a trapezoid of the section whose upper edge is at
+// tendons at depth d_{p,i}, row j one of bars at depth d_{s,j}, part n a trapezoid of the section whose upper edge is at
 // depth z_{c,n}. ε_{p0,i} is the strain of the steel when the concrete beside it has none.
 
 const compatible = "6.1(2)P"
@@ -114,7 +114,7 @@ var WebTrial = clause.Define(&clause.Formula{
 
 // BlockInWeb asks whether the block ends above the lower flange.
 var BlockInWeb = &clause.Condition{
-	ID: "block-in-web", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_w ≤ h_w",
+	ID: "block-in-web", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_w ≤ z_w",
 	Yes: "block ends in the web", No: "block reaches below the web",
 }
 
@@ -129,13 +129,13 @@ func trial(place, x string) Trial {
 	return Trial{
 		Strain: clause.Define(&clause.Formula{
 			ID: "trial-strain-" + place, Name: "Strain of each row on the trial", Ref: en(compatible, ""),
-			Text: "ε_{t,i} = ε_{p0,i} + ε_cu3·(d_i − " + x + ")/" + x, Unit: "‰",
-			Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "ε_cu3 = 3.5 ‰", "d_i = 1140 mm", x+" = 118.93 mm"),
+			Text: "ε_{t,i} = ε_{p0,i} + ε_cu3·(d_{p,i} − " + x + ")/" + x, Unit: "‰",
+			Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "ε_cu3 = 3.5 ‰", "d_{p,i} = 1140 mm", x+" = 118.93 mm"),
 		}),
 		BarStrain: clause.Define(&clause.Formula{
 			ID: "trial-bar-strain-" + place, Name: "Strain of each bar row on the trial", Ref: en(compatible, ""),
-			Text: "ε_{ts,j} = ε_cu3·(d_j − " + x + ")/" + x, Unit: "‰",
-			Examples: hand("12.686 ‰", "ε_cu3 = 3.5 ‰", "d_j = 550 mm", x+" = 118.93 mm"),
+			Text: "ε_{ts,j} = ε_cu3·(d_{s,j} − " + x + ")/" + x, Unit: "‰",
+			Examples: hand("12.686 ‰", "ε_cu3 = 3.5 ‰", "d_{s,j} = 550 mm", x+" = 118.93 mm"),
 		}),
 		Axis: clause.Define(&clause.Formula{ID: "axis-" + place, Name: "Depth of the neutral axis: the trial stands", Ref: en(compatible, ""),
 			Text: "x = " + x, Unit: "mm", Digits: 6, Examples: hand("118.93 mm", x+" = 118.93 mm")}),
@@ -164,25 +164,25 @@ var Curvature = clause.Define(&clause.Formula{
 
 // CurvatureWithLimit is κ with the concrete or the outermost steel at its limit.
 var CurvatureWithLimit = clause.Define(&clause.Formula{
-	ID: "curvature-with-limit", Name: "Curvature: the top fibre at its ultimate strain, or a tendon row at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = min(ε_cu3/x; min_i(cases(d_i > x and σ_{av,i} > 0·[MPa]: (ε_{ud,i} − ε_{p0,i})/(d_i − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
-	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_i = 1140 mm", "ε_{ud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1400 MPa"),
+	ID: "curvature-with-limit", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of tendons at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{p,i} = 1140 mm", "ε_{pud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1426.1 MPa", "f_{pd,i} = 1426.1 MPa"),
 })
 
 // CurvatureWithBarLimit is CurvatureWithLimit with bars that have a limit too.
 var CurvatureWithBarLimit = clause.Define(&clause.Formula{
-	ID: "curvature-with-bar-limit", Name: "Curvature: the top fibre at its ultimate strain, or a bar row at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = min(ε_cu3/x; min_j(cases(d_j > x and σ_{sa,j} > 0·[MPa]: ε_{ud,j}/(d_j − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
-	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_j = 1140 mm", "ε_{ud,j} = 45 ‰", "σ_{sa,j} = 400 MPa"),
+	ID: "curvature-with-bar-limit", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of bars at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{s,j} = 1140 mm", "ε_{sud,j} = 45 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa"),
 })
 
 // CurvatureWithBothLimits has tendons and bars with limits.
 var CurvatureWithBothLimits = clause.Define(&clause.Formula{
-	ID: "curvature-with-both-limits", Name: "Curvature: the top fibre at its ultimate strain, or a row of steel at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = min(ε_cu3/x; min_i(cases(d_i > x and σ_{av,i} > 0·[MPa]: (ε_{ud,i} − ε_{p0,i})/(d_i − x); otherwise: ε_cu3/x)); min_j(cases(d_j > x and σ_{sa,j} > 0·[MPa]: ε_{ud,j}/(d_j − x); otherwise: ε_cu3/x)))",
+	ID: "curvature-with-both-limits", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of steel at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
+	Text: "κ = min(ε_cu3/x; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: ε_cu3/x)); min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: ε_cu3/x)))",
 	Unit: "1/km", Digits: 6,
-	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_i = 1140 mm", "ε_{ud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1400 MPa",
-		"d_j = 1140 mm", "ε_{ud,j} = 45 ‰", "σ_{sa,j} = 400 MPa"),
+	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{p,i} = 1140 mm", "ε_{pud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1426.1 MPa", "f_{pd,i} = 1426.1 MPa",
+		"d_{s,j} = 1140 mm", "ε_{sud,j} = 45 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa"),
 })
 
 // TopStrain is the strain of the top fibre.
@@ -194,14 +194,14 @@ var TopStrain = clause.Define(&clause.Formula{
 // TendonStrain is ε_p.
 var TendonStrain = clause.Define(&clause.Formula{
 	ID: "tendon-strain", Name: "Strain of each row: prestrain and that of bending", Ref: en(compatible, ""),
-	Text: "ε_{p,i} = ε_{p0,i} + κ·(d_i − x)", Unit: "‰", Digits: 6,
-	Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "κ = 29.429 1/km", "d_i = 1140 mm", "x = 118.93 mm"),
+	Text: "ε_{p,i} = ε_{p0,i} + κ·(d_{p,i} − x)", Unit: "‰", Digits: 6,
+	Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "κ = 29.429 1/km", "d_{p,i} = 1140 mm", "x = 118.93 mm"),
 })
 
 // BarStrain is ε_s.
 var BarStrain = clause.Define(&clause.Formula{
-	ID: "bar-strain", Name: "Strain of each bar row", Ref: en(compatible, ""), Text: "ε_{s,j} = κ·(d_j − x)", Unit: "‰", Digits: 6,
-	Examples: hand("12.686 ‰", "κ = 29.429 1/km", "d_j = 550 mm", "x = 118.93 mm"),
+	ID: "bar-strain", Name: "Strain of each bar row", Ref: en(compatible, ""), Text: "ε_{s,j} = κ·(d_{s,j} − x)", Unit: "‰", Digits: 6,
+	Examples: hand("12.686 ‰", "κ = 29.429 1/km", "d_{s,j} = 550 mm", "x = 118.93 mm"),
 })
 
 // TendonStress is σ_p on the horizontal branch.
@@ -215,9 +215,9 @@ var TendonStress = clause.Define(&clause.Formula{
 // TendonStressOnIncline is σ_p on the inclined branch.
 var TendonStressOnIncline = clause.Define(&clause.Formula{
 	ID: "tendon-stress-inclined", Name: "Stress of each row on the inclined branch, at most what is anchored", Ref: en("3.3.6(7) Figure 3.10", ""),
-	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{p,i} − ε_{py,i})/(ε_{uk,i} − ε_{py,i}); σ_{av,i}))", Unit: "MPa",
+	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{p,i} − ε_{py,i})/(ε_{puk,i} − ε_{py,i}); σ_{av,i}))", Unit: "MPa",
 	Examples: hand("1593.2 MPa", "σ_{av,i} = 1600 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 31.5 ‰", "f_{pd,i} = 1426.1 MPa", "f_{pk,i} = 1860 MPa",
-		"γ_S = 1.15", "ε_{py,i} = 7.3133 ‰", "ε_{uk,i} = 35 ‰"),
+		"γ_S = 1.15", "ε_{py,i} = 7.3133 ‰", "ε_{puk,i} = 35 ‰"),
 })
 
 // BarStress is σ_s on the horizontal branch, the same in compression.
@@ -231,10 +231,10 @@ var BarStress = clause.Define(&clause.Formula{
 // BarStressOnIncline is σ_s on the inclined branch, the same in compression.
 var BarStressOnIncline = clause.Define(&clause.Formula{
 	ID: "bar-stress-inclined", Name: "Stress of each bar row on the inclined branch, at most what is anchored", Ref: en("3.2.7(2) Figure 3.8", ""),
-	Text: "σ_{s,j} = max(−σ_{sa,j}; −f_{yd,j}·(1 + (k_j − 1)·max(0; −ε_{s,j} − ε_{sy,j})/(ε_{uk,j} − ε_{sy,j})); " +
-		"min(E_s·ε_{s,j}; f_{yd,j}·(1 + (k_j − 1)·max(0; ε_{s,j} − ε_{sy,j})/(ε_{uk,j} − ε_{sy,j})); σ_{sa,j}))", Unit: "MPa",
-	Examples: hand("465.9 MPa", "σ_{sa,j} = 480 MPa", "E_s = 200 GPa", "ε_{s,j} = 45 ‰", "f_{yd,j} = 434.78 MPa", "k_j = 1.08",
-		"ε_{sy,j} = 2.1739 ‰", "ε_{uk,j} = 50 ‰"),
+	Text: "σ_{s,j} = max(−σ_{sa,j}; −f_{yd,j}·(1 + (k_{s,j} − 1)·max(0; −ε_{s,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j})); " +
+		"min(E_s·ε_{s,j}; f_{yd,j}·(1 + (k_{s,j} − 1)·max(0; ε_{s,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j})); σ_{sa,j}))", Unit: "MPa",
+	Examples: hand("465.9 MPa", "σ_{sa,j} = 480 MPa", "E_s = 200 GPa", "ε_{s,j} = 45 ‰", "f_{yd,j} = 434.78 MPa", "k_{s,j} = 1.08",
+		"ε_{sy,j} = 2.1739 ‰", "ε_{suk,j} = 50 ‰"),
 })
 
 // TendonForce is F_p.
@@ -253,6 +253,65 @@ var BarForce = clause.Define(&clause.Formula{
 var BlockDepth = clause.Define(&clause.Formula{
 	ID: "block-depth", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ·x", Unit: "mm", Digits: 6,
 	Examples: hand("95.144 mm", "λ = 0.8", "x = 118.93 mm"),
+})
+
+// The block where the top fibre stays below its ultimate strain: its depth and stress factors follow the resultant of
+// the parabola–rectangle at that strain, related to the resultant at the ultimate strain, so that they are λ and η
+// there.
+
+// StrainRatio is the strain of the top fibre over ε_c2.
+var StrainRatio = clause.Define(&clause.Formula{
+	ID: "strain-ratio", Name: "Strain of the top fibre over that at the end of the parabola", Ref: en("3.1.7(1)", "3.17"),
+	Text: "r_c = ε_c/ε_c2", Unit: "", Digits: 6, Examples: hand("0.5", "ε_c = 1 ‰", "ε_c2 = 2 ‰"),
+})
+
+// Fullness is the mean stress of the parabola–rectangle over the compressed depth, as part of f_cd.
+var Fullness = clause.Define(&clause.Formula{
+	ID: "fullness", Name: "Mean stress of the parabola–rectangle over the compressed depth, as part of the design strength", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "α_R = 1 − (1 − max(0; 1 − r_c)^(n + 1))/((n + 1)·r_c)", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "r_c = 1.75", "n = 2"),
+		by("worked by hand: r − r²/3", clause.Own, "0.416667", "r_c = 0.5", "n = 2")},
+})
+
+// ResultantDepth is the depth of the resultant of the parabola–rectangle as part of the compressed depth.
+var ResultantDepth = clause.Define(&clause.Formula{
+	ID: "resultant-depth", Name: "Depth of its resultant, as part of the compressed depth", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "k_a = 1 − (1/2 − (1 − max(0; 1 − r_c)^(n + 1)·(1 + (n + 1)·r_c))/((n + 1)·(n + 2)·r_c^2))/α_R", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "r_c = 1.75", "n = 2", "α_R = 0.8095238"),
+		by("worked by hand: (4 − r)/(12 − 4·r)", clause.Own, "0.35", "r_c = 0.5", "n = 2", "α_R = 0.4166667")},
+})
+
+// FullFullness is α_R at the ultimate strain.
+var FullFullness = clause.Define(&clause.Formula{
+	ID: "full-fullness", Name: "The same mean stress at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "α_Ru = 1 − ε_c2/((n + 1)·ε_cu2)", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2")},
+})
+
+// FullResultantDepth is k_a at the ultimate strain.
+var FullResultantDepth = clause.Define(&clause.Formula{
+	ID: "full-resultant-depth", Name: "The same depth at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "k_au = 1 − (1/2 − (ε_c2/ε_cu2)^2/((n + 1)·(n + 2)))/α_Ru", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2", "α_Ru = 0.8095238")},
+})
+
+// ReducedDepthFactor is λ where the top fibre is below its ultimate strain.
+var ReducedDepthFactor = clause.Define(&clause.Formula{
+	ID: "reduced-depth-factor", Name: "Depth factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	Text: "λ_c = λ·k_a/k_au", Unit: "", Digits: 6, Examples: hand("0.67313", "λ = 0.8", "k_a = 0.35", "k_au = 0.4159664"),
+})
+
+// ReducedStressFactor is η where the top fibre is below its ultimate strain.
+var ReducedStressFactor = clause.Define(&clause.Formula{
+	ID: "reduced-stress-factor", Name: "Stress factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	Text: "η_c = η·α_R/α_Ru·k_au/k_a", Unit: "", Digits: 6,
+	Examples: hand("0.61172", "η = 1", "α_R = 0.4166667", "α_Ru = 0.8095238", "k_au = 0.4159664", "k_a = 0.35"),
+})
+
+// ReducedBlockDepth is the depth of the block with the reduced factors.
+var ReducedBlockDepth = clause.Define(&clause.Formula{
+	ID: "block-depth-reduced", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ_c·x", Unit: "mm", Digits: 6,
+	Examples: hand("80 mm", "λ_c = 0.67", "x = 119.403 mm"),
 })
 
 // BlockPartDepth is how deep the block reaches into each part.
@@ -290,6 +349,13 @@ var ConcreteForce = clause.Define(&clause.Formula{
 	Examples: hand("1585.72 kN", "η = 1", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
 })
 
+// ReducedConcreteForce is F_c with the reduced factors.
+var ReducedConcreteForce = clause.Define(&clause.Formula{
+	ID: "concrete-force-reduced", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "F_c = η_c·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
+	Examples: hand("951.43 kN", "η_c = 0.6", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
+})
+
 // ConcreteForceDepth is the depth of F_c.
 var ConcreteForceDepth = clause.Define(&clause.Formula{
 	ID: "concrete-force-depth", Name: "Depth of that force from the top", Ref: en("3.1.7(3) Figure 3.5", ""),
@@ -312,18 +378,11 @@ var (
 			Examples: hand("0.1 kN", "F_c = 1585.9 kN", "F_{p,i} = 1000 kN, 585.8 kN")})
 	ResistanceWithBars, Resistance = steelSums(
 		&clause.Formula{ID: "moment-resistance-with-bars", Name: "Moment resistance about the line of the concrete force", Ref: en(compatible, ""),
-			Text: "M_Rd = Σ_i(F_{p,i}·z_i) + Σ_j(F_{s,j}·z_j)", Unit: "kN·m", Digits: 6, Domain: balanced,
-			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN", "z_i = 1 m", "F_{s,j} = 2 kN", "z_j = 600 mm")},
+			Text: "M_Rd = Σ_i(F_{p,i}·z_{p,i}) + Σ_j(F_{s,j}·z_{s,j})", Unit: "kN·m", Digits: 6, Domain: balanced,
+			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN", "z_{p,i} = 1 m", "F_{s,j} = 2 kN", "z_{s,j} = 600 mm")},
 		&clause.Formula{ID: "moment-resistance", Name: "Moment resistance about the line of the concrete force", Ref: en(compatible, ""),
-			Text: "M_Rd = Σ_i(F_{p,i}·z_i)", Unit: "kN·m", Digits: 6, Domain: balanced,
-			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN, 2 kN", "z_i = 1000 mm, 600 mm")})
-	EffectiveDepthWithBars, EffectiveDepth = steelSums(
-		&clause.Formula{ID: "effective-depth-with-bars", Name: "Effective depth, to the resultant of the steel forces", Ref: en(compatible, ""),
-			Text: "d = (Σ_i(F_{p,i}·d_i) + Σ_j(F_{s,j}·d_j))/(Σ_i(F_{p,i}) + Σ_j(F_{s,j}))", Unit: "mm",
-			Examples: hand("850 mm", "F_{p,i} = 1 kN", "d_i = 1000 mm", "F_{s,j} = 1 kN", "d_j = 700 mm")},
-		&clause.Formula{ID: "effective-depth", Name: "Effective depth, to the resultant of the steel forces", Ref: en(compatible, ""),
-			Text: "d = Σ_i(F_{p,i}·d_i)/Σ_i(F_{p,i})", Unit: "mm",
-			Examples: hand("850 mm", "F_{p,i} = 1 kN, 1 kN", "d_i = 1000 mm, 700 mm")})
+			Text: "M_Rd = Σ_i(F_{p,i}·z_{p,i})", Unit: "kN·m", Digits: 6, Domain: balanced,
+			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN, 2 kN", "z_{p,i} = 1000 mm, 600 mm")})
 )
 
 // balanced is the domain of a resistance: the forces balance to a thousandth, and the section is not wholly
@@ -333,10 +392,38 @@ const balanced = "abs(ΔF) ≤ 0.001·F_c and x ≤ h"
 // TendonLever and BarLever are lever arms about the line of F_c.
 var (
 	TendonLever = clause.Define(&clause.Formula{ID: "tendon-lever", Name: "Lever arm of each row about the concrete force", Ref: en(compatible, ""),
-		Text: "z_i = d_i − d_c", Unit: "mm", Digits: 6, Examples: hand("1092.43 mm", "d_i = 1140 mm", "d_c = 47.57 mm")})
+		Text: "z_{p,i} = d_{p,i} − d_c", Unit: "mm", Digits: 6, Examples: hand("1092.43 mm", "d_{p,i} = 1140 mm", "d_c = 47.57 mm")})
 	BarLever = clause.Define(&clause.Formula{ID: "bar-lever", Name: "Lever arm of each bar row about the concrete force", Ref: en(compatible, ""),
-		Text: "z_j = d_j − d_c", Unit: "mm", Digits: 6, Examples: hand("502.43 mm", "d_j = 550 mm", "d_c = 47.57 mm")})
+		Text: "z_{s,j} = d_{s,j} − d_c", Unit: "mm", Digits: 6, Examples: hand("502.43 mm", "d_{s,j} = 550 mm", "d_c = 47.57 mm")})
 )
+
+// TensionDepth is the depth of the steel below the centroid that is bonded at the station, by its design force.
+var TensionDepthWithBars, TensionDepth = steelSums(
+	&clause.Formula{ID: "tension-depth-with-bars", Name: "Effective depth: of the steel below the centroid that is bonded here, weighed by its strength", Ref: en(compatible, ""),
+		Text: "d = (Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}·d_{p,i}; otherwise: 0·[kN·m])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}·d_{s,j}; otherwise: 0·[kN·m])))" +
+			"/(Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}; otherwise: 0·[kN])))", Unit: "mm",
+		Examples: hand("550 mm", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 100 mm²", "f_{pd,i} = 1000 MPa", "d_{p,i} = 500 mm", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa", "d_{s,j} = 600 mm",
+			"h = 650 mm", "y_cg = 400 mm")},
+	&clause.Formula{ID: "tension-depth", Name: "Effective depth: of the rows below the centroid that are bonded here, weighed by their strength", Ref: en(compatible, ""),
+		Text: "d = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}·d_{p,i}; otherwise: 0·[kN·m]))" +
+			"/Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN]))", Unit: "mm",
+		Examples: hand("1025 mm", "e_i = 490 mm, 440 mm, -510 mm", "s_i = 5 m, 5 m, 5 m", "A_{p,i} = 558 mm², 558 mm², 186 mm²", "f_{pd,i} = 1420.9 MPa, 1420.9 MPa, 1420.9 MPa",
+			"d_{p,i} = 1050 mm, 1000 mm, 50 mm")})
+
+// TensionSteelForceWithBars is the design force of that steel: without any there is no effective depth.
+var TensionSteelForceWithBars, TensionSteelForce = steelSums(
+	&clause.Formula{ID: "tension-steel-force-with-bars", Name: "Design force of the steel below the centroid that is bonded here", Ref: en(compatible, ""),
+		Text: "F_t = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}; otherwise: 0·[kN]))", Unit: "kN",
+		Examples: hand("200 kN", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 100 mm²", "f_{pd,i} = 1000 MPa", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa", "d_{s,j} = 600 mm", "h = 650 mm", "y_cg = 400 mm")},
+	&clause.Formula{ID: "tension-steel-force", Name: "Design force of the rows below the centroid that are bonded here", Ref: en(compatible, ""),
+		Text: "F_t = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN]))", Unit: "kN",
+		Examples: hand("100 kN", "e_i = 200 mm, 200 mm", "s_i = 1 m, 0 m", "A_{p,i} = 100 mm², 300 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa")})
+
+// TensionSteelThere asks whether any steel below the centroid is bonded at the station.
+var TensionSteelThere = &clause.Condition{
+	ID: "tension-steel-there", Name: "Steel in the tension zone", Ref: en(compatible, ""), Text: "F_t > 0·[kN]",
+	Yes: "steel below the centroid is bonded here", No: "no steel below the centroid is bonded here",
+}
 
 // AxisRatio is x/d.
 var AxisRatio = clause.Define(&clause.Formula{
@@ -344,12 +431,44 @@ var AxisRatio = clause.Define(&clause.Formula{
 	Examples: hand("0.10432", "x = 118.93 mm", "d = 1140 mm"),
 })
 
-// OutermostYields asks whether the outermost row of tendons is beyond its yield strain.
+// OutermostBonded is the depth of the outermost row of tendons that is bonded at the station.
+var OutermostBonded = clause.Define(&clause.Formula{
+	ID: "outermost-bonded", Name: "Depth of the outermost row of tendons that is bonded here", Text: "d_o = max_i(cases(s_i > 0·[mm]: d_{p,i}; otherwise: 0·[mm]))", Unit: "mm", Digits: 6,
+	Examples: hand("1090 mm", "d_{p,i} = 1140 mm, 1090 mm", "s_i = 0 m, 2 m"),
+})
+
+// OutermostAnchorage is the part of its design strength that the outermost bonded row can anchor.
+var OutermostAnchorage = clause.Define(&clause.Formula{
+	ID: "outermost-anchorage", Name: "Part of its design strength that this row can anchor", Ref: en("8.10.2.3(5)", ""),
+	Text: "r_a = max_i(cases(d_{p,i} = d_o: σ_{av,i}/f_{pd,i}; otherwise: 0))", Unit: "", Digits: 4,
+	Examples: hand("0.5", "d_{p,i} = 1140 mm, 1090 mm", "d_o = 1140 mm", "σ_{av,i} = 700 MPa, 1400 MPa", "f_{pd,i} = 1400 MPa, 1400 MPa"),
+})
+
+// OutermostStrain is the strain of the outermost bonded row over its yield strain.
+var OutermostStrain = clause.Define(&clause.Formula{
+	ID: "outermost-strain", Name: "Strain of this row over its strain at the design strength", Ref: en("5.10.1(5)P", ""),
+	Text: "r_y = max_i(cases(d_{p,i} = d_o: ε_{p,i}/ε_{py,i}; otherwise: 0))", Unit: "", Digits: 4,
+	Examples: hand("3.5", "d_{p,i} = 1140 mm, 1090 mm", "d_o = 1140 mm", "ε_{p,i} = 24.5 ‰, 20 ‰", "ε_{py,i} = 7 ‰, 7 ‰"),
+})
+
+// OutermostAnchored asks whether anchorage or strength limits the outermost row.
+var OutermostAnchored = &clause.Condition{
+	ID: "outermost-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "r_a ≥ 1",
+	Yes: "the outermost row can be anchored up to its design strength",
+	No:  "anchorage limits the outermost row: its bond fails before it yields, without warning",
+}
+
+// OutermostYields asks whether the outermost row yields before the section fails.
 var OutermostYields = &clause.Condition{
-	ID: "outermost-yields", Name: "Kind of failure", Ref: en("5.10.1(5)P", ""),
-	Text: "max_i(cases(d_i ≥ d_max: ε_{p,i} − ε_{py,i}; otherwise: −ε_{py,i})) ≥ 0",
-	Yes:  "the outermost row yields before the concrete crushes",
-	No:   "over-reinforced: the concrete crushes before the outermost row yields",
+	ID: "outermost-yields", Name: "Kind of failure: strength", Ref: en("5.10.1(5)P", ""), Text: "r_y ≥ 1",
+	Yes: "the outermost row yields before the section fails",
+	No:  "over-reinforced: the concrete crushes before the outermost row yields",
+}
+
+// ConcreteCrushes asks which strain ends the resistance.
+var ConcreteCrushes = &clause.Condition{
+	ID: "concrete-crushes", Name: "Strain that ends the resistance", Ref: en("6.1(3)P Figure 6.1", ""), Text: "ε_c ≥ 0.9999·ε_cu3",
+	Yes: "the top fibre reaches its ultimate strain", No: "a row of steel reaches its strain limit, the top fibre is below its ultimate strain",
 }
 
 // AxisRoot is the neutral axis found from compatible strains.

@@ -2,20 +2,27 @@ package ec2
 
 import "soffit/calc/clause"
 
-// Combinations of actions, EN 1990 6.4.3, 6.5.3 and A1. Load i is permanent (P_i = 1) or variable (P_i = 0); each
+// Combinations of actions, EN 1990 6.4.3, 6.5.3 and A1. Load i is permanent (k_{G,i} = 1) or variable (k_{G,i} = 0); each
 // load counts with its upper factor where that is unfavourable and with its lower one where it is favourable,
 // station by station. Combination n has the leading variable action marked by l_{i,n} = 1.
 
 // CombinationFactor is ψ of a load in an ultimate or characteristic combination.
 var CombinationFactor = clause.Define(&clause.Formula{
-	ID: "combination-factor", Name: "Combination factor of each load: 1 for the leading variable action, ψ₀ for the others", Ref: en1990("6.4.3.2", "6.10"),
+	ID: "combination-factor", Name: "Combination factor of each load: 1 where its action leads, ψ₀ where it does not", Ref: en1990("6.4.3.2", "6.10"),
 	Text: "ψ_{i,n} = cases(l_{i,n} = 1: 1; otherwise: ψ_{0,i})", Unit: "", Digits: 3,
 	Examples: []clause.Example{by("EN 1990 Table A1.1, category A", clause.Recalled, "0.7", "l_{i,n} = 0", "ψ_{0,i} = 0.7")},
 })
 
+// CharacteristicFactor is ψ of a load in a characteristic combination.
+var CharacteristicFactor = clause.Define(&clause.Formula{
+	ID: "characteristic-factor", Name: "Factor of each load: 1 where its action leads, ψ₀ where it does not", Ref: en1990("6.5.3(2)a", "6.14b"),
+	Text: "ψ_{i,n} = cases(l_{i,n} = 1: 1; otherwise: ψ_{0,i})", Unit: "", Digits: 3,
+	Examples: []clause.Example{by("EN 1990 Table A1.1, snow up to 1000 m", clause.Recalled, "0.5", "l_{i,n} = 0", "ψ_{0,i} = 0.5")},
+})
+
 // FrequentFactor is ψ of a load in a frequent combination.
 var FrequentFactor = clause.Define(&clause.Formula{
-	ID: "frequent-factor", Name: "Factor of each load: ψ₁ for the leading variable action, ψ₂ for the others", Ref: en1990("6.5.3(2)b", "6.15"),
+	ID: "frequent-factor", Name: "Factor of each load: ψ₁ where its action leads, ψ₂ where it does not", Ref: en1990("6.5.3(2)b", "6.15b"),
 	Text: "ψ_{i,n} = cases(l_{i,n} = 1: ψ_{1,i}; otherwise: ψ_{2,i})", Unit: "", Digits: 3,
 	Examples: []clause.Example{by("EN 1990 Table A1.1, category A", clause.Recalled, "0.5", "l_{i,n} = 1", "ψ_{1,i} = 0.5", "ψ_{2,i} = 0.3")},
 })
@@ -27,19 +34,26 @@ var PermanentReduction = clause.Define(&clause.Formula{
 	Examples: hand("0.85", "k_{r,n} = 1", "ξ = 0.85"),
 })
 
-// UpperFactor is the factor of a load where it is unfavourable.
+// UpperFactor is the factor of a load where it is unfavourable, by 6.10.
 var UpperFactor = clause.Define(&clause.Formula{
-	ID: "upper-factor", Name: "Factor where the load is unfavourable", Ref: en1990("6.4.3.2, Table A1.2(B)", "6.10"),
-	Text: "γ_{u,i,n} = cases(P_i = 1: ξ_{G,n}·γ_{G,sup}; otherwise: γ_Q·ψ_{i,n})", Unit: "",
-	Examples: append(hand("1.35", "P_i = 1", "ξ_{G,n} = 1", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0"),
-		hand("1.05", "P_i = 0", "ξ_{G,n} = 1", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0.7")...),
+	ID: "upper-factor", Name: "Factor where the load is unfavourable", Ref: en1990("6.4.3.2, Tables A1.2(B) and B3", "6.10"),
+	Text: "γ_{u,i,n} = K_FI·cases(k_{G,i} = 1: γ_{G,sup}; otherwise: γ_Q·ψ_{i,n})", Unit: "",
+	Examples: append(hand("1.35", "K_FI = 1.0", "k_{G,i} = 1", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0"),
+		hand("1.155", "K_FI = 1.1", "k_{G,i} = 0", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0.7")...),
+})
+
+// UpperFactorReduced is the factor of a load where it is unfavourable, by 6.10a or 6.10b.
+var UpperFactorReduced = clause.Define(&clause.Formula{
+	ID: "upper-factor-reduced", Name: "Factor where the load is unfavourable", Ref: en1990("6.4.3.2, Tables A1.2(B) and B3", "6.10a, 6.10b"),
+	Text: "γ_{u,i,n} = K_FI·cases(k_{G,i} = 1: ξ_{G,n}·γ_{G,sup}; otherwise: γ_Q·ψ_{i,n})", Unit: "",
+	Examples: hand("1.1475", "K_FI = 1.0", "k_{G,i} = 1", "ξ_{G,n} = 0.85", "γ_{G,sup} = 1.35", "γ_Q = 1.5", "ψ_{i,n} = 0"),
 })
 
 // LowerFactor is the factor of a load where it is favourable.
 var LowerFactor = clause.Define(&clause.Formula{
 	ID: "lower-factor", Name: "Factor where the load is favourable", Ref: en1990("6.4.3.2, Table A1.2(B)", "6.10"),
-	Text: "γ_{f,i} = cases(P_i = 1: γ_{G,inf}; otherwise: 0)", Unit: "",
-	Examples: hand("0", "P_i = 0", "γ_{G,inf} = 1"),
+	Text: "γ_{f,i} = cases(k_{G,i} = 1: γ_{G,inf}; otherwise: 0)", Unit: "",
+	Examples: hand("0", "k_{G,i} = 0", "γ_{G,inf} = 1"),
 })
 
 func ultimate(id, name, symbol, op, effect string) *clause.Formula {
@@ -100,19 +114,25 @@ var (
 	ShearRightEnvelopeMin = envelope("shear-right-least", "Least shear force right of the station", "V_{Ed,r,min}", "min", "V_{Ed,r,min,n}", "kN")
 )
 
-func service(id, name, sub string, equation string) (moment, largest *clause.Formula) {
+func service(id, name, sub string, ref clause.Ref) (moment, largest *clause.Formula) {
 	moment = clause.Define(&clause.Formula{
-		ID: id + "-moment", Name: name + ", each combination", Ref: en1990("6.5.3(2)", equation),
-		Text: "M_{" + sub + ",n} = Σ_i(max((P_i + (1 − P_i)·ψ_{i,n})·M_i; P_i·M_i))", Unit: "kN·m", Digits: 6,
-		Examples: hand("114 kN·m", "P_i = 1, 0", "ψ_{i,n} = 0, 0.7", "M_i = 100 kN·m, 20 kN·m"),
+		ID: id + "-moment", Name: name + ", each combination", Ref: ref,
+		Text: "M_{" + sub + ",n} = Σ_i(max((k_{G,i} + (1 − k_{G,i})·ψ_{i,n})·M_i; k_{G,i}·M_i))", Unit: "kN·m", Digits: 6,
+		Examples: hand("114 kN·m", "k_{G,i} = 1, 0", "ψ_{i,n} = 0, 0.7", "M_i = 100 kN·m, 20 kN·m"),
 	})
 	largest = envelope(id, name, "M_{"+sub+"}", "max", "M_{"+sub+",n}", "kN·m")
 	return moment, largest
 }
 
-// Service moments: characteristic, frequent, quasi-permanent.
+// Service moments: characteristic and frequent.
 var (
-	CharacteristicMoment, CharacteristicEnvelope = service("characteristic", "Largest moment, characteristic", "char", "6.14b")
-	FrequentMoment, FrequentEnvelope             = service("frequent", "Largest moment, frequent", "freq", "6.15b")
-	QuasiPermanentMoment, QuasiPermanentEnvelope = service("quasi-permanent", "Largest moment, quasi-permanent", "qp", "6.16b")
+	CharacteristicMoment, CharacteristicEnvelope = service("characteristic", "Largest moment, characteristic", "char", en1990("6.5.3(2)a", "6.14b"))
+	FrequentMoment, FrequentEnvelope             = service("frequent", "Largest moment, frequent", "freq", en1990("6.5.3(2)b", "6.15b"))
 )
+
+// QuasiPermanentMoment is the largest quasi-permanent moment, where no action leads.
+var QuasiPermanentMoment = clause.Define(&clause.Formula{
+	ID: "quasi-permanent", Name: "Largest moment, quasi-permanent", Ref: en1990("6.5.3(2)c", "6.16b"),
+	Text: "M_qp = Σ_i(max((k_{G,i} + (1 − k_{G,i})·ψ_{2,i})·M_i; k_{G,i}·M_i))", Unit: "kN·m", Digits: 6,
+	Examples: hand("106 kN·m", "k_{G,i} = 1, 0", "ψ_{2,i} = 0, 0.3", "M_i = 100 kN·m, 20 kN·m"),
+})

@@ -52,7 +52,7 @@ func FindProduct(name string) (Product, bool) {
 
 // ProofStrength is f_p0,1k, F_p0,1/A.
 var ProofStrength = clause.Define(&clause.Formula{
-	ID: "proof-strength", Name: "Characteristic 0.1 % proof strength, from the declared force", Ref: en("3.3.2(1)P", ""),
+	ID: "proof-strength", Name: "Characteristic 0.1 % proof strength, from the declared force", Ref: en("3.3.3(1)P", ""),
 	Text: "f_{p0,1k,i} = F_{p0,1,i}/A_{p1,i}", Unit: "MPa", Digits: 4,
 	Examples: []clause.Example{
 		by(catalogue+"; f_p0,1k of 139 mm²", clause.Opened, "1640 MPa", "F_{p0,1,i} = 228 kN", "A_{p1,i} = 139 mm²"),

@@ -8,8 +8,8 @@ import "soffit/calc/clause"
 // TendonArea is the area of a row.
 var TendonArea = clause.Define(&clause.Formula{
 	ID: "tendon-area", Name: "Area of the row", Ref: clause.Ref{},
-	Text: "A_{p,i} = n_i·A_{p1,i}", Unit: "mm²",
-	Examples: hand("1112 mm²", "n_i = 8", "A_{p1,i} = 139 mm²"),
+	Text: "A_{p,i} = n_{p,i}·A_{p1,i}", Unit: "mm²",
+	Examples: hand("1112 mm²", "n_{p,i} = 8", "A_{p1,i} = 139 mm²"),
 })
 
 // TendonDesignStrength is f_pd.
@@ -29,8 +29,8 @@ var TendonYieldStrain = clause.Define(&clause.Formula{
 // TendonStrainLimit is ε_ud of the inclined branch.
 var TendonStrainLimit = clause.Define(&clause.Formula{
 	ID: "tendon-strain-limit", Name: "Strain limit of the inclined branch", Ref: en("3.3.6(7)", ""),
-	Text: "ε_{ud,i} = k_ud·ε_{uk,i}", Unit: "‰",
-	Examples: hand("31.5 ‰", "k_ud = 0.9", "ε_{uk,i} = 35 ‰"),
+	Text: "ε_{pud,i} = k_ud·ε_{puk,i}", Unit: "‰",
+	Examples: hand("31.5 ‰", "k_ud = 0.9", "ε_{puk,i} = 35 ‰"),
 })
 
 // TendonStressHorizontal is the greatest stress on the horizontal branch.
@@ -43,16 +43,16 @@ var TendonStressHorizontal = clause.Define(&clause.Formula{
 // TendonStressInclined is the greatest stress on the inclined branch, at ε_ud.
 var TendonStressInclined = clause.Define(&clause.Formula{
 	ID: "tendon-greatest-stress-inclined", Name: "Greatest design stress, inclined branch at its strain limit", Ref: en("3.3.6(7) Figure 3.10", ""),
-	Text: "σ_{pd,i} = f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{ud,i} − ε_{py,i})/(ε_{uk,i} − ε_{py,i})", Unit: "MPa",
-	Examples: hand("1593.2 MPa", "f_{pd,i} = 1426.1 MPa", "f_{pk,i} = 1860 MPa", "γ_S = 1.15", "ε_{ud,i} = 31.5 ‰",
-		"ε_{py,i} = 7.3133 ‰", "ε_{uk,i} = 35 ‰"),
+	Text: "σ_{pd,i} = f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{pud,i} − ε_{py,i})/(ε_{puk,i} − ε_{py,i})", Unit: "MPa",
+	Examples: hand("1593.2 MPa", "f_{pd,i} = 1426.1 MPa", "f_{pk,i} = 1860 MPa", "γ_S = 1.15", "ε_{pud,i} = 31.5 ‰",
+		"ε_{py,i} = 7.3133 ‰", "ε_{puk,i} = 35 ‰"),
 })
 
 // BarArea is the area of a row of bars.
 var BarArea = clause.Define(&clause.Formula{
 	ID: "bar-area", Name: "Area of the row", Ref: clause.Ref{},
-	Text: "A_{s,j} = n_j·π/4·φ_j^2", Unit: "mm²",
-	Examples: hand("804.25 mm²", "n_j = 4", "φ_j = 16 mm"),
+	Text: "A_{s,j} = n_{s,j}·π/4·φ_{s,j}^2", Unit: "mm²",
+	Examples: hand("804.25 mm²", "n_{s,j} = 4", "φ_{s,j} = 16 mm"),
 })
 
 // BarDesignStrength is f_yd.
@@ -72,8 +72,8 @@ var BarYieldStrain = clause.Define(&clause.Formula{
 // BarStrainLimit is ε_ud of bars.
 var BarStrainLimit = clause.Define(&clause.Formula{
 	ID: "bar-strain-limit", Name: "Strain limit of the inclined branch", Ref: en("3.2.7(2)", ""),
-	Text: "ε_{ud,j} = k_ud·ε_{uk,j}", Unit: "‰",
-	Examples: hand("45 ‰", "k_ud = 0.9", "ε_{uk,j} = 50 ‰"),
+	Text: "ε_{sud,j} = k_ud·ε_{suk,j}", Unit: "‰",
+	Examples: hand("45 ‰", "k_ud = 0.9", "ε_{suk,j} = 50 ‰"),
 })
 
 // BarStressHorizontal is the greatest stress of bars on the horizontal branch.
@@ -86,6 +86,6 @@ var BarStressHorizontal = clause.Define(&clause.Formula{
 // BarStressInclined is the greatest stress of bars on the inclined branch.
 var BarStressInclined = clause.Define(&clause.Formula{
 	ID: "bar-greatest-stress-inclined", Name: "Greatest design stress, inclined branch at its strain limit", Ref: en("3.2.7(2) Figure 3.8", ""),
-	Text: "σ_{sd,j} = f_{yd,j}·(1 + (k_j − 1)·(ε_{ud,j} − ε_{sy,j})/(ε_{uk,j} − ε_{sy,j}))", Unit: "MPa",
-	Examples: hand("465.9 MPa", "f_{yd,j} = 434.78 MPa", "k_j = 1.08", "ε_{ud,j} = 45 ‰", "ε_{sy,j} = 2.1739 ‰", "ε_{uk,j} = 50 ‰"),
+	Text: "σ_{sd,j} = f_{yd,j}·(1 + (k_{s,j} − 1)·(ε_{sud,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j}))", Unit: "MPa",
+	Examples: hand("465.9 MPa", "f_{yd,j} = 434.78 MPa", "k_{s,j} = 1.08", "ε_{sud,j} = 45 ‰", "ε_{sy,j} = 2.1739 ‰", "ε_{suk,j} = 50 ‰"),
 })

@@ -13,7 +13,7 @@ func difference(id, name, symbol, second, first, unit string) *clause.Formula {
 // Relative differences of section properties and resistance.
 var (
 	AreaDifference       = difference("area-difference", "Difference of the area", "δ_A", "A_{c,2}", "A_c", "mm²")
-	CentroidDifference   = difference("centroid-difference", "Difference of the centroid", "δ_y", "y_{s,2}", "y_s", "mm")
+	CentroidDifference   = difference("centroid-difference", "Difference of the centroid", "δ_y", "y_{cg,2}", "y_cg", "mm")
 	InertiaDifference    = difference("inertia-difference", "Difference of the second moment of area", "δ_I", "I_{c,2}", "I_c", "10⁶ mm⁴")
 	ResistanceDifference = difference("resistance-difference", "Difference of the moment resistance", "δ_M", "M_{Rd,2}", "M_Rd", "kN·m")
 )

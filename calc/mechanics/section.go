@@ -45,54 +45,54 @@ var Area = clause.Define(&clause.Formula{
 
 // Centroid is the height of the centroid above the soffit.
 var Centroid = clause.Define(&clause.Formula{
-	ID: "centroid", Name: "Centroid above the soffit", Text: "y_s = Σ_n(A_{c,n}·y_{c,n})/A_c", Unit: "mm", Digits: 6,
+	ID: "centroid", Name: "Centroid above the soffit", Text: "y_cg = Σ_n(A_{c,n}·y_{c,n})/A_c", Unit: "mm", Digits: 6,
 	Examples: hand("150 mm", "A_{c,n} = 100 mm², 100 mm²", "y_{c,n} = 100 mm, 200 mm", "A_c = 200 mm²"),
 })
 
 // Inertia is the second moment of area.
 var Inertia = clause.Define(&clause.Formula{
-	ID: "inertia", Name: "Second moment of area", Text: "I_c = Σ_n(I_{c,n} + A_{c,n}·(y_{c,n} − y_s)^2)", Unit: "10⁶ mm⁴", Digits: 6,
-	Examples: hand("10 10⁶ mm⁴", "A_{c,n} = 1000 mm², 1000 mm²", "y_{c,n} = 100 mm, 200 mm", "y_s = 150 mm", "I_{c,n} = 2500000 mm⁴, 2500000 mm⁴"),
+	ID: "inertia", Name: "Second moment of area", Text: "I_c = Σ_n(I_{c,n} + A_{c,n}·(y_{c,n} − y_cg)^2)", Unit: "10⁶ mm⁴", Digits: 6,
+	Examples: hand("10 10⁶ mm⁴", "A_{c,n} = 1000 mm², 1000 mm²", "y_{c,n} = 100 mm, 200 mm", "y_cg = 150 mm", "I_{c,n} = 2500000 mm⁴, 2500000 mm⁴"),
 })
 
 // LowerModulus is the section modulus of the bottom fibre.
 var LowerModulus = clause.Define(&clause.Formula{
-	ID: "lower-modulus", Name: "Section modulus, bottom fibre", Text: "W_b = I_c/y_s", Unit: "10³ mm³", Digits: 6,
-	Examples: hand("100.000 10³ mm³", "I_c = 10 10⁶ mm⁴", "y_s = 100 mm"),
+	ID: "lower-modulus", Name: "Section modulus, bottom fibre", Text: "W_b = I_c/y_cg", Unit: "10³ mm³", Digits: 6,
+	Examples: hand("100.000 10³ mm³", "I_c = 10 10⁶ mm⁴", "y_cg = 100 mm"),
 })
 
 // UpperModulus is the section modulus of the top fibre.
 var UpperModulus = clause.Define(&clause.Formula{
-	ID: "upper-modulus", Name: "Section modulus, top fibre", Text: "W_t = I_c/(h − y_s)", Unit: "10³ mm³", Digits: 6,
-	Examples: hand("50.000 10³ mm³", "I_c = 10 10⁶ mm⁴", "y_s = 100 mm", "h = 300 mm"),
+	ID: "upper-modulus", Name: "Section modulus, top fibre", Text: "W_t = I_c/(h − y_cg)", Unit: "10³ mm³", Digits: 6,
+	Examples: hand("50.000 10³ mm³", "I_c = 10 10⁶ mm⁴", "y_cg = 100 mm", "h = 300 mm"),
 })
 
 // Eccentricity is the distance of a tendon row below the centroid.
 var Eccentricity = clause.Define(&clause.Formula{
-	ID: "eccentricity", Name: "Eccentricity of each row, below the centroid positive", Text: "e_i = y_s − y_{p,i}", Unit: "mm", Digits: 6,
-	Examples: hand("440 mm", "y_s = 500 mm", "y_{p,i} = 60 mm"),
+	ID: "eccentricity", Name: "Eccentricity of each row, below the centroid positive", Text: "e_i = y_cg − y_{p,i}", Unit: "mm", Digits: 6,
+	Examples: hand("440 mm", "y_cg = 500 mm", "y_{p,i} = 60 mm"),
 })
 
 // TendonDepth is the depth of a tendon row from the top.
 var TendonDepth = clause.Define(&clause.Formula{
-	ID: "tendon-depth", Name: "Depth of each row from the top", Text: "d_i = h − y_{p,i}", Unit: "mm", Digits: 6,
+	ID: "tendon-depth", Name: "Depth of each row from the top", Text: "d_{p,i} = h − y_{p,i}", Unit: "mm", Digits: 6,
 	Examples: hand("1140 mm", "h = 1200 mm", "y_{p,i} = 60 mm"),
 })
 
 // BarDepth is the depth of a bar row from the top.
 var BarDepth = clause.Define(&clause.Formula{
-	ID: "bar-depth", Name: "Depth of each row from the top", Text: "d_j = h − y_{s,j}", Unit: "mm", Digits: 6,
+	ID: "bar-depth", Name: "Depth of each row from the top", Text: "d_{s,j} = h − y_{s,j}", Unit: "mm", Digits: 6,
 	Examples: hand("550 mm", "h = 600 mm", "y_{s,j} = 50 mm"),
 })
 
 // SelfWeight is the weight of the member per length.
 var SelfWeight = clause.Define(&clause.Formula{
-	ID: "self-weight", Name: "Self-weight of the member per length", Text: "g_0 = γ_c·A_c", Unit: "kN/m",
-	Examples: hand("10.5 kN/m", "γ_c = 25 kN/m³", "A_c = 420000 mm²"),
+	ID: "self-weight", Name: "Self-weight of the member per length", Text: "g_0 = γ_{conc}·A_c", Unit: "kN/m",
+	Examples: hand("10.5 kN/m", "γ_{conc} = 25 kN/m³", "A_c = 420000 mm²"),
 })
 
-// OutermostDepth is the depth of the outermost row of tendons.
-var OutermostDepth = clause.Define(&clause.Formula{
-	ID: "outermost-depth", Name: "Depth of the outermost row of tendons", Text: "d_max = max_i(d_i)", Unit: "mm", Digits: 6,
-	Examples: hand("1140 mm", "d_i = 1140 mm, 1090 mm"),
+// FlangeOverhang is the width of the top part beyond the web on one side.
+var FlangeOverhang = clause.Define(&clause.Formula{
+	ID: "flange-overhang", Name: "Overhang of the flange on each side", Text: "b_1 = (b_f − b_w)/2", Unit: "mm", Digits: 6,
+	Examples: hand("450 mm", "b_f = 1200 mm", "b_w = 300 mm"),
 })

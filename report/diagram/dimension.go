@@ -39,14 +39,21 @@ func across(c draw.Canvas, x0, x1, y draw.Pt, l label, side int) {
 
 // acrossPast is across with figures that, beyond the right end, stand right of past too.
 func acrossPast(c draw.Canvas, x0, x1, y draw.Pt, l label, side int, past draw.Pt) {
+	if l.width+4 > x1-x0 {
+		acrossOutside(c, x0, x1, y, l, side, past)
+		return
+	}
+	ticks(c, x0, y)
+	ticks(c, x1, y)
+	c.Line(x0, y, x1, y, hair)
+	l.centre(c, (x0+x1)/2, y-clearance-l.depth)
+}
+
+// acrossOutside is acrossPast with the figures beyond an end whatever the room between.
+func acrossOutside(c draw.Canvas, x0, x1, y draw.Pt, l label, side int, past draw.Pt) {
 	ticks(c, x0, y)
 	ticks(c, x1, y)
 	base := y - clearance - l.depth
-	if l.width+4 <= x1-x0 {
-		c.Line(x0, y, x1, y, hair)
-		l.centre(c, (x0+x1)/2, base)
-		return
-	}
 	if side < 0 {
 		c.Line(x0-4-l.width, y, x1+beyond, y, hair)
 		l.right(c, x0-3, base)

@@ -253,32 +253,41 @@ func (s *crossSection) widestIn(from, to int) float64 {
 }
 
 // within dimensions the width of a part inside the section, where tendons, bars and the centroid leave most
-// room between the heights y0 and y1.
+// room between the heights y0 and y1. Where that is too little the figures stand left of the part, clear of
+// the centroid alone.
 func (s *crossSection) within(c draw.Canvas, f frame, w cell, y0, y1 float64) {
-	taken := []float64{}
+	var axes, rows []float64
 	if s.centroid >= 0 {
-		taken = append(taken, s.centroid)
+		axes = append(axes, s.centroid)
 	}
 	for _, r := range []dots{s.tendons, s.bars} {
-		for _, v := range r.level.cells {
-			taken = append(taken, v.value)
-		}
+		rows = append(rows, r.height...)
 	}
 	up := float64((size/2 + clearance) / f.sy) // from the line to the middle of its figures
-	best, room := (y0+y1)/2, -1.0
-	const tries = 24
-	for i := 1; i < tries; i++ {
-		y := y0 + (y1-y0)*float64(i)/tries
-		r := min(y+up-y0, y1-y-up)
-		for _, t := range taken {
-			r = min(r, math.Abs(t-y-up))
+	freest := func(of ...float64) (best, room float64) {
+		best, room = (y0+y1)/2, -1
+		const tries = 24
+		for i := 1; i < tries; i++ {
+			y := y0 + (y1-y0)*float64(i)/tries
+			r := min(y+up-y0, y1-y-up)
+			for _, t := range of {
+				r = min(r, math.Abs(t-y-up))
+			}
+			if r > room+1e-9 {
+				best, room = y, r
+			}
 		}
-		if r > room+1e-9 {
-			best, room = y, r
-		}
+		return best, room
 	}
+	const least = size/2 + 3 // from the middle of the figures to an axis of tendons
 	x := draw.Pt(w.value) / 2 * f.sx
-	across(c, -x, x, f.at(0, best).Y, label{}.length(w), 1)
+	y, room := freest(append(rows, axes...)...)
+	if draw.Pt(room)*f.sy < least {
+		y, _ = freest(axes...)
+		acrossOutside(c, -x, x, f.at(0, y).Y, label{}.length(w), -1, x)
+		return
+	}
+	across(c, -x, x, f.at(0, y).Y, label{}.length(w), -1)
 }
 
 // rows lists the rows of tendons and bars, and names the centroid.
