@@ -115,7 +115,7 @@ func (j *job) combination(c *trace.Chapter, slug, title string, list func(*job) 
 // effectsFigure draws the ultimate moments and shear forces.
 func (j *job) effectsFigure() {
 	j.ultimate.Figure("diagram", "effects", "Moments and shear forces at the ultimate limit state.", "",
-		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "M-max", Key: "moment"}, trace.Plot{Role: "M-min", Key: "moment-least"},
+		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"}, trace.Plot{Role: "M-max", Key: "moment"}, trace.Plot{Role: "M-min", Key: "moment-least"},
 		trace.Plot{Role: "V-left-max", Key: "shear-left"}, trace.Plot{Role: "V-left-min", Key: "shear-left-least"},
 		trace.Plot{Role: "V-right-max", Key: "shear-right"}, trace.Plot{Role: "V-right-min", Key: "shear-right-least"})
 }

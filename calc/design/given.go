@@ -311,7 +311,8 @@ func (j *job) givenFigures(c *trace.Chapter) {
 	b := c.Block("drawings", "Section to scale", nil)
 	section := []trace.Plot{{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"},
 		{Role: "upper", Key: "given.section/part-upper"}, {Role: "count", Key: "given.tendons/count"}, {Role: "spacing", Key: "given.tendons/spacing"},
-		{Role: "level", Key: "given.tendons/level"}, {Role: "diameter", Key: "given.tendons/diameter"}}
+		{Role: "level", Key: "given.tendons/level"}, {Role: "diameter", Key: "given.tendons/diameter"},
+		{Role: "depth", Key: "given.section/depth"}, {Role: "debonded", Key: "given.tendons/debonded-length"}}
 	if j.hasBars() {
 		section = append(section, trace.Plot{Role: "bar-count", Key: "given.bars/count"}, trace.Plot{Role: "bar-spacing", Key: "given.bars/spacing"},
 			trace.Plot{Role: "bar-level", Key: "given.bars/level"}, trace.Plot{Role: "bar-diameter", Key: "given.bars/diameter"})

@@ -146,6 +146,10 @@ func (j *job) compatible(b *trace.Block) {
 
 // kindOfFailure says what ends the resistance: anchorage, steel or concrete.
 func (j *job) kindOfFailure(b *trace.Block) {
+	b.Step(ec2.TendonCounts)
+	if j.hasBars() {
+		b.Step(ec2.BarCounts)
+	}
 	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
 	there, _ := b.Choose(ec2.TensionSteelThere)
 	b.On(there, func() {
@@ -236,10 +240,12 @@ func (j *job) bendingFigures(b *trace.Block) {
 		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b)}, {Role: "block-depth", Key: pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID},
 		{Role: "block-stress", Key: "materials.concrete/design-strength"}, {Role: "block-force", Key: j.concreteForceID()}, {Role: "block-centroid", Key: "concrete-force-depth"},
 		{Role: "strain-top", Key: "top-strain"}, {Role: "depth", Key: "section.positions/tendon-depth"}, {Role: "prestrain", Key: "prestrain"},
+		{Role: "count", Key: "given.tendons/count"}, {Role: "spacing", Key: "given.tendons/spacing"}, {Role: "diameter", Key: "given.tendons/diameter"},
 		{Role: "strain", Key: "tendon-strain"}, {Role: "force", Key: "tendon-force"}, {Role: "lever", Key: "tendon-lever"},
 		{Role: "resistance", Key: j.resistanceID()}}
 	if j.hasBars() {
-		plots = append(plots, trace.Plot{Role: "bar-depth", Key: "section.positions/bar-depth"}, trace.Plot{Role: "bar-strain", Key: "bar-strain"},
+		plots = append(plots, trace.Plot{Role: "bar-count", Key: "given.bars/count"}, trace.Plot{Role: "bar-spacing", Key: "given.bars/spacing"}, trace.Plot{Role: "bar-diameter", Key: "given.bars/diameter"},
+			trace.Plot{Role: "bar-depth", Key: "section.positions/bar-depth"}, trace.Plot{Role: "bar-strain", Key: "bar-strain"},
 			trace.Plot{Role: "bar-force", Key: "bar-force"}, trace.Plot{Role: "bar-lever", Key: "bar-lever"})
 	}
 	b.Figure("section-diagram", "ultimate", "Strain, stress and forces at the ultimate limit state, "+at+".", at, plots...)

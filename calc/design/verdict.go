@@ -112,14 +112,20 @@ func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 	b := c.Block("mends", "What would mend a failing check", nil)
 	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and no other check fails, found by running the whole design again. It is a hint for the engineer, not a design.")
 	for _, k := range failing {
+		found := false
 		for _, r := range remedies {
 			words, ratio := j.try(r, k)
 			if words == "" {
 				continue
 			}
+			found = true
 			id := r.id + "-" + k.Key
 			symbol := fmt.Sprintf("r_%d", len(b.Entries))
 			b.Given(def(keyed(id), symbol, k.Name+": with "+words, ""), quantity.Literal{Number: ratio}, "the design run again; ratio then")
+		}
+		if !found {
+			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: up to %d more tendons in the lowest row or in a further row as far as they fit, f_ck up to 90 MPa, depth up to %d mm more.",
+				k.Name, k.Number, 12, 50*remedies[len(remedies)-1].steps))
 		}
 	}
 }
@@ -171,7 +177,7 @@ func (j *job) noneNew(n *trace.Note) bool {
 func (j *job) elevation(b *trace.Block) {
 	b.Figure("elevation", "elevation", "The member: tendons, bearings and loads.", "",
 		trace.Plot{Role: "length", Key: "given.span/length"}, trace.Plot{Role: "depth", Key: "given.section/depth"},
-		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"},
+		trace.Plot{Role: "span", Key: "section.flange/span"}, trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"},
 		trace.Plot{Role: "bearing-A", Key: "given.span/bearing-a-length"}, trace.Plot{Role: "bearing-B", Key: "given.span/bearing-b-length"},
 		trace.Plot{Role: "level", Key: "given.tendons/level"}, trace.Plot{Role: "debonded", Key: "given.tendons/debonded-length"},
 		trace.Plot{Role: "load-q", Key: "actions.loads/load"}, trace.Plot{Role: "load-F", Key: "given.actions/point"},

@@ -397,27 +397,33 @@ var (
 		Text: "z_{s,j} = d_{s,j} − d_c", Unit: "mm", Digits: 6, Examples: hand("502.43 mm", "d_{s,j} = 550 mm", "d_c = 47.57 mm")})
 )
 
-// TensionDepth is the depth of the steel below the centroid that is bonded at the station, by its design force.
-var TensionDepthWithBars, TensionDepth = steelSums(
-	&clause.Formula{ID: "tension-depth-with-bars", Name: "Effective depth: of the steel below the centroid that is bonded here, weighed by its strength", Ref: en(compatible, ""),
-		Text: "d = (Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}·d_{p,i}; otherwise: 0·[kN·m])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}·d_{s,j}; otherwise: 0·[kN·m])))" +
-			"/(Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}; otherwise: 0·[kN])))", Unit: "mm",
-		Examples: hand("550 mm", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 100 mm²", "f_{pd,i} = 1000 MPa", "d_{p,i} = 500 mm", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa", "d_{s,j} = 600 mm",
-			"h = 650 mm", "y_cg = 400 mm")},
-	&clause.Formula{ID: "tension-depth", Name: "Effective depth: of the rows below the centroid that are bonded here, weighed by their strength", Ref: en(compatible, ""),
-		Text: "d = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}·d_{p,i}; otherwise: 0·[kN·m]))" +
-			"/Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN]))", Unit: "mm",
-		Examples: hand("1025 mm", "e_i = 490 mm, 440 mm, -510 mm", "s_i = 5 m, 5 m, 5 m", "A_{p,i} = 558 mm², 558 mm², 186 mm²", "f_{pd,i} = 1420.9 MPa, 1420.9 MPa, 1420.9 MPa",
-			"d_{p,i} = 1050 mm, 1000 mm, 50 mm")})
+// TendonCounts and BarCounts are 1 for steel that counts as tension steel at the station, 0 for the rest.
+var (
+	TendonCounts = clause.Define(&clause.Formula{ID: "tendon-counts", Name: "1 for a row below the centroid that is bonded here, 0 for the others",
+		Text: "t_{p,i} = cases(e_i > 0·[mm] and s_i > 0·[mm]: 1; otherwise: 0)", Unit: "", Digits: 1,
+		Examples: append(hand("1, 0", "e_i = 490 mm, -510 mm", "s_i = 5 m, 5 m"), hand("0", "e_i = 440 mm", "s_i = 0 m")...)})
+	BarCounts = clause.Define(&clause.Formula{ID: "bar-counts", Name: "1 for a row below the centroid, 0 for the others",
+		Text: "t_{s,j} = cases(d_{s,j} > h − y_cg: 1; otherwise: 0)", Unit: "", Digits: 1,
+		Examples: hand("1, 0", "d_{s,j} = 600 mm, 40 mm", "h = 650 mm", "y_cg = 425 mm")})
+)
 
-// TensionSteelForceWithBars is the design force of that steel: without any there is no effective depth.
+// TensionSteelForce is the design force of the steel that counts: without any there is no effective depth.
 var TensionSteelForceWithBars, TensionSteelForce = steelSums(
 	&clause.Formula{ID: "tension-steel-force-with-bars", Name: "Design force of the steel below the centroid that is bonded here", Ref: en(compatible, ""),
-		Text: "F_t = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN])) + Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}·f_{yd,j}; otherwise: 0·[kN]))", Unit: "kN",
-		Examples: hand("200 kN", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 100 mm²", "f_{pd,i} = 1000 MPa", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa", "d_{s,j} = 600 mm", "h = 650 mm", "y_cg = 400 mm")},
+		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i}) + Σ_j(t_{s,j}·A_{s,j}·f_{yd,j})", Unit: "kN",
+		Examples: hand("200 kN", "t_{p,i} = 1, 0", "A_{p,i} = 100 mm², 50 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa", "t_{s,j} = 1", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa")},
 	&clause.Formula{ID: "tension-steel-force", Name: "Design force of the rows below the centroid that are bonded here", Ref: en(compatible, ""),
-		Text: "F_t = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·f_{pd,i}; otherwise: 0·[kN]))", Unit: "kN",
-		Examples: hand("100 kN", "e_i = 200 mm, 200 mm", "s_i = 1 m, 0 m", "A_{p,i} = 100 mm², 300 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa")})
+		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i})", Unit: "kN",
+		Examples: hand("100 kN", "t_{p,i} = 1, 0", "A_{p,i} = 100 mm², 300 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa")})
+
+// TensionDepth is the effective depth, to the steel that counts, weighed by its design force.
+var TensionDepthWithBars, TensionDepth = steelSums(
+	&clause.Formula{ID: "tension-depth-with-bars", Name: "Effective depth, to that steel, weighed by its strength", Ref: en(compatible, ""),
+		Text: "d = (Σ_i(t_{p,i}·A_{p,i}·f_{pd,i}·d_{p,i}) + Σ_j(t_{s,j}·A_{s,j}·f_{yd,j}·d_{s,j}))/F_t", Unit: "mm",
+		Examples: hand("550 mm", "t_{p,i} = 1", "A_{p,i} = 100 mm²", "f_{pd,i} = 1000 MPa", "d_{p,i} = 500 mm", "t_{s,j} = 1", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa", "d_{s,j} = 600 mm", "F_t = 200 kN")},
+	&clause.Formula{ID: "tension-depth", Name: "Effective depth, to those rows, weighed by their strength", Ref: en(compatible, ""),
+		Text: "d = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i}·d_{p,i})/F_t", Unit: "mm",
+		Examples: hand("1025 mm", "t_{p,i} = 1, 1, 0", "A_{p,i} = 500 mm², 500 mm², 186 mm²", "f_{pd,i} = 1420 MPa, 1420 MPa, 1420 MPa", "d_{p,i} = 1050 mm, 1000 mm, 50 mm", "F_t = 1420 kN")})
 
 // TensionSteelThere asks whether any steel below the centroid is bonded at the station.
 var TensionSteelThere = &clause.Condition{

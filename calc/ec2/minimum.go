@@ -43,16 +43,12 @@ var MinimumSteelOfDepth = clause.Define(&clause.Formula{
 
 // The steel counted towards the minimum: rows bonded at the station.
 var TensionSteelWithBars, TensionSteel = steelSums(
-	&clause.Formula{ID: "tension-steel-with-bars", Name: "Steel counted: bars below the centroid, and rows of tendons there that are bonded here by their strength left above the prestress (common practice, no source)",
-		Ref: en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_j(cases(d_{s,j} > h − y_cg: A_{s,j}; otherwise: 0·[mm²])) + " +
-			"Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk; otherwise: 0·[mm²]))", Unit: "mm²",
-		Examples: hand("1900.9 mm²", "d_{s,j} = 550 mm", "h = 600 mm", "y_cg = 300 mm", "A_{s,j} = 800 mm²", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 1112 mm²",
-			"f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")},
-	&clause.Formula{ID: "tension-steel", Name: "Steel counted: rows below the centroid that are bonded here, by their strength left above the prestress (common practice, no source)",
-		Ref:  en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_i(cases(e_i > 0·[mm] and s_i > 0·[mm]: A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk; otherwise: 0·[mm²]))", Unit: "mm²",
-		Examples: hand("1100.9 mm²", "e_i = 200 mm", "s_i = 1 m", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")})
+	&clause.Formula{ID: "tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")},
+	&clause.Formula{ID: "tension-steel", Name: "Steel counted: tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1100.9 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")})
 
 // MinimumSteelProvided is A_s,min ≤ A_s,prov.
 var MinimumSteelProvided = &clause.Check{ID: "minimum-steel-provided", Name: "Minimum steel in tension", Ref: en("9.2.1.1(1)", "9.1N"),
@@ -114,7 +110,7 @@ var MomentWithShear = clause.Define(&clause.Formula{
 })
 
 // BendingWithShear is M_Ed,V ≤ M_Rd.
-var BendingWithShear = &clause.Check{ID: "bending-with-shear", Name: "Bending with the tension that shear adds, where cracked", Ref: en("6.2.3(7)", "6.18"),
+var BendingWithShear = &clause.Check{ID: "bending-with-shear", Name: "Bending with the tension added by shear", Ref: en("6.2.3(7)", "6.18"),
 	Demand: "M_{Ed,V}", Limit: "M_Rd"}
 
 // LargestMoment is the largest design moment of the span.
@@ -149,7 +145,7 @@ var CrackingMoment = clause.Define(&clause.Formula{
 })
 
 // FailureWithWarning is M_cr ≤ M_Rd.
-var FailureWithWarning = &clause.Check{ID: "failure-with-warning", Name: "Warning before failure, the load growing: cracking before the resistance", Ref: en("5.10.1(6) method E", ""),
+var FailureWithWarning = &clause.Check{ID: "failure-with-warning", Name: "Warning before failure, load growing", Ref: en("5.10.1(6) method E", ""),
 	Demand: "M_cr", Limit: "M_Rd"}
 
 // RemainingShare is the share of the prestress at which the frequent moment cracks the section.
@@ -172,7 +168,7 @@ var RemainingResistance = clause.Define(&clause.Formula{
 })
 
 // WarningWhenTendonsFail is M_freq ≤ M_Rd,E.
-var WarningWhenTendonsFail = &clause.Check{ID: "warning-when-tendons-fail", Name: "Warning before failure, tendons lost: cracking under the frequent moment first", Ref: en("5.10.1(6) method E", ""),
+var WarningWhenTendonsFail = &clause.Check{ID: "warning-when-tendons-fail", Name: "Warning before failure, tendons lost", Ref: en("5.10.1(6) method E", ""),
 	Demand: "M_freq", Limit: "M_{Rd,E}"}
 
 // Hogging from external loads at and beyond the bearings.
@@ -196,5 +192,5 @@ var Hogging = &clause.Condition{ID: "hogging", Name: "Sign of the least moment",
 	Yes: "hogging", No: "no hogging"}
 
 // HoggingResisted is σ_ct ≤ f_ctd,pl.
-var HoggingResisted = &clause.Check{ID: "hogging-resisted", Name: "Hogging from the loads alone, as plain concrete (tension from the prestress not counted)", Ref: en("12.3.1(2)", "12.1"),
+var HoggingResisted = &clause.Check{ID: "hogging-resisted", Name: "Hogging of the loads alone, plain concrete", Ref: en("12.3.1(2)", "12.1"),
 	Demand: "σ_ct", Limit: "f_{ctd,pl}"}

@@ -112,7 +112,7 @@ func member(t *rapid.T) *invented {
 func TestFiguresAreClean(t *testing.T) {
 	rapid.Check(t, func(rt *rapid.T) {
 		m := member(rt)
-		width := draw.Pt(rapid.IntRange(320, 345).Draw(rt, "paper"))
+		width := draw.Pt(rapid.IntRange(320, 516).Draw(rt, "paper"))
 		n, figs := m.note(t)
 		for id, f := range figs {
 			fig, err := Lay(n, f, width)

@@ -16,7 +16,7 @@ func (c *composer) given(b *trace.Block, g *trace.Given, first bool) {
 	plain := g.Head
 	plain.Ref = clause.Ref{}
 	e := columnsFor(&plain, c.document, nil)
-	w, ok := workedAt(b, g.Axes, len(g.Shown), g.Taken)
+	w, ok := workedLine(b, &g.Line)
 	if !ok {
 		return
 	}

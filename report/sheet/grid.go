@@ -104,13 +104,16 @@ const ascent = 0.74
 // descent is how far it reaches below.
 const descent = 0.23
 
+// bearing is how far a letter such as j may reach left of where its line starts.
+const bearing = 1
+
 // Area is the part of a sheet in which the ink of an owner belongs, for tests that record sheets: the column, head
 // or foot that the first word of the owner names. It is false for an owner that no sheet knows.
 func Area(owner string) (draw.Box, bool) {
 	word, _, _ := strings.Cut(owner, " ")
 	for _, k := range []column{referenceColumn, workColumn, resultColumn, checkColumn, wideColumn, fullColumn} {
 		if k.name == word {
-			return draw.Box{X0: k.x, Y0: bodyTop - 1, X1: k.right, Y1: bodyBottom + 3}, true
+			return draw.Box{X0: k.x - bearing, Y0: bodyTop - 1, X1: k.right, Y1: bodyBottom + 3}, true
 		}
 	}
 	switch word {

@@ -13,7 +13,7 @@ import (
 
 // root sets an unknown: the equation, between what it was solved, and the residual that proves it.
 func (c *composer) root(b *trace.Block, r *trace.Root) {
-	w, ok := workedAt(b, r.Axes, len(r.Shown), r.Taken)
+	w, ok := workedLine(b, &r.Line)
 	if !ok {
 		return
 	}

@@ -84,7 +84,7 @@ func (c *composer) rowsTable(b *trace.Block, axes []*trace.Axis, lines []*trace.
 		t.rows = append(t.rows, rowLabels(down, i))
 	}
 	for _, l := range lines {
-		w, _ := workedAt(b, l.Axes, len(l.Shown), l.Taken)
+		w, _ := workedLine(b, l)
 		for k := range size(across) {
 			p := w.place
 			at := map[string]int{}

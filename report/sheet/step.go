@@ -9,7 +9,7 @@ import (
 
 // step sets one formula: words, symbol = formula = formula with numbers, and the result.
 func (c *composer) step(b *trace.Block, s *trace.Step) {
-	w, ok := workedAt(b, s.Axes, len(s.Shown), s.Taken)
+	w, ok := workedLine(b, &s.Line)
 	if !ok {
 		return // on no row was this branch taken
 	}

@@ -40,6 +40,29 @@ func workedAt(b *trace.Block, axes []*trace.Axis, rows int, taken func(i int) bo
 	return worked{at, 0}, false
 }
 
+// workedLine is workedAt for a line: where the chosen row of its index axes is nothing but zero, the first row at the
+// same place along the member that is not shows more.
+func workedLine(b *trace.Block, l *trace.Line) (worked, bool) {
+	w, ok := workedAt(b, l.Axes, len(l.Shown), l.Taken)
+	if !ok || l.Values[w.flat] != 0 {
+		return w, ok
+	}
+	for i, v := range l.Values {
+		if v == 0 || !l.Taken(i) {
+			continue
+		}
+		at, same := w.place, true
+		for _, q := range trace.PlaceAt(l.Axes, i) {
+			same = same && (q.Axis.Index != "" || q.Row == w.place.Of(q.Axis))
+			at = at.With(q.Axis, q.Row)
+		}
+		if same {
+			return worked{at, i}, true
+		}
+	}
+	return w, ok
+}
+
 // indices are the rows of the index letters at the place.
 func (w worked) indices() map[string]int {
 	out := map[string]int{}
