@@ -107,25 +107,36 @@ func deeperSection(m *member.Member, step int) string {
 	return fmt.Sprintf("depth %s instead of %s, tendons at the same heights, the stated losses kept", m.Shape.Depth, before)
 }
 
-// mends tries each remedy on each failing check until that check passes and nothing else fails that passed.
+// mends tries each remedy, step by step, until every failing check has passed once with nothing else failing.
 func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 	b := c.Block("mends", "What would mend a failing check", nil)
 	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and no other check fails, found by running the whole design again. It is a hint for the engineer, not a design.")
-	for _, k := range failing {
-		found := false
-		for _, r := range remedies {
-			words, ratio := j.try(r, k)
-			if words == "" {
-				continue
+	found := map[string]bool{}
+	for _, r := range remedies {
+		open := failing
+		for step := 1; step <= r.steps && len(open) > 0; step++ {
+			words, n := j.try(r, step)
+			if n == nil {
+				break
 			}
-			found = true
-			id := r.id + "-" + k.Key
-			symbol := fmt.Sprintf("r_%d", len(b.Entries))
-			b.Given(def(keyed(id), symbol, k.Name+": with "+words, ""), quantity.Literal{Number: ratio}, "the design run again; ratio then")
+			var rest []*trace.Check
+			for _, k := range open {
+				again, ok := n.Entry(k.Key).(*trace.Check)
+				if !ok || again.Failed() || !j.noneNew(n) {
+					rest = append(rest, k)
+					continue
+				}
+				found[k.Key] = true
+				symbol := fmt.Sprintf("r_%d", len(b.Entries))
+				b.Given(def(keyed(r.id+"-"+k.Key), symbol, k.Name+": with "+words, ""), quantity.Literal{Number: again.Ratio[again.Worst]}, "the design run again; ratio then")
+			}
+			open = rest
 		}
-		if !found {
-			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: up to %d more tendons in the lowest row or in a further row as far as they fit, f_ck up to 90 MPa, depth up to %d mm more.",
-				k.Name, k.Number, 12, 50*remedies[len(remedies)-1].steps))
+	}
+	for _, k := range failing {
+		if !found[k.Key] {
+			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: more tendons in the lowest row and in a further row as far as they fit, f_ck up to 90 MPa, depth up to %d mm more.",
+				k.Name, k.Number, 50*remedies[len(remedies)-1].steps))
 		}
 	}
 }
@@ -141,25 +152,18 @@ func keyed(key string) string {
 	return string(out)
 }
 
-// try finds the smallest step of a remedy that mends a check, and the ratio it has then.
-func (j *job) try(r remedy, failing *trace.Check) (words, ratio string) {
-	for step := 1; step <= r.steps; step++ {
-		m := *j.m
-		m.Strands.Rows = append([]member.StrandRow(nil), m.Strands.Rows...)
-		words := r.apply(&m, step)
-		if words == "" {
-			return "", ""
-		}
-		n, err := run(&m, true)
-		if err != nil {
-			return "", ""
-		}
-		again, ok := n.Entry(failing.Key).(*trace.Check)
-		if ok && !again.Failed() && j.noneNew(n) {
-			return words, again.Ratio[again.Worst]
-		}
+// try runs the design with one step of a remedy; no record where the step cannot be taken or nothing comes of it.
+func (j *job) try(r remedy, step int) (words string, n *trace.Note) {
+	m := *j.m
+	m.Strands.Rows = append([]member.StrandRow(nil), m.Strands.Rows...)
+	if words = r.apply(&m, step); words == "" {
+		return "", nil
 	}
-	return "", ""
+	n, err := run(&m, true)
+	if err != nil {
+		return "", nil
+	}
+	return words, n
 }
 
 // noneNew says that no check fails that does not fail in the design at hand.
