@@ -1,0 +1,119 @@
+package ec2
+
+import "soffit/calc/clause"
+
+// The rectangular block over the parts of the section, 3.1.7(3).
+
+// BlockDepth is the depth of the block.
+var BlockDepth = clause.Define(&clause.Formula{
+	ID: "block-depth", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ·x", Unit: "mm", Digits: 6,
+	Examples: hand("95.144 mm", "λ = 0.8", "x = 118.93 mm"),
+})
+
+// The block where the top fibre stays below its ultimate strain: its depth and stress factors follow the resultant of
+// the parabola–rectangle at that strain, related to the resultant at the ultimate strain, so that they are λ and η
+// there.
+
+// StrainRatio is the strain of the top fibre over ε_c2.
+var StrainRatio = clause.Define(&clause.Formula{
+	ID: "strain-ratio", Name: "Strain of the top fibre over that at the end of the parabola", Ref: en("3.1.7(1)", "3.17"),
+	Text: "r_c = ε_c/ε_c2", Unit: "", Digits: 6, Examples: hand("0.5", "ε_c = 1 ‰", "ε_c2 = 2 ‰"),
+})
+
+// Fullness is the mean stress of the parabola–rectangle over the compressed depth, as part of f_cd.
+var Fullness = clause.Define(&clause.Formula{
+	ID: "fullness", Name: "Mean stress of the parabola–rectangle over the compressed depth, as part of the design strength", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "α_R = 1 − (1 − max(0; 1 − r_c)^(n + 1))/((n + 1)·r_c)", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "r_c = 1.75", "n = 2"),
+		by("worked by hand: r − r²/3", clause.Own, "0.416667", "r_c = 0.5", "n = 2")},
+})
+
+// ResultantDepth is the depth of the resultant of the parabola–rectangle as part of the compressed depth.
+var ResultantDepth = clause.Define(&clause.Formula{
+	ID: "resultant-depth", Name: "Depth of its resultant, as part of the compressed depth", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "k_a = 1 − (1/2 − (1 − max(0; 1 − r_c)^(n + 1)·(1 + (n + 1)·r_c))/((n + 1)·(n + 2)·r_c^2))/α_R", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "r_c = 1.75", "n = 2", "α_R = 0.8095238"),
+		by("worked by hand: (4 − r)/(12 − 4·r)", clause.Own, "0.35", "r_c = 0.5", "n = 2", "α_R = 0.4166667")},
+})
+
+// FullFullness is α_R at the ultimate strain.
+var FullFullness = clause.Define(&clause.Formula{
+	ID: "full-fullness", Name: "The same mean stress at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "α_Ru = 1 − ε_c2/((n + 1)·ε_cu2)", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2")},
+})
+
+// FullResultantDepth is k_a at the ultimate strain.
+var FullResultantDepth = clause.Define(&clause.Formula{
+	ID: "full-resultant-depth", Name: "The same depth at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	Text: "k_au = 1 − (1/2 − (ε_c2/ε_cu2)^2/((n + 1)·(n + 2)))/α_Ru", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2", "α_Ru = 0.8095238")},
+})
+
+// ReducedDepthFactor is λ where the top fibre is below its ultimate strain.
+var ReducedDepthFactor = clause.Define(&clause.Formula{
+	ID: "reduced-depth-factor", Name: "Depth factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	Text: "λ_c = λ·k_a/k_au", Unit: "", Digits: 6, Examples: hand("0.67313", "λ = 0.8", "k_a = 0.35", "k_au = 0.4159664"),
+})
+
+// ReducedStressFactor is η where the top fibre is below its ultimate strain.
+var ReducedStressFactor = clause.Define(&clause.Formula{
+	ID: "reduced-stress-factor", Name: "Stress factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	Text: "η_c = η·α_R/α_Ru·k_au/k_a", Unit: "", Digits: 6,
+	Examples: hand("0.61172", "η = 1", "α_R = 0.4166667", "α_Ru = 0.8095238", "k_au = 0.4159664", "k_a = 0.35"),
+})
+
+// ReducedBlockDepth is the depth of the block with the reduced factors.
+var ReducedBlockDepth = clause.Define(&clause.Formula{
+	ID: "block-depth-reduced", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ_c·x", Unit: "mm", Digits: 6,
+	Examples: hand("80 mm", "λ_c = 0.67", "x = 119.403 mm"),
+})
+
+// BlockPartDepth is how deep the block reaches into each part.
+var BlockPartDepth = clause.Define(&clause.Formula{
+	ID: "block-part-depth", Name: "Depth of the block within each part",
+	Text: "c_{c,n} = max(0; min(h_{c,n}; a − z_{c,n}))", Unit: "mm", Digits: 6,
+	Examples: hand("20 mm", "h_{c,n} = 60 mm", "a = 120 mm", "z_{c,n} = 100 mm"),
+})
+
+// BlockPartWidth is the width of each part at the lower edge of the block.
+var BlockPartWidth = clause.Define(&clause.Formula{
+	ID: "block-part-width", Name: "Width of each part where the block ends",
+	Text: "b_{c,n} = b_{o,n} + (b_{u,n} − b_{o,n})·c_{c,n}/h_{c,n}", Unit: "mm", Digits: 6,
+	Examples: hand("380 mm", "b_{o,n} = 500 mm", "b_{u,n} = 140 mm", "c_{c,n} = 20 mm", "h_{c,n} = 60 mm"),
+})
+
+// BlockPartArea is the area of the block in each part.
+var BlockPartArea = clause.Define(&clause.Formula{
+	ID: "block-part-area", Name: "Area of the block within each part",
+	Text: "A_{cc,n} = c_{c,n}·(b_{o,n} + b_{c,n})/2", Unit: "mm²", Digits: 6,
+	Examples: hand("8800 mm²", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
+})
+
+// BlockPartDepthOfCentroid is the depth of the centroid of the block's area in each part.
+var BlockPartDepthOfCentroid = clause.Define(&clause.Formula{
+	ID: "block-part-centroid", Name: "Depth of the centroid of that area from the top",
+	Text: "z_{cc,n} = z_{c,n} + c_{c,n}/3·(b_{o,n} + 2·b_{c,n})/(b_{o,n} + b_{c,n})", Unit: "mm", Digits: 6,
+	Examples: hand("109.545 mm", "z_{c,n} = 100 mm", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
+})
+
+// ConcreteForce is F_c.
+var ConcreteForce = clause.Define(&clause.Formula{
+	ID: "concrete-force", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "F_c = η·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
+	Examples: hand("1585.72 kN", "η = 1", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
+})
+
+// ReducedConcreteForce is F_c with the reduced factors.
+var ReducedConcreteForce = clause.Define(&clause.Formula{
+	ID: "concrete-force-reduced", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "F_c = η_c·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
+	Examples: hand("951.43 kN", "η_c = 0.6", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
+})
+
+// ConcreteForceDepth is the depth of F_c.
+var ConcreteForceDepth = clause.Define(&clause.Formula{
+	ID: "concrete-force-depth", Name: "Depth of that force from the top", Ref: en("3.1.7(3) Figure 3.5", ""),
+	Text: "d_c = Σ_n(A_{cc,n}·z_{cc,n})/Σ_n(A_{cc,n})", Unit: "mm", Digits: 6,
+	Examples: hand("47.572 mm", "A_{cc,n} = 47572 mm², 0 mm²", "z_{cc,n} = 47.572 mm, 100 mm"),
+})

@@ -1,0 +1,55 @@
+package ec2
+
+import "soffit/calc/clause"
+
+// Cracks at the ultimate limit state, and what they ask of the tendons.
+
+// BottomStress is the tension of the bottom fibre with the design moment, section uncracked.
+var BottomStress = clause.Define(&clause.Formula{
+	ID: "bottom-stress", Name: "Tension at the bottom with the design moment, section uncracked", Ref: en("8.10.2.3(1)", ""),
+	Text: "σ_b = (M_Ed − M_P)/W_b − P_d/A_c", Unit: "MPa",
+	Examples: hand("8.4904 MPa", "M_Ed = 1279.77 kN·m", "M_P = 474.31 kN·m", "W_b = 68744.3 10³ mm³", "P_d = 840.79 kN", "A_c = 260600 mm²"),
+})
+
+// CrackedAtUltimate asks where the section cracks in bending at the ultimate limit state.
+var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
+	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked", No: "uncracked: anchorage needs no further check"}
+
+// LargestShear is the largest shear force at a station, either side and sign.
+var LargestShear = clause.Define(&clause.Formula{
+	ID: "largest-shear", Name: "Largest shear force at the station", Text: "V_max = max(abs(V_{Ed,l}); abs(V_{Ed,l,min}); abs(V_{Ed,r}); abs(V_{Ed,r,min}))", Unit: "kN", Digits: 6,
+	Examples: hand("9 kN", "V_{Ed,l} = 1 kN", "V_{Ed,l,min} = -9 kN", "V_{Ed,r} = 2 kN", "V_{Ed,r,min} = -8 kN"),
+})
+
+// LeverArm is z of the resistance.
+var LeverArm = clause.Define(&clause.Formula{
+	ID: "lever-arm", Name: "Lever arm of the inner forces", Ref: en("6.2.3(7)", ""), Text: "z = M_Rd/F_c", Unit: "mm",
+	Examples: hand("908.86 mm", "M_Rd = 1507.63 kN·m", "F_c = 1658.82 kN"),
+})
+
+// AddedMoment is the moment equivalent of the tension that shear adds, ΔF_td·z.
+var AddedMoment = clause.Define(&clause.Formula{
+	ID: "added-moment", Name: "Moment equal to the tension that shear adds, vertical links", Ref: en("6.2.3(7)", "6.18"),
+	Text: "ΔM = 0.5·V_max·cot(θ)·z", Unit: "kN·m",
+	Examples: hand("113.61 kN·m", "V_max = 100 kN", "θ = 21.8014 °", "z = 908.86 mm"),
+})
+
+// MomentWithShear is the moment to be resisted with the tension added by shear, at most the largest of the span.
+var MomentWithShear = clause.Define(&clause.Formula{
+	ID: "moment-with-shear", Name: "Moment with the tension that shear adds, at most the largest moment of the span", Ref: en("6.2.3(7)", "6.18"),
+	Text: "M_{Ed,V} = min(M_{Ed,max}; M_Ed + ΔM)", Unit: "kN·m", Digits: 6,
+	Examples: append(hand("900 kN·m", "M_{Ed,max} = 1200 kN·m", "M_Ed = 800 kN·m", "ΔM = 100 kN·m"), hand("850 kN·m", "M_{Ed,max} = 850 kN·m", "M_Ed = 800 kN·m", "ΔM = 100 kN·m")...),
+})
+
+// BendingWithShear is M_Ed,V ≤ M_Rd.
+var BendingWithShear = &clause.Check{ID: "bending-with-shear", Name: "Bending with the tension added by shear", Ref: en("6.2.3(7)", "6.18"),
+	Demand: "M_{Ed,V}", Limit: "M_Rd"}
+
+// LargestMoment is the largest design moment of the span.
+var LargestMoment = clause.Define(&clause.Formula{
+	ID: "largest-moment", Name: "Largest design moment of the span", Text: "M_{Ed,max} = M_Ed", Unit: "kN·m", Digits: 6,
+	Examples: hand("1279.77 kN·m", "M_Ed = 1279.77 kN·m"),
+})
+
+// NoLargerMoment proves M_Ed,max at every station.
+var NoLargerMoment = &clause.Condition{ID: "no-larger-moment", Name: "No station has a larger moment", Text: "M_Ed ≤ M_{Ed,max}", Yes: "not larger", No: "larger"}
