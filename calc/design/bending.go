@@ -10,6 +10,11 @@ import (
 // bending is the resistance of one section, 6.1, at every station at once.
 func (j *job) bending(b *trace.Block) {
 	b.Steps(ec2.PrestressForce, ec2.PrestressMoment, ec2.ConcreteStressAtTendon, ec2.Prestrain)
+	b.Step(ec2.TendonCounts)
+	if j.hasBars() {
+		b.Step(ec2.BarCounts)
+	}
+	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
 	b.Step(pick(j.hasBars(), ec2.LimitForceWithBars, ec2.LimitForce))
 	anchored, bare := b.Choose(ec2.SteelAnchored)
 	b.On(anchored, func() {
@@ -109,13 +114,12 @@ func (j *job) compatible(b *trace.Block) {
 	if j.limited() {
 		b.Text("graded", templates.Text("graded"))
 		b.Steps(ec2.StrainRatio, ec2.Fullness, ec2.ResultantDepth, ec2.FullFullness, ec2.FullResultantDepth)
-		b.Steps(ec2.ReducedDepthFactor, ec2.ReducedStressFactor, ec2.ReducedBlockDepth)
+		b.Steps(ec2.ReducedDepthFactor, ec2.ReducedStressFactor, ec2.ReducedBlockDepth, ec2.ReducedBlockStress)
 	} else {
-		b.Step(ec2.BlockDepth)
+		b.Steps(ec2.BlockDepth, ec2.BlockStress)
 	}
 	b.Steps(ec2.BlockPartDepth, ec2.BlockPartWidth, ec2.BlockPartArea, ec2.BlockPartDepthOfCentroid)
-	b.Step(pick(j.limited(), ec2.ReducedConcreteForce, ec2.ConcreteForce))
-	b.Step(ec2.ConcreteForceDepth)
+	b.Steps(ec2.ConcreteForce, ec2.ConcreteForceDepth)
 	b.Step(pick(j.hasBars(), ec2.ResidualWithBars, ec2.Residual))
 	b.Prove(pick(j.hasBars(), ec2.AxisRootWithBars, ec2.AxisRoot))
 	b.Step(ec2.TendonLever)
@@ -127,19 +131,16 @@ func (j *job) compatible(b *trace.Block) {
 
 // kindOfFailure says what ends the resistance: anchorage, steel or concrete.
 func (j *job) kindOfFailure(b *trace.Block) {
-	b.Step(ec2.TendonCounts)
-	if j.hasBars() {
-		b.Step(ec2.BarCounts)
-	}
-	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
 	there, _ := b.Choose(ec2.TensionSteelThere)
 	b.On(there, func() {
 		b.Step(pick(j.hasBars(), ec2.TensionDepthWithBars, ec2.TensionDepth))
-		b.Step(ec2.AxisRatio)
+		b.Steps(ec2.AxisRatio, ec2.LeastAnchorage)
+		anchored, _ := b.Choose(ec2.EveryRowAnchored)
+		b.On(anchored, func() {
+			b.Steps(ec2.OutermostBonded, ec2.OutermostStrain)
+			b.Decide(ec2.OutermostYields)
+		})
 	})
-	b.Steps(ec2.OutermostBonded, ec2.OutermostAnchorage, ec2.OutermostStrain)
-	anchored, _ := b.Choose(ec2.OutermostAnchored)
-	b.On(anchored, func() { b.Decide(ec2.OutermostYields) })
 	if j.limited() {
 		b.Decide(ec2.ConcreteCrushes)
 	}
@@ -157,7 +158,7 @@ func (j *job) bendingFigures(b *trace.Block) {
 	at := j.stations.Rows[b.Row]
 	plots := []trace.Plot{{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"}, {Role: "upper", Key: "given.section/part-upper"},
 		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b)}, {Role: "block-depth", Key: pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID},
-		{Role: "block-stress", Key: "materials.concrete/design-strength"}, {Role: "block-force", Key: j.concreteForceID()}, {Role: "block-centroid", Key: "concrete-force-depth"},
+		{Role: "block-stress", Key: pick(j.limited(), ec2.ReducedBlockStress, ec2.BlockStress).ID}, {Role: "block-force", Key: "concrete-force"}, {Role: "block-centroid", Key: "concrete-force-depth"},
 		{Role: "strain-top", Key: "top-strain"}, {Role: "depth", Key: "section.positions/tendon-depth"}, {Role: "prestrain", Key: "prestrain"},
 		{Role: "count", Key: "given.tendons/count"}, {Role: "spacing", Key: "given.tendons/spacing"}, {Role: "diameter", Key: "given.tendons/diameter"},
 		{Role: "strain", Key: "tendon-strain"}, {Role: "force", Key: "tendon-force"}, {Role: "lever", Key: "tendon-lever"},
@@ -173,12 +174,7 @@ func (j *job) bendingFigures(b *trace.Block) {
 		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "demand", Key: "actions.ultimate/moment"}, trace.Plot{Role: "resistance", Key: resistance},
 		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"})
 	b.Table("strains", "Strains and stresses of the rows along the span", j.stations, "actions.effects/position", "prestrain", "prestress.along/available-stress", j.curvature().ID, "tendon-strain", "tendon-stress"+pick(j.inclined(), "-inclined", ""))
-	b.Table("along", "Bending along the span", j.stations, "actions.effects/position", pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID, j.concreteForceID(), "concrete-force-depth", "actions.ultimate/moment", resistance, "bending-sufficient")
-}
-
-// concreteForceID is the ID of the formula that gives F_c.
-func (j *job) concreteForceID() string {
-	return pick(j.limited(), ec2.ReducedConcreteForce, ec2.ConcreteForce).ID
+	b.Table("along", "Bending along the span", j.stations, "actions.effects/position", pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID, "concrete-force", "concrete-force-depth", "actions.ultimate/moment", resistance, "bending-sufficient")
 }
 
 // resistanceID is the ID of the formula that gives M_Rd.

@@ -41,13 +41,13 @@ func (j *job) largest(key string) string {
 const linkAngle = "21.8"
 
 // cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
-// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and the failure must announce itself (5.10.1(5)P).
+// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and failure must announce itself when the load grows (5.10.1(5)P).
 func (j *job) cracked(c *trace.Chapter) {
 	at := j.largest("actions.ultimate/moment")
 	most := c.Block("largest-moment", "Largest moment of the span, "+at, nil, trace.At(j.ultimate, at))
 	most.Step(ec2.LargestMoment)
 
-	takes := trace.Take(j.parameters, j.strengths, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.frequent, j.along, j.resistance, most)
+	takes := trace.Take(j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.along, j.resistance, most)
 	b := c.Block("cracked", "Where the section cracks at the ultimate limit state", j.stations, takes...)
 	b.Row = j.resistance.Row
 	b.Text("cracked", templates.Text("cracked"))
@@ -56,17 +56,15 @@ func (j *job) cracked(c *trace.Chapter) {
 	b.Step(ec2.BottomStress)
 	cracked, _ := b.Choose(ec2.CrackedAtUltimate)
 	b.On(cracked, func() {
-		b.Steps(ec2.LargestShear, ec2.LeverArm, ec2.AddedMoment, ec2.MomentWithShear)
+		b.Step(ec2.LargestShear)
+		there, none := b.Choose(ec2.TensionSteelThere)
+		b.On(there, func() { b.Step(ec2.LeverArm) })
+		b.On(none, func() { b.Step(ec2.LeverArmOfDepth) })
+		b.Steps(ec2.AddedMoment, ec2.MomentWithShear)
 		b.Check(ec2.BendingWithShear)
 		b.Text("warning", templates.Text("warning"))
 		b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
 		b.Check(ec2.FailureWithWarning)
-		b.Step(ec2.RemainingShare)
-		cracks, _ := b.Choose(ec2.CracksWhenTendonsFail)
-		b.On(cracks, func() {
-			b.Step(ec2.RemainingResistance)
-			b.Check(ec2.WarningWhenTendonsFail)
-		})
 	})
 }
 
@@ -78,6 +76,7 @@ func (j *job) steelLimits(c *trace.Chapter) {
 	}
 	b := c.Block("steel-limits", "Minimum and maximum steel", j.stations, takes...)
 	b.Row = j.resistance.Row
+	b.Text("minimum", templates.Text("minimum"))
 	strength, source := plain("500", "MPa"), "no bars: a usual strength to express the minimum in; it cancels but in 0.0013·b_t·d"
 	if j.hasBars() {
 		r := j.m.Bars.Rows[0]

@@ -110,7 +110,7 @@ func deeperSection(m *member.Member, step int) string {
 // mends tries each remedy, step by step, until every failing check has passed once with nothing else failing.
 func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 	b := c.Block("mends", "What would mend a failing check", nil)
-	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and no other check fails, found by running the whole design again. It is a hint for the engineer, not a design.")
+	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and none fails that passed before, found by running the whole design again. It is a hint for the engineer, not a design.")
 	found := map[string]bool{}
 	for _, r := range remedies {
 		open := failing

@@ -4,6 +4,9 @@ import "soffit/calc/clause"
 
 // The rectangular block over the parts of the section, 3.1.7(3).
 
+// own317 marks what is derived here from the parabola–rectangle of 3.1.7(1): the code has no such rule.
+var own317 = clause.Ref{Document: Code, Clause: "own derivation from 3.1.7(1)"}
+
 // BlockDepth is the depth of the block.
 var BlockDepth = clause.Define(&clause.Formula{
 	ID: "block-depth", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ·x", Unit: "mm", Digits: 6,
@@ -16,13 +19,13 @@ var BlockDepth = clause.Define(&clause.Formula{
 
 // StrainRatio is the strain of the top fibre over ε_c2.
 var StrainRatio = clause.Define(&clause.Formula{
-	ID: "strain-ratio", Name: "Strain of the top fibre over that at the end of the parabola", Ref: en("3.1.7(1)", "3.17"),
+	ID: "strain-ratio", Name: "Strain of the top fibre over that at the end of the parabola", Ref: own317,
 	Text: "r_c = ε_c/ε_c2", Unit: "", Digits: 6, Examples: hand("0.5", "ε_c = 1 ‰", "ε_c2 = 2 ‰"),
 })
 
 // Fullness is the mean stress of the parabola–rectangle over the compressed depth, as part of f_cd.
 var Fullness = clause.Define(&clause.Formula{
-	ID: "fullness", Name: "Mean stress of the parabola–rectangle over the compressed depth, as part of the design strength", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	ID: "fullness", Name: "Mean stress of the parabola–rectangle over the compressed depth, as part of the design strength", Ref: own317,
 	Text: "α_R = 1 − (1 − max(0; 1 − r_c)^(n + 1))/((n + 1)·r_c)", Unit: "", Digits: 6,
 	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "r_c = 1.75", "n = 2"),
 		by("worked by hand: r − r²/3", clause.Own, "0.416667", "r_c = 0.5", "n = 2")},
@@ -30,7 +33,7 @@ var Fullness = clause.Define(&clause.Formula{
 
 // ResultantDepth is the depth of the resultant of the parabola–rectangle as part of the compressed depth.
 var ResultantDepth = clause.Define(&clause.Formula{
-	ID: "resultant-depth", Name: "Depth of its resultant, as part of the compressed depth", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	ID: "resultant-depth", Name: "Depth of its resultant, as part of the compressed depth", Ref: own317,
 	Text: "k_a = 1 − (1/2 − (1 − max(0; 1 − r_c)^(n + 1)·(1 + (n + 1)·r_c))/((n + 1)·(n + 2)·r_c^2))/α_R", Unit: "", Digits: 6,
 	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "r_c = 1.75", "n = 2", "α_R = 0.8095238"),
 		by("worked by hand: (4 − r)/(12 − 4·r)", clause.Own, "0.35", "r_c = 0.5", "n = 2", "α_R = 0.4166667")},
@@ -38,34 +41,34 @@ var ResultantDepth = clause.Define(&clause.Formula{
 
 // FullFullness is α_R at the ultimate strain.
 var FullFullness = clause.Define(&clause.Formula{
-	ID: "full-fullness", Name: "The same mean stress at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	ID: "full-fullness", Name: "The same mean stress at the ultimate strain", Ref: own317,
 	Text: "α_Ru = 1 − ε_c2/((n + 1)·ε_cu2)", Unit: "", Digits: 6,
 	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2")},
 })
 
 // FullResultantDepth is k_a at the ultimate strain.
 var FullResultantDepth = clause.Define(&clause.Formula{
-	ID: "full-resultant-depth", Name: "The same depth at the ultimate strain", Ref: en("3.1.7(1)", "3.17, 3.18"),
+	ID: "full-resultant-depth", Name: "The same depth at the ultimate strain", Ref: own317,
 	Text: "k_au = 1 − (1/2 − (ε_c2/ε_cu2)^2/((n + 1)·(n + 2)))/α_Ru", Unit: "", Digits: 6,
 	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "ε_c2 = 2 ‰", "ε_cu2 = 3.5 ‰", "n = 2", "α_Ru = 0.8095238")},
 })
 
 // ReducedDepthFactor is λ where the top fibre is below its ultimate strain.
 var ReducedDepthFactor = clause.Define(&clause.Formula{
-	ID: "reduced-depth-factor", Name: "Depth factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	ID: "reduced-depth-factor", Name: "Depth factor of the block at that strain", Ref: own317,
 	Text: "λ_c = λ·k_a/k_au", Unit: "", Digits: 6, Examples: hand("0.67313", "λ = 0.8", "k_a = 0.35", "k_au = 0.4159664"),
 })
 
 // ReducedStressFactor is η where the top fibre is below its ultimate strain.
 var ReducedStressFactor = clause.Define(&clause.Formula{
-	ID: "reduced-stress-factor", Name: "Stress factor of the block at that strain", Ref: en("3.1.7(3)", ""),
+	ID: "reduced-stress-factor", Name: "Stress factor of the block at that strain", Ref: own317,
 	Text: "η_c = η·α_R/α_Ru·k_au/k_a", Unit: "", Digits: 6,
 	Examples: hand("0.61172", "η = 1", "α_R = 0.4166667", "α_Ru = 0.8095238", "k_au = 0.4159664", "k_a = 0.35"),
 })
 
 // ReducedBlockDepth is the depth of the block with the reduced factors.
 var ReducedBlockDepth = clause.Define(&clause.Formula{
-	ID: "block-depth-reduced", Name: "Depth of the rectangular block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "a = λ_c·x", Unit: "mm", Digits: 6,
+	ID: "block-depth-reduced", Name: "Depth of the rectangular block", Ref: own317, Text: "a = λ_c·x", Unit: "mm", Digits: 6,
 	Examples: hand("80 mm", "λ_c = 0.67", "x = 119.403 mm"),
 })
 
@@ -97,18 +100,19 @@ var BlockPartDepthOfCentroid = clause.Define(&clause.Formula{
 	Examples: hand("109.545 mm", "z_{c,n} = 100 mm", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
 })
 
+// BlockStress and ReducedBlockStress are the stress of the block.
+var (
+	BlockStress = clause.Define(&clause.Formula{ID: "block-stress", Name: "Stress of the block", Ref: en("3.1.7(3) Figure 3.5", ""), Text: "f_cb = η·f_cd", Unit: "MPa",
+		Examples: hand("30 MPa", "η = 1", "f_cd = 30 MPa")})
+	ReducedBlockStress = clause.Define(&clause.Formula{ID: "block-stress-reduced", Name: "Stress of the block", Ref: own317, Text: "f_cb = η_c·f_cd", Unit: "MPa",
+		Examples: hand("27.84 MPa", "η_c = 0.928", "f_cd = 30 MPa")})
+)
+
 // ConcreteForce is F_c.
 var ConcreteForce = clause.Define(&clause.Formula{
 	ID: "concrete-force", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "F_c = η·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
-	Examples: hand("1585.72 kN", "η = 1", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
-})
-
-// ReducedConcreteForce is F_c with the reduced factors.
-var ReducedConcreteForce = clause.Define(&clause.Formula{
-	ID: "concrete-force-reduced", Name: "Force of the block", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "F_c = η_c·f_cd·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
-	Examples: hand("951.43 kN", "η_c = 0.6", "f_cd = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
+	Text: "F_c = f_cb·Σ_n(A_{cc,n})", Unit: "kN", Digits: 6,
+	Examples: hand("1585.72 kN", "f_cb = 33.333 MPa", "A_{cc,n} = 47572 mm², 0 mm²"),
 })
 
 // ConcreteForceDepth is the depth of F_c.

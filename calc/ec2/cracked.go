@@ -13,7 +13,7 @@ var BottomStress = clause.Define(&clause.Formula{
 
 // CrackedAtUltimate asks where the section cracks in bending at the ultimate limit state.
 var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
-	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked", No: "uncracked: anchorage needs no further check"}
+	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage for bending cracks"}
 
 // LargestShear is the largest shear force at a station, either side and sign.
 var LargestShear = clause.Define(&clause.Formula{
@@ -21,10 +21,16 @@ var LargestShear = clause.Define(&clause.Formula{
 	Examples: hand("9 kN", "V_{Ed,l} = 1 kN", "V_{Ed,l,min} = -9 kN", "V_{Ed,r} = 2 kN", "V_{Ed,r,min} = -8 kN"),
 })
 
-// LeverArm is z of the resistance.
+// LeverArm is z of the tension chord.
 var LeverArm = clause.Define(&clause.Formula{
-	ID: "lever-arm", Name: "Lever arm of the inner forces", Ref: en("6.2.3(7)", ""), Text: "z = M_Rd/F_c", Unit: "mm",
-	Examples: hand("908.86 mm", "M_Rd = 1507.63 kN·m", "F_c = 1658.82 kN"),
+	ID: "lever-arm", Name: "Lever arm of the tension steel", Ref: en("6.2.3(7)", ""), Text: "z = d − d_c", Unit: "mm",
+	Examples: hand("951.82 mm", "d = 1025 mm", "d_c = 73.18 mm"),
+})
+
+// LeverArmOfDepth bounds z where no tension steel is bonded.
+var LeverArmOfDepth = clause.Define(&clause.Formula{
+	ID: "lever-arm-of-depth", Name: "Lever arm, no tension steel being bonded here: not more than the depth", Ref: en("6.2.3(7)", ""), Text: "z = h", Unit: "mm",
+	Examples: hand("1100 mm", "h = 1100 mm"),
 })
 
 // AddedMoment is the moment equivalent of the tension that shear adds, ΔF_td·z.

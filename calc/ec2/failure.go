@@ -17,10 +17,10 @@ var (
 // TensionSteelForce is the design force of the steel that counts: without any there is no effective depth.
 var TensionSteelForceWithBars, TensionSteelForce = steelSums(
 	&clause.Formula{ID: "tension-steel-force-with-bars", Name: "Design force of the steel below the centroid that is bonded here", Ref: en(compatible, ""),
-		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i}) + Σ_j(t_{s,j}·A_{s,j}·f_{yd,j})", Unit: "kN",
+		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i}) + Σ_j(t_{s,j}·A_{s,j}·f_{yd,j})", Unit: "kN", Digits: 7,
 		Examples: hand("200 kN", "t_{p,i} = 1, 0", "A_{p,i} = 100 mm², 50 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa", "t_{s,j} = 1", "A_{s,j} = 250 mm²", "f_{yd,j} = 400 MPa")},
 	&clause.Formula{ID: "tension-steel-force", Name: "Design force of the rows below the centroid that are bonded here", Ref: en(compatible, ""),
-		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i})", Unit: "kN",
+		Text: "F_t = Σ_i(t_{p,i}·A_{p,i}·f_{pd,i})", Unit: "kN", Digits: 7,
 		Examples: hand("100 kN", "t_{p,i} = 1, 0", "A_{p,i} = 100 mm², 300 mm²", "f_{pd,i} = 1000 MPa, 1000 MPa")})
 
 // TensionDepth is the effective depth, to the steel that counts, weighed by its design force.
@@ -50,25 +50,25 @@ var OutermostBonded = clause.Define(&clause.Formula{
 	Examples: hand("1090 mm", "d_{p,i} = 1140 mm, 1090 mm", "s_i = 0 m, 2 m"),
 })
 
-// OutermostAnchorage is the part of its design strength that the outermost bonded row can anchor.
-var OutermostAnchorage = clause.Define(&clause.Formula{
-	ID: "outermost-anchorage", Name: "Part of its design strength that this row can anchor", Ref: en("8.10.2.3(5)", ""),
-	Text: "r_a = max_i(cases(d_{p,i} = d_o: σ_{av,i}/f_{pd,i}; otherwise: 0))", Unit: "", Digits: 4,
-	Examples: hand("0.5", "d_{p,i} = 1140 mm, 1090 mm", "d_o = 1140 mm", "σ_{av,i} = 700 MPa, 1400 MPa", "f_{pd,i} = 1400 MPa, 1400 MPa"),
+// LeastAnchorage is the least part of its design strength that a row of tendons that counts can anchor.
+var LeastAnchorage = clause.Define(&clause.Formula{
+	ID: "least-anchorage", Name: "Least part of its design strength that a row which counts can anchor here", Ref: en("8.10.2.3(5)", ""),
+	Text: "r_a = min_i(cases(t_{p,i} = 1: σ_{av,i}/f_{pd,i}; otherwise: 1))", Unit: "", Digits: 4,
+	Examples: hand("0.5", "t_{p,i} = 1, 1, 0", "σ_{av,i} = 1400 MPa, 700 MPa, 0 MPa", "f_{pd,i} = 1400 MPa, 1400 MPa, 1400 MPa"),
 })
 
 // OutermostStrain is the strain of the outermost bonded row over its yield strain.
 var OutermostStrain = clause.Define(&clause.Formula{
-	ID: "outermost-strain", Name: "Strain of this row over its strain at the design strength", Ref: en("5.10.1(5)P", ""),
+	ID: "outermost-strain", Name: "Strain of this row over that at its design strength", Ref: en("5.10.1(5)P", ""),
 	Text: "r_y = max_i(cases(d_{p,i} = d_o: ε_{p,i}/ε_{py,i}; otherwise: 0))", Unit: "", Digits: 4,
 	Examples: hand("3.5", "d_{p,i} = 1140 mm, 1090 mm", "d_o = 1140 mm", "ε_{p,i} = 24.5 ‰, 20 ‰", "ε_{py,i} = 7 ‰, 7 ‰"),
 })
 
-// OutermostAnchored asks whether anchorage or strength limits the outermost row.
-var OutermostAnchored = &clause.Condition{
-	ID: "outermost-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "r_a ≥ 1",
-	Yes: "the outermost row can be anchored up to its design strength",
-	No:  "anchorage limits the outermost row: its bond fails before it yields, without warning",
+// EveryRowAnchored asks whether anchorage or strength limits the rows.
+var EveryRowAnchored = &clause.Condition{
+	ID: "every-row-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "r_a ≥ 1",
+	Yes: "every row that counts can be anchored up to its design strength",
+	No:  "anchorage limits a row: its bond fails before it yields",
 }
 
 // OutermostYields asks whether the outermost row yields before the section fails.

@@ -23,5 +23,5 @@ var Hogging = &clause.Condition{ID: "hogging", Name: "Sign of the least moment",
 	Yes: "hogging", No: "no hogging"}
 
 // HoggingResisted is σ_ct ≤ f_ctd,pl.
-var HoggingResisted = &clause.Check{ID: "hogging-resisted", Name: "Hogging of the loads alone, plain concrete", Ref: en("12.3.1(2)", "12.1"),
+var HoggingResisted = &clause.Check{ID: "hogging-resisted", Name: "Hogging of the loads alone (no prestress), plain concrete", Ref: en("12.3.1(2)", "12.1"),
 	Demand: "σ_ct", Limit: "f_{ctd,pl}"}

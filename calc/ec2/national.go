@@ -31,7 +31,6 @@ func number(id, symbol, ascii, name, value string, lo, hi float64, ref clause.Re
 var Parameters = []Parameter{
 	number("partial-factor-concrete", "γ_C", "gamma_C", "Partial factor for concrete", "1.5", 1, 2, en("2.4.2.4 Table 2.1N", "")),
 	number("partial-factor-steel", "γ_S", "gamma_S", "Partial factor for reinforcing and prestressing steel", "1.15", 1, 1.5, en("2.4.2.4 Table 2.1N", "")),
-	number("partial-factor-steel-accidental", "γ_{S,acc}", "gamma_S,acc", "The same in accidental situations, for the tendons left when others are lost", "1.0", 1, 1.5, en("2.4.2.4 Table 2.1N", "")),
 	number("long-term-compression", "α_cc", "alpha_cc", "Coefficient for long-term effects on the compressive strength", "1.0", 0.8, 1, en("3.1.6(1)P", "")),
 	number("long-term-tension", "α_ct", "alpha_ct", "Coefficient for long-term effects on the tensile strength", "1.0", 0.7, 1, en("3.1.6(2)P", "")),
 	number("plain-tension", "α_{ct,pl}", "alpha_ct,pl", "Coefficient on the tensile strength of plain concrete", "0.8", 0.5, 1, en("12.3.1(1)", "")),
