@@ -93,7 +93,6 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 
 	b := c.Block("loads", "Loads and reactions", nil, trace.Take(j.gross, j.span, j.spanLength, j.actionData)...)
 	j.reactions = b
-	j.narrative(b, "actions")
 	b.Text("loads", templates.Text("loads"))
 	b.Steps(mechanics.Load, mechanics.ReactionB, mechanics.ReactionA)
 

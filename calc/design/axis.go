@@ -1,6 +1,8 @@
 package design
 
 import (
+	"errors"
+	"fmt"
 	"math"
 
 	"soffit/calc/bending"
@@ -22,8 +24,17 @@ func (j *job) neutralAxis() func(*trace.Row) (trace.Proposal, error) {
 		} else {
 			axis, err = beam.NeutralAxis(block, layers)
 		}
-		return trace.Proposal{X: axis.X, Lo: axis.Lo, Hi: axis.Hi}, err
+		return trace.Proposal{X: axis.X, Lo: axis.Lo, Hi: axis.Hi}, inWords(err)
 	}
+}
+
+// inWords says of a section without a neutral axis what an engineer can do about it.
+func inWords(err error) error {
+	var r *bending.Refusal
+	if errors.As(err, &r) && r.Reason == bending.WhollyCompressed {
+		return fmt.Errorf("the steel pulls with %.0f kN where the whole section in compression gives %.0f kN at most: take out tendons, or enlarge the section", r.Have/1e3, r.Limit/1e3)
+	}
+	return err
 }
 
 // parabola is the parabola–rectangle law at a station.

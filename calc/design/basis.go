@@ -15,7 +15,6 @@ import (
 // basisChapter states what the design rests on: the code, every national parameter, assumptions and limits.
 func (j *job) basisChapter(c *trace.Chapter) {
 	b := c.Block("code", "Code and situation", nil)
-	j.narrative(b, "basis")
 	s := &j.m.Basis
 	b.Text("code", fmt.Sprintf("Code: %s, with EN 1990. Combination of actions at the ultimate limit state: %s. Consequence class %s; "+
 		"supervision of the design %s; design working life %s.%s\n\nThe clause and equation numbers were recalled, not checked against "+
@@ -39,14 +38,6 @@ func exposures(list []member.Word) string {
 		words[i] = w.Text
 	}
 	return " Exposure: " + strings.Join(words, ", ") + "."
-}
-
-func (j *job) narrative(b *trace.Block, slot string) {
-	for _, p := range j.m.Narrative {
-		if p.Slot == slot {
-			b.Text("narrative", p.Text)
-		}
-	}
 }
 
 // nationalParameters lists every parameter with its value and source. Expressions are listed in words here and

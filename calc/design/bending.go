@@ -21,8 +21,12 @@ func (j *job) bending(b *trace.Block) {
 		b.On(j.trial(b), func() {
 			b.Root(pick(j.hasBars(), ec2.AxisRootWithBars, ec2.AxisRoot), j.neutralAxis())
 		})
-		j.compatible(b)
-		j.kindOfFailure(b)
+		partly, wholly := b.Choose(ec2.PartlyCompressed)
+		b.On(wholly, func() { b.Step(ec2.NoResistanceCompressed) })
+		b.On(partly, func() {
+			j.compatible(b)
+			j.kindOfFailure(b)
+		})
 	})
 	b.On(bare, func() { b.Step(ec2.NoResistance) })
 	b.Check(ec2.BendingSufficient)
@@ -113,7 +117,7 @@ func (j *job) compatible(b *trace.Block) {
 	}
 	if j.limited() {
 		b.Text("graded", templates.Text("graded"))
-		b.Steps(ec2.StrainRatio, ec2.Fullness, ec2.ResultantDepth, ec2.FullFullness, ec2.FullResultantDepth)
+		b.Steps(ec2.StrainRatio, ec2.ParabolaRest, ec2.Fullness, ec2.ParabolaMoment, ec2.ResultantDepth, ec2.FullFullness, ec2.FullResultantDepth)
 		b.Steps(ec2.ReducedDepthFactor, ec2.ReducedStressFactor, ec2.ReducedBlockDepth, ec2.ReducedBlockStress)
 	} else {
 		b.Steps(ec2.BlockDepth, ec2.BlockStress)
@@ -173,7 +177,7 @@ func (j *job) bendingFigures(b *trace.Block) {
 	b.Figure("envelope", "resistance", "Design moment and moment resistance along the span.", "",
 		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "demand", Key: "actions.ultimate/moment"}, trace.Plot{Role: "resistance", Key: resistance},
 		trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"})
-	b.Table("strains", "Strains and stresses of the rows along the span", j.stations, "actions.effects/position", "prestrain", "prestress.along/available-stress", j.curvature().ID, "tendon-strain", "tendon-stress"+pick(j.inclined(), "-inclined", ""))
+	b.Table("strains", "Strains and stresses of the rows along the span", j.stations, "actions.effects/position", j.curvature().ID, "tendon-strain", "tendon-stress"+pick(j.inclined(), "-inclined", ""))
 	b.Table("along", "Bending along the span", j.stations, "actions.effects/position", pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID, "concrete-force", "concrete-force-depth", "actions.ultimate/moment", resistance, "bending-sufficient")
 }
 

@@ -23,4 +23,5 @@ func (j *job) contents() {
 	j.ultimateChapter(ultimate)
 	j.secondChapter(second)
 	j.verdictChapter(verdict)
+	j.narratives()
 }

@@ -4,9 +4,12 @@ package design
 
 import (
 	"fmt"
+	"slices"
 	"strconv"
+	"strings"
 
 	"soffit/calc/clause"
+	"soffit/calc/diag"
 	"soffit/calc/member"
 	"soffit/calc/quantity"
 	"soffit/calc/section"
@@ -32,6 +35,8 @@ type job struct {
 	form  form           // the shape as a stack of parts
 	shape section.Shape  // the same for the kernels
 
+	findings diag.List // in what only the finished design can judge
+
 	trying bool // a remedy is being tried: no further ones
 }
 
@@ -48,6 +53,9 @@ func run(m *member.Member, trying bool) (*trace.Note, error) {
 	j.contents()
 	if err := j.n.Err(); err != nil {
 		return nil, fmt.Errorf("%s: %w", m.File, err)
+	}
+	if err := j.findings.Err(); err != nil {
+		return nil, err
 	}
 	return j.n, nil
 }
@@ -79,6 +87,23 @@ func origin(o member.Origin) string {
 		return "member file, line " + strconv.Itoa(o.Pos.Line)
 	}
 	return "default: " + o.Why
+}
+
+// lines says from which lines of the member file a column comes.
+func lines(origins ...member.Origin) string {
+	var list []string
+	for _, o := range origins {
+		if n := strconv.Itoa(o.Pos.Line); o.Given && !slices.Contains(list, n) {
+			list = append(list, n)
+		}
+	}
+	switch len(list) {
+	case 0:
+		return "default"
+	case 1:
+		return "member file, line " + list[0]
+	}
+	return "member file, lines " + strings.Join(list, ", ")
 }
 
 // plain is a number without unit, with a unit: values that the program itself puts in.

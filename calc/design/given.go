@@ -29,7 +29,6 @@ func (j *job) givenChapter(c *trace.Chapter) {
 func (j *job) givenConcrete(c *trace.Chapter) {
 	b := c.Block("concrete", "Concrete", nil)
 	j.concrete = b
-	j.narrative(b, "given")
 	m := &j.m.Concrete
 	b.Given(def("strength", "f_ck", "Characteristic cylinder strength at 28 days", "MPa"), m.Fck.Literal, given(m.Fck))
 	b.Given(def("strength-at-release", "f_ck(t)", "Characteristic strength asked for at release", "MPa"), m.FckAtRelease.Literal, given(m.FckAtRelease))
@@ -42,14 +41,15 @@ func (j *job) givenSection(c *trace.Chapter) {
 	b := c.Block("section", "Concrete section", nil)
 	j.section = b
 	s, f := &j.m.Shape, &j.form
-	line := "member file, line " + fmt.Sprint(s.Pos.Line)
+	line := lines(s.Width.Origin, s.FlangeWidth.Origin, s.FlangeDepth.Origin, s.HaunchDepth.Origin, s.TopFlange.Width.Origin, s.TopFlange.Depth.Origin, s.TopFlange.HaunchDepth.Origin, s.WebWidth.Origin,
+		s.BottomFlange.Width.Origin, s.BottomFlange.Depth.Origin, s.BottomFlange.HaunchDepth.Origin, s.Depth.Origin)
 	b.Given(def("depth", "h", "Overall depth", "mm"), s.Depth.Literal, given(s.Depth))
-	b.Given(def("top-width", "b_f", "Width at the top", "mm"), f.flange, line)
-	b.Given(def("top-depth", "h_f", "Depth over which the top has this width", "mm"), f.flangeDepth, line)
+	b.Given(def("top-width", "b_f", "Width at the top", "mm"), f.flange, lines(s.Width.Origin, s.FlangeWidth.Origin, s.TopFlange.Width.Origin))
+	b.Given(def("top-depth", "h_f", "Depth over which the top has this width", "mm"), f.flangeDepth, lines(pick(s.Kind.Text == "rectangle", s.Depth.Origin, member.Origin{}), s.FlangeDepth.Origin, s.TopFlange.Depth.Origin))
 	if s.Kind.Text != "rectangle" {
-		b.Given(def("haunch-depth", "h_h", "Depth of the haunch below it", "mm"), f.haunch, line)
-		b.Given(def("web-width", "b_w", "Width of the web", "mm"), f.web, line)
-		b.Given(def("web-end", "z_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, line)
+		b.Given(def("haunch-depth", "h_h", "Depth of the haunch below it", "mm"), f.haunch, lines(s.HaunchDepth.Origin, s.TopFlange.HaunchDepth.Origin))
+		b.Given(def("web-width", "b_w", "Width of the web", "mm"), f.web, lines(s.WebWidth.Origin))
+		b.Given(def("web-end", "z_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, lines(s.Depth.Origin, s.BottomFlange.Depth.Origin, s.BottomFlange.HaunchDepth.Origin))
 	}
 	j.parts = j.n.Axis("part", "part of the section, from the soffit up", "n", f.names)
 	j.parts.Work = len(f.names) - 1 // the top, which is compressed
@@ -122,7 +122,13 @@ func (j *job) givenTendons(c *trace.Chapter) {
 		}
 	}
 	j.rows = j.n.Axis("tendon row", "row of tendons", "i", names)
-	line := fmt.Sprintf("member file, line %d", j.m.Strands.Pos.Line)
+	from := func(f func(*member.StrandRow) member.Origin) string {
+		var out []member.Origin
+		for _, r := range rows {
+			out = append(out, f(r.row))
+		}
+		return lines(out...)
+	}
 	column := func(id, symbol, name, unit, source string, f func(tendon) quantity.Literal, where ...string) {
 		g := def(id, symbol, name, unit)
 		if len(where) > 0 {
@@ -130,21 +136,21 @@ func (j *job) givenTendons(c *trace.Chapter) {
 		}
 		b.GivenRows(g, j.rows, each(rows, f), source)
 	}
-	column("count", "n_{p,i}", "Number", "", line, func(t tendon) quantity.Literal { return whole(t.row.Count.N) })
-	column("spacing", "s_{p,i}", "Spacing between axes", "mm", line, func(t tendon) quantity.Literal { return t.row.Spacing.Literal })
-	column("level", "y_{p,i}", "Height of the axes above the soffit", "mm", line, func(t tendon) quantity.Literal { return t.row.Height.Literal })
-	column("debonded-length", "l_{db,i}", "Debonded length from each end", "mm", line, func(t tendon) quantity.Literal { return t.row.DebondedLength.Literal })
-	column("diameter", "φ_{p,i}", "Nominal diameter", "mm", "product", func(t tendon) quantity.Literal { return t.diameter })
-	column("area-of-one", "A_{p1,i}", "Area of one", "mm²", "product", func(t tendon) quantity.Literal { return t.area })
-	column("tensile-strength", "f_{pk,i}", "Characteristic tensile strength", "MPa", "product", func(t tendon) quantity.Literal { return t.fpk })
-	column("proof-force", "F_{p0,1,i}", "0.1 % proof force of one", "kN", "product", func(t tendon) quantity.Literal { return t.proof })
-	column("modulus", "E_{p,i}", "Modulus of elasticity", "GPa", "product", func(t tendon) quantity.Literal { return t.ep }, "3.3.6(2), (3)")
+	column("count", "n_{p,i}", "Number of tendons in the row", "", from(func(r *member.StrandRow) member.Origin { return r.Count.Origin }), func(t tendon) quantity.Literal { return whole(t.row.Count.N) })
+	column("spacing", "s_{p,i}", "Spacing of the tendons between axes", "mm", from(func(r *member.StrandRow) member.Origin { return r.Spacing.Origin }), func(t tendon) quantity.Literal { return t.row.Spacing.Literal })
+	column("level", "y_{p,i}", "Height of the tendons' axes above the soffit", "mm", from(func(r *member.StrandRow) member.Origin { return r.Height.Origin }), func(t tendon) quantity.Literal { return t.row.Height.Literal })
+	column("debonded-length", "l_{db,i}", "Debonded length from each end", "mm", from(func(r *member.StrandRow) member.Origin { return r.DebondedLength.Origin }), func(t tendon) quantity.Literal { return t.row.DebondedLength.Literal })
+	column("diameter", "φ_{p,i}", "Nominal diameter of one tendon", "mm", "product", func(t tendon) quantity.Literal { return t.diameter })
+	column("area-of-one", "A_{p1,i}", "Area of one tendon", "mm²", "product", func(t tendon) quantity.Literal { return t.area })
+	column("tensile-strength", "f_{pk,i}", "Characteristic tensile strength of the tendons", "MPa", "product", func(t tendon) quantity.Literal { return t.fpk })
+	column("proof-force", "F_{p0,1,i}", "0.1 % proof force of one tendon", "kN", "product", func(t tendon) quantity.Literal { return t.proof })
+	column("modulus", "E_{p,i}", "Modulus of elasticity of the tendons", "GPa", "product", func(t tendon) quantity.Literal { return t.ep }, "3.3.6(2), (3)")
 	if j.inclined() {
 		column("ultimate-strain", "ε_{puk,i}", "Characteristic strain at maximum force", "‰", "product", func(t tendon) quantity.Literal { return t.ultimate })
 	}
-	column("jacking-stress", "σ_{p,max,i}", "Stress at jacking", "MPa", line, func(t tendon) quantity.Literal { return t.row.JackingStress.Literal })
-	column("loss-at-release", "Δσ_{p0,i}", "Loss up to and at release, as stated", "MPa", lossSource(rows), func(t tendon) quantity.Literal { return t.row.StatedLosses.AtRelease.Literal })
-	column("loss-final", "Δσ_{p∞,i}", "Loss in all at the end of life, as stated", "MPa", lossSource(rows), func(t tendon) quantity.Literal { return t.row.StatedLosses.Final.Literal })
+	column("jacking-stress", "σ_{p,max,i}", "Stress at jacking", "MPa", from(func(r *member.StrandRow) member.Origin { return r.JackingStress.Origin }), func(t tendon) quantity.Literal { return t.row.JackingStress.Literal })
+	column("loss-at-release", "Δσ_{p0,i}", "Loss of prestress up to and at release, as stated", "MPa", lossSource(rows), func(t tendon) quantity.Literal { return t.row.StatedLosses.AtRelease.Literal })
+	column("loss-final", "Δσ_{p∞,i}", "Loss of prestress in all at the end of life, as stated", "MPa", lossSource(rows), func(t tendon) quantity.Literal { return t.row.StatedLosses.Final.Literal })
 	column("bond-at-release", "η_{p1,i}", "Bond coefficient at release", "", "kind of tendon", func(t tendon) quantity.Literal { return plain(t.bondTransfer, "") }, "8.10.2.2(1)")
 	column("bond-at-ultimate", "η_{p2,i}", "Bond coefficient at ultimate", "", "kind of tendon", func(t tendon) quantity.Literal { return plain(t.bondUltimate, "") }, "8.10.2.3(2)")
 	column("tendon-form", "α_{2,i}", "Factor of the kind of tendon", "", "kind of tendon", func(t tendon) quantity.Literal { return plain(t.shape, "") }, "8.10.2.2(2)")
@@ -183,25 +189,31 @@ func (j *job) givenBars(c *trace.Chapter) {
 		names[i] = rows[i].Name.Text
 	}
 	j.bars = j.n.Axis("bar row", "row of bars", "j", names)
-	line := fmt.Sprintf("member file, line %d", j.m.Bars.Pos.Line)
+	from := func(f func(*member.BarRow) member.Origin) string {
+		var out []member.Origin
+		for i := range rows {
+			out = append(out, f(&rows[i]))
+		}
+		return lines(out...)
+	}
 	column := func(id, symbol, name, unit, source string, f func(member.BarRow) quantity.Literal) {
 		b.GivenRows(def(id, symbol, name, unit), j.bars, each(rows, f), source)
 	}
-	column("count", "n_{s,j}", "Number", "", line, func(r member.BarRow) quantity.Literal { return whole(r.Count.N) })
-	column("diameter", "φ_{s,j}", "Diameter", "mm", line, func(r member.BarRow) quantity.Literal { return r.Diameter.Literal })
-	column("spacing", "s_{s,j}", "Spacing between axes", "mm", line, func(r member.BarRow) quantity.Literal {
+	column("count", "n_{s,j}", "Number of bars in the row", "", from(func(r *member.BarRow) member.Origin { return r.Count.Origin }), func(r member.BarRow) quantity.Literal { return whole(r.Count.N) })
+	column("diameter", "φ_{s,j}", "Diameter of the bars", "mm", from(func(r *member.BarRow) member.Origin { return r.Diameter.Origin }), func(r member.BarRow) quantity.Literal { return r.Diameter.Literal })
+	column("spacing", "s_{s,j}", "Spacing of the bars between axes", "mm", from(func(r *member.BarRow) member.Origin { return r.Spacing.Origin }), func(r member.BarRow) quantity.Literal {
 		if !r.Spacing.Present() {
 			return plain("0", "mm")
 		}
 		return r.Spacing.Literal
 	})
-	column("level", "y_{s,j}", "Height of the axes above the soffit", "mm", line, func(r member.BarRow) quantity.Literal { return r.Height.Literal })
-	column("yield-strength", "f_{yk,j}", "Characteristic yield strength", "MPa", line, func(r member.BarRow) quantity.Literal { return r.Fyk.Literal })
+	column("level", "y_{s,j}", "Height of the bars' axes above the soffit", "mm", from(func(r *member.BarRow) member.Origin { return r.Height.Origin }), func(r member.BarRow) quantity.Literal { return r.Height.Literal })
+	column("yield-strength", "f_{yk,j}", "Characteristic yield strength of the bars", "MPa", from(func(r *member.BarRow) member.Origin { return r.Fyk.Origin }), func(r member.BarRow) quantity.Literal { return r.Fyk.Literal })
 	if j.barInclined() {
 		column("hardening", "k_{s,j}", "Ratio of tensile to yield strength by ductility class", "", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][0], "") })
 		column("ultimate-strain", "ε_{suk,j}", "Characteristic strain at maximum force by ductility class", "‰", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][1], "‰") })
 	}
-	b.Given(def("steel-modulus", "E_s", "Modulus of elasticity", "GPa", ref(ec2.Code, "3.2.7(4)")), plain("200", "GPa"), "code")
+	b.Given(def("steel-modulus", "E_s", "Modulus of elasticity of the bars", "GPa", ref(ec2.Code, "3.2.7(4)")), plain("200", "GPa"), "code")
 	b.Given(def("end-cover", "c_e", "Distance of the ends of the bars from the ends of the concrete", "mm"), plain("40", "mm"), "assumption")
 }
 
@@ -221,6 +233,7 @@ func (j *job) givenSpan(c *trace.Chapter) {
 // load is one load of an action; the self-weight is the first, and its size is computed.
 type load struct {
 	name      string
+	origin    member.Origin
 	action    int // −1: self-weight
 	category  string
 	q, f      quantity.Literal
@@ -236,7 +249,7 @@ func (j *job) loadRows() []load {
 		a := &j.m.Actions[k]
 		for i := range a.Loads {
 			l := &a.Loads[i]
-			n := load{name: a.Name.Text, action: k, category: a.Category.Text, permanent: a.Kind.Text == "permanent"}
+			n := load{name: a.Name.Text, origin: member.Origin{Pos: l.Pos, Given: true}, action: k, category: a.Category.Text, permanent: a.Kind.Text == "permanent"}
 			if len(a.Loads) > 1 {
 				n.name = fmt.Sprintf("%s %d", a.Name.Text, i+1)
 			}
@@ -266,15 +279,22 @@ func (j *job) givenActions(c *trace.Chapter) {
 		names[i] = l.name
 	}
 	j.loads = j.n.Axis("load", "load", "i", names)
-	line := "member file"
+	var from []member.Origin
+	for _, l := range loads[1:] {
+		from = append(from, l.origin)
+	}
+	line := lines(from...)
+	if len(from) == 0 {
+		line = "no action but the self-weight"
+	}
 	column := func(id, symbol, name, unit string, f func(load) quantity.Literal) {
 		b.GivenRows(def(id, symbol, name, unit), j.loads, each(loads, f), line)
 	}
-	column("imposed", "q_{0,i}", "Load per length, downward; the self-weight is computed in the chapter on actions", "kN/m", func(l load) quantity.Literal { return l.q })
-	column("weight-share", "w_i", "1 for the self-weight, 0 for the others", "", func(l load) quantity.Literal { return flag(l.action < 0) })
-	column("point", "F_i", "Point load, downward", "kN", func(l load) quantity.Literal { return l.f })
-	column("from", "a_i", "From, or at, measured from end A", "m", func(l load) quantity.Literal { return l.from })
-	column("to", "b_i", "To, measured from end A", "m", func(l load) quantity.Literal { return l.to })
+	column("imposed", "q_{0,i}", "Load per length, downward, without the self-weight", "kN/m", func(l load) quantity.Literal { return l.q })
+	column("weight-share", "w_i", "1 for the self-weight, 0 for the other loads", "", func(l load) quantity.Literal { return flag(l.action < 0) })
+	column("point", "F_i", "Point load, downward (negative: upward)", "kN", func(l load) quantity.Literal { return l.f })
+	column("from", "a_i", "Start of the load, or place of a point load, from end A", "m", func(l load) quantity.Literal { return l.from })
+	column("to", "b_i", "End of the load, from end A", "m", func(l load) quantity.Literal { return l.to })
 	column("permanent", "k_{G,i}", "1 for a permanent load, 0 for a variable one", "", func(l load) quantity.Literal { return flag(l.permanent) })
 	for k, symbol := range []string{"ψ_{0,i}", "ψ_{1,i}", "ψ_{2,i}"} {
 		b.GivenRows(def(fmt.Sprintf("psi-%d", k), symbol, [...]string{"Combination factor", "Frequent factor", "Quasi-permanent factor"}[k], "", ref(ec2.Actions, "Table A1.1")), j.loads,

@@ -9,7 +9,6 @@ import (
 func (j *job) materialsChapter(c *trace.Chapter) {
 	b := c.Block("concrete", "Concrete", nil, trace.Take(j.parameters, j.concrete)...)
 	j.strengths = b
-	j.narrative(b, "materials")
 	b.Steps(ec2.MeanStrength, ec2.MeanTensileStrength, ec2.LowerTensileStrength, ec2.SecantModulus, ec2.DesignStrength)
 	b.Steps(ec2.BlockDepthFactor, ec2.BlockStressFactor, ec2.UltimateStrain3)
 	b.Steps(ec2.ParabolaStrain, ec2.UltimateStrain2, ec2.ParabolaExponent)

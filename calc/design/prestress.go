@@ -10,7 +10,6 @@ import (
 func (j *job) prestressChapter(c *trace.Chapter) {
 	b := c.Block("stress", "Tendon stress", nil, trace.Take(j.parameters, j.tendons, j.tendonStrengths)...)
 	j.stress = b
-	j.narrative(b, "prestress")
 	b.Step(ec2.JackingLimit)
 	b.Check(ec2.JackingKept)
 	b.Steps(ec2.InitialStress, ec2.ReleaseLimit)
@@ -43,6 +42,7 @@ func (j *job) alongChapter(c *trace.Chapter) {
 	if j.hasBars() {
 		b.Step(ec2.BarAvailableStress)
 	}
+	b.Table("along", "Stress present and available in the rows along the member", j.stations, "actions.effects/position", "present-stress", "available-stress")
 	b.Figure("diagram", "tendon-stress", "Stress in the tendons: present after all losses, and available at the ultimate limit state.", "",
 		trace.Plot{Role: "x", Key: "actions.effects/position"}, trace.Plot{Role: "present", Key: "present-stress"}, trace.Plot{Role: "available", Key: "available-stress"})
 }

@@ -15,7 +15,6 @@ const strips = 4000
 // secondChapter finds the main results again by other routes.
 func (j *job) secondChapter(c *trace.Chapter) {
 	b := c.Block("section", "Section by strips", nil, trace.Take(j.gross)...)
-	j.narrative(b, "second")
 	b.Text("second", templates.Text("second"))
 	p := j.shape.ByStrips(strips)
 	const how = "the section cut into 4000 strips of equal height"
@@ -46,7 +45,6 @@ func (j *job) secondStatics(c *trace.Chapter) {
 		return []float64{m}, nil
 	}, def("moment", "M_2", "Moment of all loads together, unfactored, from influence lines", "kN·m"))
 	b.Steps(mechanics.SumOfMoments, mechanics.MomentDifference)
-	b.Table("along", "Moment of all loads together, by both methods", j.stations, "actions.effects/position", "sum-of-moments", "moment", "moment-difference")
 }
 
 // pieces is in how many pieces an influence line is cut.

@@ -10,7 +10,6 @@ import (
 func (j *job) sectionChapter(c *trace.Chapter) {
 	b := c.Block("gross", "Gross concrete section", nil, trace.Take(j.concrete, j.section)...)
 	j.gross = b
-	j.narrative(b, "section")
 	b.Steps(mechanics.PartArea, mechanics.PartCentroid, mechanics.PartInertia)
 	b.Steps(mechanics.Area, mechanics.Centroid, mechanics.Inertia, mechanics.LowerModulus, mechanics.UpperModulus)
 	b.Step(mechanics.SelfWeight)

@@ -14,7 +14,6 @@ func (j *job) ultimateChapter(c *trace.Chapter) {
 	}
 	b := c.Block("bending", "Resistance along the span, sagging", j.stations, j.steel...)
 	j.resistance = b
-	j.narrative(b, "ultimate")
 	b.Text("bending", templates.Text("bending"))
 	j.bending(b)
 	j.cracked(c)
@@ -66,6 +65,10 @@ func (j *job) cracked(c *trace.Chapter) {
 		b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
 		b.Check(ec2.FailureWithWarning)
 	})
+	if !cracked.Any() {
+		return
+	}
+	b.Table("along", "Stations along the span: cracks, tension added by shear, warning", j.stations, "actions.effects/position", "bottom-stress", "added-moment", "moment-with-shear", "bending-with-shear", "cracking-moment", "failure-with-warning")
 }
 
 // steelLimits checks minimum steel at every station where steel is bonded in the tension zone, and maximum steel.

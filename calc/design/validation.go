@@ -21,7 +21,8 @@ func (j *job) validation(c *trace.Chapter) {
 	b.Text("formulas", j.exampleList())
 }
 
-// exampleList groups the steps by the source of the best worked example of their formula.
+// exampleList groups the steps by the outside source of the best worked example of their formula; the others have one
+// worked by hand.
 func (j *job) exampleList() string {
 	byID := map[string]*clause.Formula{}
 	for _, f := range clause.Formulas() {
@@ -33,6 +34,7 @@ func (j *job) exampleList() string {
 	}
 	steps := map[source][]string{}
 	var order []source
+	byHand, replaced := 0, []string{}
 	j.n.Each(func(_ *trace.Chapter, _ *trace.Block, e trace.Entry) {
 		s, ok := e.(*trace.Step)
 		if !ok {
@@ -43,25 +45,31 @@ func (j *job) exampleList() string {
 		if f == nil {
 			return
 		}
-		best := source{"replaced in the member file: no worked example", ""}
-		if parsed, err := f.Parsed(); err == nil && parsed.String() == s.Formula.String() {
-			e := slices.MinFunc(f.Examples, func(a, b clause.Example) int { return slices.Index(grades, a.Grade) - slices.Index(grades, b.Grade) })
-			best = source{e.Source, e.Grade}
+		link := fmt.Sprintf("[%s](#%s)", s.Number, s.Key)
+		if parsed, err := f.Parsed(); err != nil || parsed.String() != s.Formula.String() {
+			replaced = append(replaced, link)
+			return
 		}
-		if steps[best] == nil {
-			order = append(order, best)
+		best := slices.MinFunc(f.Examples, func(a, b clause.Example) int { return slices.Index(grades, a.Grade) - slices.Index(grades, b.Grade) })
+		if best.Grade == clause.Own {
+			byHand++
+			return
 		}
-		steps[best] = append(steps[best], fmt.Sprintf("[%s](#%s)", s.Number, s.Key))
+		k := source{best.Source, best.Grade}
+		if steps[k] == nil {
+			order = append(order, k)
+		}
+		steps[k] = append(steps[k], link)
 	})
 	slices.SortStableFunc(order, func(a, b source) int { return slices.Index(grades, a.grade) - slices.Index(grades, b.grade) })
 	var b strings.Builder
-	b.WriteString("Each formula carries a worked example that is run with the tests of the program. By the source of the example, with its grade:\n\n")
+	b.WriteString("Each formula carries a worked example that is run with the tests of the program. Examples with an outside source:\n\n")
 	for _, s := range order {
-		grade := ""
-		if s.grade != "" {
-			grade = " (" + string(s.grade) + ")"
-		}
-		fmt.Fprintf(&b, "- %s%s: %s\n", s.text, grade, strings.Join(steps[s], ", "))
+		fmt.Fprintf(&b, "- %s (%s): %s\n", s.text, s.grade, strings.Join(steps[s], ", "))
+	}
+	fmt.Fprintf(&b, "\nThe other %d steps rest on examples worked by hand from the formula itself (own derivation).", byHand)
+	if len(replaced) > 0 {
+		fmt.Fprintf(&b, " Replaced in the member file, without a worked example: %s.", strings.Join(replaced, ", "))
 	}
 	return b.String()
 }

@@ -2,6 +2,7 @@ package design
 
 import (
 	"fmt"
+	"strings"
 
 	"soffit/calc/member"
 	"soffit/calc/quantity"
@@ -11,11 +12,11 @@ import (
 // verdictChapter opens the note: what fails, and what would mend it, found by running the design again.
 func (j *job) verdictChapter(c *trace.Chapter) {
 	b := c.Block("checks", "The member in one picture", nil)
-	j.narrative(b, "verdict")
 	j.elevation(b)
 	if effect, check := j.n.Rounding(); check != nil {
 		b.Text("rounding", fmt.Sprintf("Rounding to the printed digits moves no ratio of demand to limit by more than %.4f (%s %s).", effect+0.00005, check.Number, check.Name))
 	}
+	b.Text("remarks", j.remarks())
 	if j.trying || j.n.Err() != nil {
 		return
 	}
@@ -28,6 +29,45 @@ func (j *job) verdictChapter(c *trace.Chapter) {
 	if len(failing) > 0 {
 		j.mends(c, failing)
 	}
+}
+
+// remarks are outcomes that no check fails on but that a reader of the verdict must know.
+func (j *job) remarks() string {
+	var out []string
+	for _, r := range []struct{ key, words string }{
+		{"ultimate.bending/outermost-yields", "**Brittle:** the section is over-reinforced, the concrete crushes before the outermost row yields"},
+		{"ultimate.bending/partly-compressed", "**Brittle:** the section is wholly compressed and no resistance is counted"},
+		{"ultimate.bending/every-row-anchored", "A row that counts is not anchored up to its design strength and would slip before it yields"},
+		{"ultimate.cracked/cracked-at-ultimate", ""},
+	} {
+		c, ok := j.n.Entry(r.key).(*trace.Choice)
+		if !ok {
+			continue
+		}
+		var at []string
+		yes := false
+		for i, o := range c.Outcomes {
+			yes = yes || o == trace.Yes
+			if o == trace.No {
+				at = append(at, trace.RowName(c.Axes, i))
+			}
+		}
+		switch {
+		case r.words == "" && !yes:
+			out = append(out, fmt.Sprintf("No station cracks in bending at the ultimate limit state ([%s](#%s)): the checks with the tension added by shear and of cracking before failure are not needed.", c.Number, c.Key))
+		case r.words != "" && len(at) > 0:
+			out = append(out, fmt.Sprintf("%s ([%s](#%s)), at %d of %d stations: %s.", r.words, c.Number, c.Key, len(at), len(c.Outcomes), some(at)))
+		}
+	}
+	return strings.Join(out, "\n\n")
+}
+
+// some names the first and the last of a list.
+func some(list []string) string {
+	if len(list) < 4 {
+		return strings.Join(list, ", ")
+	}
+	return list[0] + " … " + list[len(list)-1]
 }
 
 // remedy is one way to change a member, step by step; apply changes a copy and says in words what it did, or

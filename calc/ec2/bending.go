@@ -17,7 +17,7 @@ var PrestressForce = clause.Define(&clause.Formula{
 
 // PrestressMoment is the moment of P about the centroid.
 var PrestressMoment = clause.Define(&clause.Formula{
-	ID: "prestress-moment", Name: "Its moment about the centroid, tension below", Ref: en("5.10.8(1)", ""),
+	ID: "prestress-moment", Name: "Moment of the prestressing force about the centroid", Ref: en("5.10.8(1)", ""),
 	Text: "M_P = γ_P·Σ_i(A_{p,i}·σ_{pt,i}·e_i)", Unit: "kN·m",
 	Examples: hand("560.23 kN·m", "γ_P = 1.0", "A_{p,i} = 1112 mm²", "σ_{pt,i} = 1145 MPa", "e_i = 440 mm"),
 })
@@ -154,9 +154,8 @@ var (
 			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN, 2 kN", "z_{p,i} = 1000 mm, 600 mm")})
 )
 
-// balanced is the domain of a resistance: the forces balance to a thousandth, and the section is not wholly
-// compressed, which the pivot at the top fibre does not cover (6.1(5) and (6)).
-const balanced = "abs(ΔF) ≤ 0.001·F_c and x ≤ h"
+// balanced is the domain of a resistance: the forces balance to a thousandth.
+const balanced = "abs(ΔF) ≤ 0.001·F_c"
 
 // TendonLever and BarLever are lever arms about the line of F_c.
 var (

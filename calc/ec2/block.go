@@ -26,17 +26,27 @@ var StrainRatio = clause.Define(&clause.Formula{
 // Fullness is the mean stress of the parabola–rectangle over the compressed depth, as part of f_cd.
 var Fullness = clause.Define(&clause.Formula{
 	ID: "fullness", Name: "Mean stress of the parabola–rectangle over the compressed depth, as part of the design strength", Ref: own317,
-	Text: "α_R = 1 − (1 − max(0; 1 − r_c)^(n + 1))/((n + 1)·r_c)", Unit: "", Digits: 6,
-	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "r_c = 1.75", "n = 2"),
-		by("worked by hand: r − r²/3", clause.Own, "0.416667", "r_c = 0.5", "n = 2")},
+	Text: "α_R = 1 − (1 − q_c)/((n + 1)·r_c)", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 17/21 = 0.810", clause.Recalled, "0.810", "q_c = 0", "r_c = 1.75", "n = 2"),
+		by("worked by hand: r − r²/3", clause.Own, "0.416667", "q_c = 0.125", "r_c = 0.5", "n = 2")},
 })
+
+// ParabolaRest and ParabolaMoment are what the parabola leaves of a block of full stress, of order n + 1, and the
+// moment of what it fills about the neutral axis.
+var (
+	ParabolaRest = clause.Define(&clause.Formula{ID: "parabola-rest", Name: "Rest of the parabola", Ref: own317,
+		Text: "q_c = max(0; 1 − r_c)^(n + 1)", Unit: "", Digits: 6, Examples: append(hand("0.125", "r_c = 0.5", "n = 2"), hand("0", "r_c = 1.75", "n = 2")...)})
+	ParabolaMoment = clause.Define(&clause.Formula{ID: "parabola-moment", Name: "Moment of the parabola–rectangle about the neutral axis, over that of the full depth", Ref: own317,
+		Text: "m_c = 1/2 − (1 − q_c·(1 + (n + 1)·r_c))/((n + 1)·(n + 2)·r_c^2)", Unit: "", Digits: 6,
+		Examples: append(hand("0.270833", "q_c = 0.125", "r_c = 0.5", "n = 2"), hand("0.472789", "q_c = 0", "r_c = 1.75", "n = 2")...)})
+)
 
 // ResultantDepth is the depth of the resultant of the parabola–rectangle as part of the compressed depth.
 var ResultantDepth = clause.Define(&clause.Formula{
-	ID: "resultant-depth", Name: "Depth of its resultant, as part of the compressed depth", Ref: own317,
-	Text: "k_a = 1 − (1/2 − (1 − max(0; 1 − r_c)^(n + 1)·(1 + (n + 1)·r_c))/((n + 1)·(n + 2)·r_c^2))/α_R", Unit: "", Digits: 6,
-	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "r_c = 1.75", "n = 2", "α_R = 0.8095238"),
-		by("worked by hand: (4 − r)/(12 − 4·r)", clause.Own, "0.35", "r_c = 0.5", "n = 2", "α_R = 0.4166667")},
+	ID: "resultant-depth", Name: "Depth of that resultant, as part of the compressed depth", Ref: own317,
+	Text: "k_a = 1 − m_c/α_R", Unit: "", Digits: 6,
+	Examples: []clause.Example{by("handbook coefficient of the full block, 99/238 = 0.416", clause.Recalled, "0.416", "m_c = 0.4727891", "α_R = 0.8095238"),
+		by("worked by hand: (4 − r)/(12 − 4·r)", clause.Own, "0.35", "m_c = 0.2708333", "α_R = 0.4166667")},
 })
 
 // FullFullness is α_R at the ultimate strain.
@@ -62,7 +72,7 @@ var ReducedDepthFactor = clause.Define(&clause.Formula{
 // ReducedStressFactor is η where the top fibre is below its ultimate strain.
 var ReducedStressFactor = clause.Define(&clause.Formula{
 	ID: "reduced-stress-factor", Name: "Stress factor of the block at that strain", Ref: own317,
-	Text: "η_c = η·α_R/α_Ru·k_au/k_a", Unit: "", Digits: 6,
+	Text: "η_c = η·α_R·k_au/(α_Ru·k_a)", Unit: "", Digits: 6,
 	Examples: hand("0.61172", "η = 1", "α_R = 0.4166667", "α_Ru = 0.8095238", "k_au = 0.4159664", "k_a = 0.35"),
 })
 
@@ -95,8 +105,8 @@ var BlockPartArea = clause.Define(&clause.Formula{
 
 // BlockPartDepthOfCentroid is the depth of the centroid of the block's area in each part.
 var BlockPartDepthOfCentroid = clause.Define(&clause.Formula{
-	ID: "block-part-centroid", Name: "Depth of the centroid of that area from the top",
-	Text: "z_{cc,n} = z_{c,n} + c_{c,n}/3·(b_{o,n} + 2·b_{c,n})/(b_{o,n} + b_{c,n})", Unit: "mm", Digits: 6,
+	ID: "block-part-centroid", Name: "Depth of the centroid of that area of each part from the top",
+	Text: "z_{cc,n} = z_{c,n} + c_{c,n}·(b_{o,n} + 2·b_{c,n})/(3·(b_{o,n} + b_{c,n}))", Unit: "mm", Digits: 6,
 	Examples: hand("109.545 mm", "z_{c,n} = 100 mm", "c_{c,n} = 20 mm", "b_{o,n} = 500 mm", "b_{c,n} = 380 mm"),
 })
 
@@ -117,7 +127,7 @@ var ConcreteForce = clause.Define(&clause.Formula{
 
 // ConcreteForceDepth is the depth of F_c.
 var ConcreteForceDepth = clause.Define(&clause.Formula{
-	ID: "concrete-force-depth", Name: "Depth of that force from the top", Ref: en("3.1.7(3) Figure 3.5", ""),
+	ID: "concrete-force-depth", Name: "Depth of the block's force from the top", Ref: en("3.1.7(3) Figure 3.5", ""),
 	Text: "d_c = Σ_n(A_{cc,n}·z_{cc,n})/Σ_n(A_{cc,n})", Unit: "mm", Digits: 6,
 	Examples: hand("47.572 mm", "A_{cc,n} = 47572 mm², 0 mm²", "z_{cc,n} = 47.572 mm, 100 mm"),
 })

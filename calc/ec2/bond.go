@@ -169,7 +169,7 @@ var BarBondSize = clause.Define(&clause.Formula{
 // BarAnchorageLength is l_b,rqd with every α of 8.4.4 taken as 1.
 var BarAnchorageLength = clause.Define(&clause.Formula{
 	ID: "bar-anchorage-length", Name: "Basic anchorage length of straight bars, each α of 8.4.4 taken as 1", Ref: en("8.4.3(2)", "8.3"),
-	Text: "l_{b,j} = φ_{s,j}/4·σ_{sd,j}/f_{bd,j}", Unit: "mm",
+	Text: "l_{b,j} = φ_{s,j}·σ_{sd,j}/(4·f_{bd,j})", Unit: "mm",
 	Examples: hand("406.81 mm", "φ_{s,j} = 16 mm", "σ_{sd,j} = 434.78 MPa", "f_{bd,j} = 4.275 MPa"),
 })
 

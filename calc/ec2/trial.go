@@ -30,6 +30,18 @@ var NoResistance = clause.Define(&clause.Formula{
 	Text: "M_Rd = 0·[kN·m]", Unit: "kN·m", Digits: 6, Examples: hand("0 kN·m"),
 })
 
+// PartlyCompressed asks whether the neutral axis lies in the section.
+var PartlyCompressed = &clause.Condition{
+	ID: "partly-compressed", Name: "Neutral axis", Ref: en("6.1(5), (6)", ""), Text: "x ≤ h",
+	Yes: "the neutral axis lies in the section", No: "the section is wholly compressed: too much steel, no resistance is counted",
+}
+
+// NoResistanceCompressed is the resistance where the section is wholly compressed, which is not covered.
+var NoResistanceCompressed = clause.Define(&clause.Formula{
+	ID: "no-resistance-compressed", Name: "Moment resistance: none is counted where the section is wholly compressed", Ref: en("6.1(5), (6)", ""),
+	Text: "M_Rd = 0·[kN·m]", Unit: "kN·m", Digits: 6, Examples: hand("0 kN·m"),
+})
+
 // FlangeTrial is the neutral axis with the block in the flange.
 var FlangeTrial = clause.Define(&clause.Formula{
 	ID: "axis-flange-trial", Name: "Depth of the neutral axis if the block lies in the top part", Ref: en("3.1.7(3) Figure 3.5", ""),

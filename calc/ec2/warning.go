@@ -12,7 +12,7 @@ var InitialForce = clause.Define(&clause.Formula{
 
 // InitialMoment is its moment about the centroid.
 var InitialMoment = clause.Define(&clause.Formula{
-	ID: "initial-moment", Name: "Its moment about the centroid", Ref: en("5.10.1(6)", ""), Text: "M_Pi = Σ_i(A_{p,i}·σ_{pi,i}·e_i)", Unit: "kN·m",
+	ID: "initial-moment", Name: "Moment of the greatest prestressing force about the centroid", Ref: en("5.10.1(6)", ""), Text: "M_Pi = Σ_i(A_{p,i}·σ_{pi,i}·e_i)", Unit: "kN·m",
 	Examples: hand("600.84 kN·m", "A_{p,i} = 1112 mm²", "σ_{pi,i} = 1228 MPa", "e_i = 440 mm"),
 })
 

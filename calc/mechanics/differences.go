@@ -26,6 +26,6 @@ var SumOfMoments = clause.Define(&clause.Formula{
 
 // MomentDifference compares the moments of both methods.
 var MomentDifference = clause.Define(&clause.Formula{
-	ID: "moment-difference", Name: "Difference of the moments", Text: "ΔM = M_2 − M_Σ", Unit: "kN·m", Digits: 3,
+	ID: "moment-difference", Name: "Difference of the moments", Text: "ΔM = M_2 − M_Σ", Unit: "kN·m", Digits: 1,
 	Examples: hand("0.1 kN·m", "M_2 = 10.1 kN·m", "M_Σ = 10 kN·m"),
 })

@@ -25,7 +25,7 @@ var PartArea = clause.Define(&clause.Formula{
 // PartCentroid is the height of a part's centroid above the soffit.
 var PartCentroid = clause.Define(&clause.Formula{
 	ID: "part-centroid", Name: "Centroid of each part above the soffit",
-	Text: "y_{c,n} = y_{u,n} + h_{c,n}/3·(b_{u,n} + 2·b_{o,n})/(b_{u,n} + b_{o,n})", Unit: "mm", Digits: 6,
+	Text: "y_{c,n} = y_{u,n} + h_{c,n}·(b_{u,n} + 2·b_{o,n})/(3·(b_{u,n} + b_{o,n}))", Unit: "mm", Digits: 6,
 	Examples: hand("40 mm", "y_{u,n} = 0 mm", "b_{u,n} = 200 mm", "b_{o,n} = 200 mm", "h_{c,n} = 80 mm"),
 })
 

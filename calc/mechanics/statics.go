@@ -11,8 +11,8 @@ import (
 
 // Span is the distance of the bearings.
 var Span = clause.Define(&clause.Formula{
-	ID: "span", Name: "Span, between the middles of the bearings", Text: "l = x_B − x_A", Unit: "m", Digits: 6,
-	Examples: hand("19.5 m", "x_B = 19.65 m", "x_A = 150 mm"),
+	ID: "span", Name: "Span, between the middles of the bearings", Text: "l = x_B − x_A", Unit: "m", Digits: 5,
+	Examples: hand("19.500 m", "x_B = 19.65 m", "x_A = 150 mm"),
 })
 
 // Load is the load per length of each load, the self-weight among them.

@@ -195,7 +195,7 @@ func (n *Note) proveRoot(e *Root) (int, error) {
 	}
 	count := 0
 	for i := range e.Shown {
-		if !e.Taken(i) {
+		if !e.Taken(i) || !residual.Taken(i) {
 			continue
 		}
 		if r, s := residual.Values[i], scale.Values[i]; math.Abs(r) > e.Tolerance*math.Abs(s) {

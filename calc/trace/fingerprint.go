@@ -8,8 +8,8 @@ import (
 )
 
 // Fingerprint is the engineering one: SHA-256 over the input that decides, the formulas, the printed values and
-// the verdicts. Unrounded values, which differ between processors, and the names, dates, titles and narrative
-// of the document take no part in it.
+// the verdicts. Unrounded values, which differ between processors, where a value comes from, and the names,
+// dates, titles and narrative of the document take no part in it.
 func (n *Note) Fingerprint() string {
 	return digest(func(w io.Writer) {
 		enc := json.NewEncoder(w)
@@ -19,7 +19,7 @@ func (n *Note) Fingerprint() string {
 			case "text", "table", "figure":
 				return
 			}
-			j.Number, j.Name, j.Unrounded, j.Value, j.Lower, j.Upper, j.Effect = "", "", nil, nil, nil, nil, nil
+			j.Number, j.Name, j.Source, j.Unrounded, j.Value, j.Lower, j.Upper, j.Effect = "", "", "", nil, nil, nil, nil, nil
 			must(enc.Encode(j))
 		})
 	})

@@ -236,7 +236,7 @@ func (b *Block) prove(e *Root, d *clause.Root) error {
 	}
 	e.Scale = scale[len(scale)-1].Key
 	for i := range e.Shown {
-		if !e.Taken(i) {
+		if !e.Taken(i) || !residual.Taken(i) { // a later branch may set a root aside: nothing then rests on it
 			continue
 		}
 		r, s := residual.Values[i], scale[len(scale)-1].Values[i]
