@@ -20,7 +20,9 @@ func TestRoundingAtExtremes(t *testing.T) {
 	row := func(name string, count int, height string) string {
 		return fmt.Sprintf("    - {name: %s, product: Y1860S7-12.5, count: %d, spacing: 40 mm, height: %s, jacking stress: 1340 MPa, stated losses: {at release: 100 MPa, final: 250 MPa, source: invented}}\n", name, count, height)
 	}
-	strands := func(rows ...string) string { return "  bond: good\n  rows:\n" + strings.TrimSuffix(strings.Join(rows, ""), "\n") }
+	strands := func(rows ...string) string {
+		return "  bond: good\n  rows:\n" + strings.TrimSuffix(strings.Join(rows, ""), "\n")
+	}
 	for name, b := range map[string]beam{
 		"short":       {length: "3 m", actions: "  - {name: floor, kind: variable, category: B, loads: [{uniform: 60 kN/m}]}"},
 		"long":        {length: "60 m", shape: "{kind: I, depth: 2500 mm, top flange: {width: 900 mm, depth: 200 mm}, web width: 180 mm, bottom flange: {width: 800 mm, depth: 250 mm}}", strands: strands(row("a", 18, "60 mm"), row("b", 18, "110 mm"), row("c", 18, "160 mm")), actions: "  - {name: floor, kind: variable, category: B, loads: [{uniform: 6 kN/m}]}"},

@@ -1,10 +1,11 @@
 package design
 
 import (
+	"cmp"
 	"fmt"
+	"slices"
 	"strings"
 
-	"soffit/calc/member"
 	"soffit/calc/quantity"
 	"soffit/calc/trace"
 )
@@ -70,115 +71,72 @@ func some(list []string) string {
 	return list[0] + " … " + list[len(list)-1]
 }
 
-// remedy is one way to change a member, step by step; apply changes a copy and says in words what it did, or
-// returns "" where the step cannot be taken.
-type remedy struct {
-	id    string
-	steps int
-	apply func(m *member.Member, step int) string
-}
-
-// remedies are tried in this order, each from its smallest step up.
-var remedies = []remedy{
-	{"more-tendons", 8, moreTendons},
-	{"added-row", 6, addedRow},
-	{"stronger-concrete", 8, strongerConcrete},
-	{"deeper-section", 12, deeperSection},
-}
-
-// moreTendons adds to the lowest row that has room.
-func moreTendons(m *member.Member, step int) string {
-	low := 0
-	for i := range m.Strands.Rows {
-		if m.Strands.Rows[i].Height.Base() < m.Strands.Rows[low].Height.Base() {
-			low = i
-		}
-	}
-	r := &m.Strands.Rows[low]
-	before := r.Count.N
-	r.Count.N += step
-	f := formOf(&m.Shape)
-	edge := 2 * r.Height.Base() // as far from the sides as from the soffit
-	if float64(r.Count.N-1)*r.Spacing.Base() > f.lower[0].Quantity().Value-edge {
-		return ""
-	}
-	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
-}
-
-// addedRow puts a further row like the lowest one 50 mm above the rows of the lower half, two tendons a step.
-func addedRow(m *member.Member, step int) string {
-	rows := m.Strands.Rows
-	low, top := rows[0], 0.0
-	for _, r := range rows {
-		if r.Height.Base() < low.Height.Base() {
-			low = r
-		}
-		if h := r.Height.Base(); h < m.Shape.Depth.Base()/2 {
-			top = max(top, h)
-		}
-	}
-	like := low.Name.Text
-	low.Name.Text, low.Count.N = "added", 2*step
-	low.Height.Literal = number(top+50, "mm", places(top))
-	f := formOf(&m.Shape)
-	shape, err := f.shape()
-	if err != nil || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
-		return ""
-	}
-	m.Strands.Rows = append(rows, low)
-	return fmt.Sprintf("a further row of %d tendons like row %q at %s above the soffit", low.Count.N, like, low.Height)
-}
-
-// strongerConcrete raises f_ck by 5 MPa a step, to 90 MPa at most; the strength at release stays.
-func strongerConcrete(m *member.Member, step int) string {
-	v := m.Concrete.Fck.Base() + 5*float64(step)
-	if v > 90 {
-		return ""
-	}
-	before := m.Concrete.Fck.String()
-	m.Concrete.Fck.Literal = number(v, "MPa", 0)
-	return fmt.Sprintf("f_ck %s instead of %s", m.Concrete.Fck, before)
-}
-
-// deeperSection raises the depth by 50 mm a step; what is stated of the tendons stays.
-func deeperSection(m *member.Member, step int) string {
-	before := m.Shape.Depth.String()
-	m.Shape.Depth.Literal = number(m.Shape.Depth.Base()+50*float64(step), "mm", places(m.Shape.Depth.Base()))
-	return fmt.Sprintf("depth %s instead of %s, tendons at the same heights, the stated losses kept", m.Shape.Depth, before)
-}
-
-// mends tries each remedy, step by step, until every failing check has passed once with nothing else failing.
+// mends tries each remedy step by step: it records the first step with which every check passes, or else, for each
+// failing check, the first with which that check passes and none fails that passed before.
 func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
-	b := c.Block("mends", "What would mend a failing check", nil)
-	b.Text("mends", "Each line is the smallest step of its kind with which the check passes and none fails that passed before, found by running the whole design again. It is a hint for the engineer, not a design.")
+	b := c.Block("mends", "What would mend it", nil)
+	b.Text("mends", "Each line is the smallest step of its kind, found by running the whole design again. It is a hint for the engineer, not a design.")
+	record := func(id, name, ratio string) {
+		b.Given(def(keyed(id), fmt.Sprintf("r_%d", len(b.Entries)), name, ""), quantity.Literal{Number: ratio}, "ratio then, the design run again")
+	}
 	found := map[string]bool{}
 	for _, r := range remedies {
-		open := failing
-		for step := 1; step <= r.steps && len(open) > 0; step++ {
+		first := map[string]attempt{}
+		for step := 1; step <= r.steps; step++ {
 			words, n := j.try(r, step)
 			if n == nil {
 				break
 			}
-			var rest []*trace.Check
-			for _, k := range open {
-				again, ok := n.Entry(k.Key).(*trace.Check)
-				if !ok || again.Failed() || !j.noneNew(n) {
-					rest = append(rest, k)
-					continue
+			if left := failures(n); left == 0 {
+				worst := worstOf(n)
+				record(r.id, fmt.Sprintf("Every check passes with %s; highest ratio, %s", words, worst.Name), worst.Ratio[worst.Worst])
+				for _, k := range failing {
+					found[k.Key] = true
 				}
-				found[k.Key] = true
-				symbol := fmt.Sprintf("r_%d", len(b.Entries))
-				b.Given(def(keyed(r.id+"-"+k.Key), symbol, k.Name+": with "+words, ""), quantity.Literal{Number: again.Ratio[again.Worst]}, "the design run again; ratio then")
+				first = nil
+				break
 			}
-			open = rest
+			for _, k := range failing {
+				again, ok := n.Entry(k.Key).(*trace.Check)
+				if _, had := first[k.Key]; !had && ok && !again.Failed() && j.noneNew(n) {
+					first[k.Key] = attempt{words, again.Ratio[again.Worst], failures(n)}
+				}
+			}
+		}
+		for _, k := range failing {
+			if t, ok := first[k.Key]; ok {
+				found[k.Key] = true
+				record(r.id+"-"+k.Key, fmt.Sprintf("%s passes with %s; checks failing still: %d", k.Name, t.words, t.left), t.ratio)
+			}
 		}
 	}
 	for _, k := range failing {
 		if !found[k.Key] {
-			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: more tendons in the lowest row and in a further row as far as they fit, f_ck up to 90 MPa, depth up to %d mm more.",
+			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: more tendons in the lowest row and in a further row as far as they fit, fewer tendons, two bars up to 25 mm, concrete up to 90 MPa, depth up to %d mm more.",
 				k.Name, k.Number, 50*remedies[len(remedies)-1].steps))
 		}
 	}
+}
+
+// attempt is a step of a remedy that mends one check and leaves others failing.
+type attempt struct {
+	words, ratio string
+	left         int
+}
+
+func failures(n *trace.Note) int {
+	count := 0
+	for _, k := range n.Checks() {
+		if k.Failed() {
+			count++
+		}
+	}
+	return count
+}
+
+// worstOf is the check with the highest ratio.
+func worstOf(n *trace.Note) *trace.Check {
+	return slices.MaxFunc(n.Checks(), func(a, b *trace.Check) int { return cmp.Compare(a.Value[a.Worst], b.Value[b.Worst]) })
 }
 
 // keyed makes an ID of a key: no slash and no point.
@@ -195,7 +153,8 @@ func keyed(key string) string {
 // try runs the design with one step of a remedy; no record where the step cannot be taken or nothing comes of it.
 func (j *job) try(r remedy, step int) (words string, n *trace.Note) {
 	m := *j.m
-	m.Strands.Rows = append([]member.StrandRow(nil), m.Strands.Rows...)
+	m.Strands.Rows = slices.Clone(m.Strands.Rows)
+	m.Bars.Rows = slices.Clone(m.Bars.Rows)
 	if words = r.apply(&m, step); words == "" {
 		return "", nil
 	}

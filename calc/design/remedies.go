@@ -1,0 +1,122 @@
+package design
+
+import (
+	"fmt"
+
+	"soffit/calc/member"
+)
+
+// remedy is one way to change a member, step by step; apply changes a copy and says in words what it did, or
+// returns "" where the step cannot be taken.
+type remedy struct {
+	id    string
+	steps int
+	apply func(m *member.Member, step int) string
+}
+
+// remedies are tried in this order, each from its smallest step up.
+var remedies = []remedy{
+	{"more-tendons", 8, moreTendons},
+	{"added-row", 6, addedRow},
+	{"fewer-tendons", 8, fewerTendons},
+	{"added-bars", 4, addedBars},
+	{"stronger-concrete", 8, strongerConcrete},
+	{"deeper-section", 12, deeperSection},
+}
+
+// lowest is the lowest row of tendons.
+func lowest(m *member.Member) *member.StrandRow {
+	low := 0
+	for i := range m.Strands.Rows {
+		if m.Strands.Rows[i].Height.Base() < m.Strands.Rows[low].Height.Base() {
+			low = i
+		}
+	}
+	return &m.Strands.Rows[low]
+}
+
+// moreTendons adds to the lowest row that has room.
+func moreTendons(m *member.Member, step int) string {
+	r := lowest(m)
+	before := r.Count.N
+	r.Count.N += step
+	f := formOf(&m.Shape)
+	edge := 2 * r.Height.Base() // as far from the sides as from the soffit
+	if float64(r.Count.N-1)*r.Spacing.Base() > f.lower[0].Quantity().Value-edge {
+		return ""
+	}
+	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
+}
+
+// addedRow puts a further row like the lowest one 50 mm above the rows of the lower half, two tendons a step.
+func addedRow(m *member.Member, step int) string {
+	rows := m.Strands.Rows
+	low, top := *lowest(m), 0.0
+	for _, r := range rows {
+		if h := r.Height.Base(); h < m.Shape.Depth.Base()/2 {
+			top = max(top, h)
+		}
+	}
+	like := low.Name.Text
+	low.Name.Text, low.Count.N = "added", 2*step
+	low.Height.Literal = number(top+50, "mm", places(top))
+	f := formOf(&m.Shape)
+	shape, err := f.shape()
+	if err != nil || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
+		return ""
+	}
+	m.Strands.Rows = append(rows, low)
+	return fmt.Sprintf("a further row of %d tendons like row %q at %s above the soffit", low.Count.N, like, low.Height)
+}
+
+// fewerTendons takes out of the lowest row: a member with too much steel fails without warning.
+func fewerTendons(m *member.Member, step int) string {
+	r := lowest(m)
+	if r.Count.N <= step {
+		return ""
+	}
+	before := r.Count.N
+	r.Count.N -= step
+	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
+}
+
+// addedBars puts two bars 45 mm above the lowest row, as far from the sides as that row is from the soffit.
+func addedBars(m *member.Member, step int) string {
+	low := lowest(m)
+	diameter := []string{"12", "16", "20", "25"}[step-1]
+	height := low.Height.Base() + 45
+	f := formOf(&m.Shape)
+	shape, err := f.shape()
+	if err != nil || shape.WidthAt(height) < 2*low.Height.Base()+60 {
+		return ""
+	}
+	bar := member.BarRow{Name: member.Word{Text: "added bars"}, Count: member.Count{N: 2}, DuctilityClass: member.Word{Text: "B"}}
+	bar.Diameter.Literal, bar.Fyk.Literal = plain(diameter, "mm"), plain("500", "MPa")
+	bar.Height.Literal = number(height, "mm", places(height))
+	bar.Spacing.Literal = number(shape.WidthAt(height)-2*low.Height.Base(), "mm", 0)
+	if len(m.Bars.Rows) > 0 {
+		bar.Fyk = m.Bars.Rows[0].Fyk
+	} else {
+		m.Bars.SteelDiagram.Text = "horizontal"
+	}
+	m.Bars.Rows = append(m.Bars.Rows, bar)
+	return fmt.Sprintf("two bars of %s mm more at %s above the soffit, %s", diameter, bar.Height, bar.Fyk)
+}
+
+// strongerConcrete raises f_ck by 5 MPa a step, to 90 MPa at most; the strength at release stays.
+func strongerConcrete(m *member.Member, step int) string {
+	v := m.Concrete.Fck.Base() + 5*float64(step)
+	if v > 90 {
+		return ""
+	}
+	before := m.Concrete.Fck.String()
+	m.Concrete.Fck.Literal = number(v, "MPa", 0)
+	return fmt.Sprintf("f_ck %s instead of %s", m.Concrete.Fck, before)
+}
+
+// deeperSection raises the depth by 50 mm a step; what is stated of the tendons stays.
+func deeperSection(m *member.Member, step int) string {
+	before := m.Shape.Depth.String()
+	m.Shape.Depth.Literal = number(m.Shape.Depth.Base()+50*float64(step), "mm", places(m.Shape.Depth.Base()))
+	return fmt.Sprintf("depth %s instead of %s, tendons at the same heights, the stated losses kept", m.Shape.Depth, before)
+}
