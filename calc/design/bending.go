@@ -66,7 +66,7 @@ func (j *job) trial(b *trace.Block) trace.Rows {
 }
 
 func (j *job) haunched() bool {
-	return j.form.haunch.Quantity().Value > 0
+	return j.form.haunch.Quantity().Value > 0 && j.form.flange.Quantity().Value > j.form.web.Quantity().Value
 }
 
 // stands asks on some stations whether every row reaches its limit with the neutral axis of a trial, which then

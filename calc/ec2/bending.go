@@ -41,21 +41,21 @@ var Prestrain = clause.Define(&clause.Formula{
 // Curvature is κ with the concrete at its limit.
 var Curvature = clause.Define(&clause.Formula{
 	ID: "curvature", Name: "Curvature, the top fibre at its ultimate strain", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = ε_cu3/x", Unit: "1/km", Digits: 6,
+	Text: "κ = ε_cu3/x", Unit: "1/km", Digits: 8,
 	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm"),
 })
 
 // CurvatureWithLimit is κ with the concrete or the outermost steel at its limit.
 var CurvatureWithLimit = clause.Define(&clause.Formula{
 	ID: "curvature-with-limit", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of tendons at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = min(ε_cu3/x; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Text: "κ = min(ε_cu3/x; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 8,
 	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{p,i} = 1140 mm", "ε_{pud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1426.1 MPa", "f_{pd,i} = 1426.1 MPa"),
 })
 
 // CurvatureWithBarLimit is CurvatureWithLimit with bars that have a limit too.
 var CurvatureWithBarLimit = clause.Define(&clause.Formula{
 	ID: "curvature-with-bar-limit", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of bars at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-	Text: "κ = min(ε_cu3/x; min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 6,
+	Text: "κ = min(ε_cu3/x; min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: ε_cu3/x)))", Unit: "1/km", Digits: 8,
 	Examples: hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{s,j} = 1140 mm", "ε_{sud,j} = 45 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa"),
 })
 
@@ -63,34 +63,34 @@ var CurvatureWithBarLimit = clause.Define(&clause.Formula{
 var CurvatureWithBothLimits = clause.Define(&clause.Formula{
 	ID: "curvature-with-both-limits", Name: "Curvature: the top fibre at its ultimate strain, or an anchored row of steel at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
 	Text: "κ = min(ε_cu3/x; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: ε_cu3/x)); min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: ε_cu3/x)))",
-	Unit: "1/km", Digits: 6,
+	Unit: "1/km", Digits: 8,
 	Examples: hand("24.889 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm", "d_{p,i} = 1140 mm", "ε_{pud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1426.1 MPa", "f_{pd,i} = 1426.1 MPa",
 		"d_{s,j} = 1140 mm", "ε_{sud,j} = 45 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa"),
 })
 
 // TopStrain is the strain of the top fibre.
 var TopStrain = clause.Define(&clause.Formula{
-	ID: "top-strain", Name: "Strain of the top fibre", Ref: en("6.1(3)P", ""), Text: "ε_c = κ·x", Unit: "‰",
+	ID: "top-strain", Name: "Strain of the top fibre", Ref: en("6.1(3)P", ""), Text: "ε_c = κ·x", Unit: "‰", Digits: 6,
 	Examples: hand("3.5 ‰", "κ = 29.429 1/km", "x = 118.93 mm"),
 })
 
 // TendonStrain is ε_p.
 var TendonStrain = clause.Define(&clause.Formula{
 	ID: "tendon-strain", Name: "Strain of each row: prestrain and that of bending", Ref: en(compatible, ""),
-	Text: "ε_{p,i} = ε_{p0,i} + κ·(d_{p,i} − x)", Unit: "‰", Digits: 6,
+	Text: "ε_{p,i} = ε_{p0,i} + κ·(d_{p,i} − x)", Unit: "‰", Digits: 7,
 	Examples: hand("36.136 ‰", "ε_{p0,i} = 6.087 ‰", "κ = 29.429 1/km", "d_{p,i} = 1140 mm", "x = 118.93 mm"),
 })
 
 // BarStrain is ε_s.
 var BarStrain = clause.Define(&clause.Formula{
-	ID: "bar-strain", Name: "Strain of each bar row", Ref: en(compatible, ""), Text: "ε_{s,j} = κ·(d_{s,j} − x)", Unit: "‰", Digits: 6,
+	ID: "bar-strain", Name: "Strain of each bar row", Ref: en(compatible, ""), Text: "ε_{s,j} = κ·(d_{s,j} − x)", Unit: "‰", Digits: 7,
 	Examples: hand("12.686 ‰", "κ = 29.429 1/km", "d_{s,j} = 550 mm", "x = 118.93 mm"),
 })
 
 // TendonStress is σ_p on the horizontal branch.
 var TendonStress = clause.Define(&clause.Formula{
 	ID: "tendon-stress", Name: "Stress of each row, at most what is anchored", Ref: en("3.3.6(7) Figure 3.10", ""),
-	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i}; σ_{av,i}))", Unit: "MPa",
+	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i}; σ_{av,i}))", Unit: "MPa", Digits: 6,
 	Examples: append(hand("1426.1 MPa", "σ_{av,i} = 1426.1 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 36 ‰", "f_{pd,i} = 1426.1 MPa"),
 		hand("975 MPa", "σ_{av,i} = 1426.1 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 5 ‰", "f_{pd,i} = 1426.1 MPa")...),
 })
@@ -98,7 +98,7 @@ var TendonStress = clause.Define(&clause.Formula{
 // TendonStressOnIncline is σ_p on the inclined branch.
 var TendonStressOnIncline = clause.Define(&clause.Formula{
 	ID: "tendon-stress-inclined", Name: "Stress of each row on the inclined branch, at most what is anchored", Ref: en("3.3.6(7) Figure 3.10", ""),
-	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{p,i} − ε_{py,i})/(ε_{puk,i} − ε_{py,i}); σ_{av,i}))", Unit: "MPa",
+	Text: "σ_{p,i} = max(−σ_{av,i}; min(E_{p,i}·ε_{p,i}; f_{pd,i} + (f_{pk,i}/γ_S − f_{pd,i})·(ε_{p,i} − ε_{py,i})/(ε_{puk,i} − ε_{py,i}); σ_{av,i}))", Unit: "MPa", Digits: 6,
 	Examples: hand("1593.2 MPa", "σ_{av,i} = 1600 MPa", "E_{p,i} = 195 GPa", "ε_{p,i} = 31.5 ‰", "f_{pd,i} = 1426.1 MPa", "f_{pk,i} = 1860 MPa",
 		"γ_S = 1.15", "ε_{py,i} = 7.3133 ‰", "ε_{puk,i} = 35 ‰"),
 })
@@ -106,7 +106,7 @@ var TendonStressOnIncline = clause.Define(&clause.Formula{
 // BarStress is σ_s on the horizontal branch, the same in compression.
 var BarStress = clause.Define(&clause.Formula{
 	ID: "bar-stress", Name: "Stress of each bar row, at most what is anchored", Ref: en("3.2.7(2) Figure 3.8", ""),
-	Text: "σ_{s,j} = max(−σ_{sa,j}; min(E_s·ε_{s,j}; σ_{sa,j}))", Unit: "MPa",
+	Text: "σ_{s,j} = max(−σ_{sa,j}; min(E_s·ε_{s,j}; σ_{sa,j}))", Unit: "MPa", Digits: 6,
 	Examples: append(hand("434.78 MPa", "σ_{sa,j} = 434.78 MPa", "E_s = 200 GPa", "ε_{s,j} = 12 ‰"),
 		hand("-200 MPa", "σ_{sa,j} = 434.78 MPa", "E_s = 200 GPa", "ε_{s,j} = -1 ‰")...),
 })
@@ -115,20 +115,20 @@ var BarStress = clause.Define(&clause.Formula{
 var BarStressOnIncline = clause.Define(&clause.Formula{
 	ID: "bar-stress-inclined", Name: "Stress of each bar row on the inclined branch, at most what is anchored", Ref: en("3.2.7(2) Figure 3.8", ""),
 	Text: "σ_{s,j} = max(−σ_{sa,j}; −f_{yd,j}·(1 + (k_{s,j} − 1)·max(0; −ε_{s,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j})); " +
-		"min(E_s·ε_{s,j}; f_{yd,j}·(1 + (k_{s,j} − 1)·max(0; ε_{s,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j})); σ_{sa,j}))", Unit: "MPa",
+		"min(E_s·ε_{s,j}; f_{yd,j}·(1 + (k_{s,j} − 1)·max(0; ε_{s,j} − ε_{sy,j})/(ε_{suk,j} − ε_{sy,j})); σ_{sa,j}))", Unit: "MPa", Digits: 6,
 	Examples: hand("465.9 MPa", "σ_{sa,j} = 480 MPa", "E_s = 200 GPa", "ε_{s,j} = 45 ‰", "f_{yd,j} = 434.78 MPa", "k_{s,j} = 1.08",
 		"ε_{sy,j} = 2.1739 ‰", "ε_{suk,j} = 50 ‰"),
 })
 
 // TendonForce is F_p.
 var TendonForce = clause.Define(&clause.Formula{
-	ID: "tendon-force", Name: "Force of each row", Ref: en(compatible, ""), Text: "F_{p,i} = A_{p,i}·σ_{p,i}", Unit: "kN", Digits: 6,
+	ID: "tendon-force", Name: "Force of each row", Ref: en(compatible, ""), Text: "F_{p,i} = A_{p,i}·σ_{p,i}", Unit: "kN", Digits: 7,
 	Examples: hand("1585.82 kN", "A_{p,i} = 1112 mm²", "σ_{p,i} = 1426.1 MPa"),
 })
 
 // BarForce is F_s.
 var BarForce = clause.Define(&clause.Formula{
-	ID: "bar-force", Name: "Force of each bar row", Ref: en(compatible, ""), Text: "F_{s,j} = A_{s,j}·σ_{s,j}", Unit: "kN", Digits: 6,
+	ID: "bar-force", Name: "Force of each bar row", Ref: en(compatible, ""), Text: "F_{s,j} = A_{s,j}·σ_{s,j}", Unit: "kN", Digits: 7,
 	Examples: hand("349.672 kN", "A_{s,j} = 804.25 mm²", "σ_{s,j} = 434.78 MPa"),
 })
 
@@ -168,7 +168,7 @@ var (
 // AxisRoot is the neutral axis found from compatible strains.
 func axisRoot(residual *clause.Formula, equation string) *clause.Root {
 	return &clause.Root{ID: "axis-root", Name: "Depth of the neutral axis from compatible strains", Ref: en(compatible, ""),
-		Unknown: "x", Unit: "mm", Digits: 7, Equation: equation, Residual: residual, Scale: "F_c", Tolerance: 2e-4}
+		Unknown: "x", Unit: "mm", Digits: 7, Equation: equation, Residual: residual, Scale: "F_c", Tolerance: 1e-3}
 }
 
 // The unknown depth of the neutral axis, with and without bars.

@@ -67,9 +67,9 @@ var UltimateStrain1 = clause.Define(&clause.Formula{
 // ParabolaStrain is ε_c2.
 var ParabolaStrain = clause.Define(&clause.Formula{
 	ID: "parabola-strain", Name: "Strain at the end of the parabola", Ref: en("3.1.7(1) Table 3.1", ""),
-	Text: "ε_c2 = cases(f_ck ≤ 50·[MPa]: 2.0; otherwise: 2.0 + 0.085·(f_ck/[MPa] − 50)^0.53)·[‰]", Unit: "‰",
+	Text: "ε_c2 = cases(f_ck ≤ 50·[MPa]: 2.0; otherwise: min(2.6; 2.0 + 0.085·(f_ck/[MPa] − 50)^0.53))·[‰]", Unit: "‰",
 	Domain:   strengthDomain,
-	Examples: []clause.Example{by(table31, clause.Recalled, "2.3 ‰", "f_ck = 60 MPa"), by(table31, clause.Recalled, "2.0 ‰", "f_ck = 30 MPa")},
+	Examples: []clause.Example{by(table31, clause.Recalled, "2.3 ‰", "f_ck = 60 MPa"), by(table31, clause.Recalled, "2.0 ‰", "f_ck = 30 MPa"), by(table31, clause.Recalled, "2.6000 ‰", "f_ck = 90 MPa")},
 })
 
 // UltimateStrain2 is ε_cu2.

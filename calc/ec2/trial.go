@@ -7,14 +7,14 @@ import "soffit/calc/clause"
 // LimitForce is the steel force with every tendon row at what it can carry.
 var LimitForce = clause.Define(&clause.Formula{
 	ID: "limit-force", Name: "Tension with every row at its limit, to be confirmed", Ref: en(compatible, ""),
-	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i})", Unit: "kN",
+	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i})", Unit: "kN", Digits: 7,
 	Examples: hand("1585.8 kN", "A_{p,i} = 1112 mm²", "σ_{av,i} = 1426.1 MPa"),
 })
 
 // LimitForceWithBars is LimitForce with bars.
 var LimitForceWithBars = clause.Define(&clause.Formula{
 	ID: "limit-force-with-bars", Name: "Tension with every row and every bar at its limit, to be confirmed", Ref: en(compatible, ""),
-	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i}) + Σ_j(A_{s,j}·σ_{sa,j})", Unit: "kN",
+	Text: "F_lim = Σ_i(A_{p,i}·σ_{av,i}) + Σ_j(A_{s,j}·σ_{sa,j})", Unit: "kN", Digits: 7,
 	Examples: hand("1935.5 kN", "A_{p,i} = 1112 mm²", "σ_{av,i} = 1426.1 MPa", "A_{s,j} = 804.25 mm²", "σ_{sa,j} = 434.78 MPa"),
 })
 
@@ -45,7 +45,7 @@ var NoResistanceCompressed = clause.Define(&clause.Formula{
 // FlangeTrial is the neutral axis with the block in the flange.
 var FlangeTrial = clause.Define(&clause.Formula{
 	ID: "axis-flange-trial", Name: "Depth of the neutral axis if the block lies in the top part", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_f = F_lim/(λ·η·f_cd·b_f)", Unit: "mm", Digits: 6,
+	Text: "x_f = F_lim/(λ·η·f_cd·b_f)", Unit: "mm", Digits: 7,
 	Examples: hand("118.936 mm", "F_lim = 1585.8 kN", "λ = 0.8", "η = 1", "f_cd = 33.333 MPa", "b_f = 500 mm"),
 })
 
@@ -73,7 +73,7 @@ var HaunchDepth = clause.Define(&clause.Formula{
 // HaunchTrial is the neutral axis with the lower edge of the block in the haunch below the flange.
 var HaunchTrial = clause.Define(&clause.Formula{
 	ID: "axis-haunch-trial", Name: "Depth of the neutral axis if the block ends in the haunch", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_h = (h_f + c_h)/λ", Unit: "mm", Digits: 6,
+	Text: "x_h = (h_f + c_h)/λ", Unit: "mm", Digits: 7,
 	Examples: hand("177.606 mm", "h_f = 100 mm", "c_h = 42.0844 mm", "λ = 0.8"),
 })
 
@@ -86,7 +86,7 @@ var BlockInHaunch = &clause.Condition{
 // WebTrial is the neutral axis with the lower edge of the block in the web.
 var WebTrial = clause.Define(&clause.Formula{
 	ID: "axis-web-trial", Name: "Depth of the neutral axis if the block ends in the web", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_w = (h_f + h_h + (F_lim/(η·f_cd) − b_f·h_f − (b_f + b_w)/2·h_h)/b_w)/λ", Unit: "mm", Digits: 6,
+	Text: "x_w = (h_f + h_h + (F_lim/(η·f_cd) − b_f·h_f − (b_f + b_w)/2·h_h)/b_w)/λ", Unit: "mm", Digits: 7,
 	Examples: hand("312.5 mm", "h_f = 100 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "F_lim = 1700 kN", "η = 1", "f_cd = 20 MPa", "λ = 0.8"),
 })
 
@@ -116,7 +116,7 @@ func trial(place, x string) Trial {
 			Examples: hand("12.686 ‰", "ε_cu3 = 3.5 ‰", "d_{s,j} = 550 mm", x+" = 118.93 mm"),
 		}),
 		Axis: clause.Define(&clause.Formula{ID: "axis-" + place, Name: "Depth of the neutral axis: the trial stands", Ref: en(compatible, ""),
-			Text: "x = " + x, Unit: "mm", Digits: 6, Examples: hand("118.93 mm", x+" = 118.93 mm")}),
+			Text: "x = " + x, Unit: "mm", Digits: 7, Examples: hand("118.93 mm", x+" = 118.93 mm")}),
 		RowsYield: &clause.Condition{
 			ID: "every-row-yields-" + place, Name: "Tendons on the trial", Ref: en(compatible, ""), Text: "min_i(ε_{t,i} − σ_{av,i}/E_{p,i}) ≥ 0",
 			Yes: "every row reaches its limit", No: "not every row reaches its limit: strains decide"},
