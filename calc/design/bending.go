@@ -15,6 +15,8 @@ func (j *job) bending(b *trace.Block) {
 		b.Step(ec2.BarCounts)
 	}
 	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
+	there, _ := b.Choose(ec2.TensionSteelThere)
+	b.On(there, func() { b.Step(pick(j.hasBars(), ec2.TensionDepthWithBars, ec2.TensionDepth)) })
 	b.Step(pick(j.hasBars(), ec2.LimitForceWithBars, ec2.LimitForce))
 	anchored, bare := b.Choose(ec2.SteelAnchored)
 	b.On(anchored, func() {
@@ -25,12 +27,12 @@ func (j *job) bending(b *trace.Block) {
 		b.On(wholly, func() { b.Step(ec2.NoResistanceCompressed) })
 		b.On(partly, func() {
 			j.compatible(b)
-			j.kindOfFailure(b)
+			j.kindOfFailure(b, there)
 		})
 	})
 	b.On(bare, func() { b.Step(ec2.NoResistance) })
 	b.Check(ec2.BendingSufficient)
-	if anchored.Any() {
+	if b.Has(ec2.ConcreteForce.ID) {
 		j.bendingFigures(b)
 	}
 }
@@ -133,11 +135,10 @@ func (j *job) compatible(b *trace.Block) {
 	b.Step(pick(j.hasBars(), ec2.ResistanceWithBars, ec2.Resistance))
 }
 
-// kindOfFailure says what ends the resistance: anchorage, steel or concrete.
-func (j *job) kindOfFailure(b *trace.Block) {
-	there, _ := b.Choose(ec2.TensionSteelThere)
+// kindOfFailure says what ends the resistance: anchorage, steel or concrete. there is where steel in the tension zone is
+// bonded.
+func (j *job) kindOfFailure(b *trace.Block, there trace.Rows) {
 	b.On(there, func() {
-		b.Step(pick(j.hasBars(), ec2.TensionDepthWithBars, ec2.TensionDepth))
 		b.Steps(ec2.AxisRatio, ec2.LeastAnchorage)
 		anchored, _ := b.Choose(ec2.EveryRowAnchored)
 		b.On(anchored, func() {
@@ -160,8 +161,11 @@ func pick[T any](yes bool, a, b T) T {
 
 func (j *job) bendingFigures(b *trace.Block) {
 	at := j.stations.Rows[b.Row]
+	if !trace.LineOf(j.n.Entry(b.Path() + "/" + ec2.ConcreteForce.ID)).Taken(b.Row) {
+		at = j.largest(b.Path() + "/" + j.resistanceID()) // nothing resists where it is worst
+	}
 	plots := []trace.Plot{{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"}, {Role: "upper", Key: "given.section/part-upper"},
-		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b)}, {Role: "block-depth", Key: pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID},
+		{Role: "h", Key: "given.section/depth"}, {Role: "neutral-axis", Key: j.axisKey(b, at)}, {Role: "block-depth", Key: pick(j.limited(), ec2.ReducedBlockDepth, ec2.BlockDepth).ID},
 		{Role: "block-stress", Key: pick(j.limited(), ec2.ReducedBlockStress, ec2.BlockStress).ID}, {Role: "block-force", Key: "concrete-force"}, {Role: "block-centroid", Key: "concrete-force-depth"},
 		{Role: "strain-top", Key: "top-strain"}, {Role: "depth", Key: "section.positions/tendon-depth"}, {Role: "prestrain", Key: "prestrain"},
 		{Role: "count", Key: "given.tendons/count"}, {Role: "spacing", Key: "given.tendons/spacing"}, {Role: "diameter", Key: "given.tendons/diameter"},
@@ -186,10 +190,10 @@ func (j *job) resistanceID() string {
 	return pick(j.hasBars(), ec2.ResistanceWithBars, ec2.Resistance).ID
 }
 
-// axisKey is the entry that gives the neutral axis on the row worked in full.
-func (j *job) axisKey(b *trace.Block) string {
+// axisKey is the entry that gives the neutral axis at a station.
+func (j *job) axisKey(b *trace.Block, at string) string {
 	for _, id := range []string{"axis-flange", "axis-haunch", "axis-web", "axis-root"} {
-		if l := trace.LineOf(j.n.Entry(b.Path() + "/" + id)); l != nil && l.Taken(b.Row) {
+		if l := trace.LineOf(j.n.Entry(b.Path() + "/" + id)); l != nil && l.Taken(j.stations.Row(at)) {
 			return id
 		}
 	}

@@ -217,6 +217,55 @@ func TestOverReinforced(t *testing.T) {
 	}
 }
 
+// TestWhollyCompressed: too much steel gives a note that fails and says why, not a resistance.
+func TestWhollyCompressed(t *testing.T) {
+	rows := ""
+	for _, h := range []int{50, 95, 140, 185} {
+		rows += fmt.Sprintf("    - {name: h%d, product: Y1860S7-15.7, count: 4, spacing: 45 mm, height: %d mm, jacking stress: 1340 MPa, stated losses: {at release: 100 MPa, final: 250 MPa, source: invented}}\n", h, h)
+	}
+	n := beam{concrete: "{f_ck: 30 MPa, unit weight: 25 kN/m³, f_ck at release: 25 MPa}", shape: "{kind: rectangle, width: 250 mm, depth: 600 mm}",
+		strands: "  bond: good\n  rows:\n" + strings.TrimSuffix(rows, "\n")}.run(t)
+	c, ok := n.Entry("ultimate.bending/bending-sufficient").(*trace.Check)
+	if !ok || !c.Failed() || c.Margin[c.Worst] == "" {
+		t.Errorf("bending must fail, with a margin in place of a ratio: %+v", c)
+	}
+	text, ok := n.Entry("verdict.checks/remarks").(*trace.Text)
+	if !ok || !strings.Contains(text.Markdown, "wholly compressed") {
+		t.Errorf("the verdict does not say why: %+v", text)
+	}
+}
+
+// TestNarrative: a text may name any value that stands once in its chapter or in the note; what it names wrongly is a
+// finding with its line.
+func TestNarrative(t *testing.T) {
+	for text, want := range map[string]string{
+		"It resists {M_Rd}, {f_cd} of concrete.":       "",
+		"Largest: {actions.ultimate/moment}.":          "",
+		"A {M_Rdx}.":                                   "beam.yaml:16:3: narrative, ultimate: {M_Rdx}: no step of the note gives this symbol",
+		"A {f_{pd,i}}.":                                "single values only",
+		"A {a b}.":                                     "is no symbol",
+		"A {ultimate.bending/nothing}.":                "no value under this name",
+		"Code such as `{M_Rdx}` stays as it is written": "",
+	} {
+		src := beam{}.text() + "narrative:\n  ultimate: |\n    " + text + "\n"
+		m, findings := member.Read("beam.yaml", []byte(src), design.Options())
+		if err := findings.Err(); err != nil {
+			t.Fatal(err)
+		}
+		n, err := design.Run(m)
+		switch {
+		case want == "" && err != nil:
+			t.Errorf("%s: %v", text, err)
+		case want == "":
+			if e, ok := n.Entry("ultimate.bending/narrative").(*trace.Text); !ok || e.Markdown != text {
+				t.Errorf("%s: recorded as %+v", text, e)
+			}
+		case err == nil || !strings.Contains(err.Error(), want):
+			t.Errorf("%s: %v, want %q", text, err, want)
+		}
+	}
+}
+
 // TestSecondMethodsAgree: fibres and block within 2 % at every station of the samples where the top crushes, influence
 // lines and equilibrium within 0.01 kN·m.
 func TestSecondMethodsAgree(t *testing.T) {

@@ -1,6 +1,8 @@
 package design
 
 import (
+	"strings"
+
 	"soffit/calc/ec2"
 	"soffit/calc/member"
 )
@@ -13,8 +15,10 @@ func Options() member.Options {
 	o := member.Options{Narratives: Narratives}
 	for _, p := range ec2.Parameters {
 		s := member.ParameterSpec{Key: p.Given.Symbol, Ascii: p.ASCII, Min: p.Min, Max: p.Max, Unit: p.Given.Unit, Symbols: p.Symbols, Rows: p.Rows}
+		s.Name, s.Recommended = p.Given.Name, p.Value
 		switch {
 		case p.Formula != nil:
+			_, s.Recommended, _ = strings.Cut(p.Formula.Text, " = ")
 			s.Kind = member.Expression
 		case p.Rows != nil:
 			s.Kind, s.Columns, s.Max = member.Table, len(p.Table[0]), 1

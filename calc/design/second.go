@@ -54,8 +54,8 @@ const pieces = 500
 func (j *job) secondBending(c *trace.Chapter) {
 	b := c.Block("bending", "Bending with fibres after the parabola–rectangle law", j.stations, append(j.steel, trace.Take(j.resistance)...)...)
 	b.Row = j.resistance.Row
-	anchored, _ := b.Choose(ec2.SteelAnchored)
-	b.On(anchored, func() {
+	resisting, _ := b.Choose(ec2.Resists)
+	b.On(resisting, func() {
 		beam := bending.NewSection(j.shape)
 		b.Found("fibres of concrete after the parabola–rectangle law, 3.1.7(1), balanced by a bracketed search", 6, func(r *trace.Row) ([]float64, error) {
 			layers, err := j.layers(r)

@@ -55,20 +55,26 @@ func (j *job) cracked(c *trace.Chapter) {
 	b.Step(ec2.BottomStress)
 	cracked, _ := b.Choose(ec2.CrackedAtUltimate)
 	b.On(cracked, func() {
-		b.Step(ec2.LargestShear)
-		there, none := b.Choose(ec2.TensionSteelThere)
-		b.On(there, func() { b.Step(ec2.LeverArm) })
-		b.On(none, func() { b.Step(ec2.LeverArmOfDepth) })
-		b.Steps(ec2.AddedMoment, ec2.MomentWithShear)
-		b.Check(ec2.BendingWithShear)
-		b.Text("warning", templates.Text("warning"))
-		b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
-		b.Check(ec2.FailureWithWarning)
+		resisting, _ := b.Choose(ec2.Resists)
+		b.On(resisting, func() { j.withShear(b) })
 	})
-	if !cracked.Any() {
+	if !b.Has("failure-with-warning") {
 		return
 	}
 	b.Table("along", "Stations along the span: cracks, tension added by shear, warning", j.stations, "actions.effects/position", "bottom-stress", "added-moment", "moment-with-shear", "bending-with-shear", "cracking-moment", "failure-with-warning")
+}
+
+// withShear adds the tension of the shear force where the section cracks, and asks for cracks before failure.
+func (j *job) withShear(b *trace.Block) {
+	b.Step(ec2.LargestShear)
+	there, none := b.Choose(ec2.TensionSteelThere)
+	b.On(there, func() { b.Step(ec2.LeverArm) })
+	b.On(none, func() { b.Step(ec2.LeverArmOfDepth) })
+	b.Steps(ec2.AddedMoment, ec2.MomentWithShear)
+	b.Check(ec2.BendingWithShear)
+	b.Text("warning", templates.Text("warning"))
+	b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
+	b.Check(ec2.FailureWithWarning)
 }
 
 // steelLimits checks minimum steel at every station where steel is bonded in the tension zone, and maximum steel.

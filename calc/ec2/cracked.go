@@ -15,6 +15,9 @@ var BottomStress = clause.Define(&clause.Formula{
 var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
 	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage for bending cracks"}
 
+// Resists asks whether any resistance is counted at the station.
+var Resists = &clause.Condition{ID: "resists", Name: "Resistance at the station", Text: "M_Rd > 0·[kN·m]", Yes: "a resistance is counted here", No: "no resistance is counted here: bending fails already"}
+
 // LargestShear is the largest shear force at a station, either side and sign.
 var LargestShear = clause.Define(&clause.Formula{
 	ID: "largest-shear", Name: "Largest shear force at the station", Text: "V_max = max(abs(V_{Ed,l}); abs(V_{Ed,l,min}); abs(V_{Ed,r}); abs(V_{Ed,r,min}))", Unit: "kN", Digits: 6,

@@ -38,8 +38,7 @@ func (r *reader) checkActions(m *Member) {
 func (r *reader) checkLoad(l *Load, length Value) {
 	switch u, p := l.Uniform.Given, l.Point.Given; {
 	case u && p:
-		r.at(l.Point.Origin, "point: have a point load beside a uniform one, want one of them", "begin a load of its own with -")
-		return
+		return // a finding already
 	case known(l.From, l.To) && !exceeds(l.To.Base(), l.From.Base()):
 		const hint = "write from and to as distances from end A of the concrete"
 		if l.To.Given {

@@ -38,6 +38,9 @@ func (r *reader) mapping(n *node.Node, into reflect.Value, label string, at plac
 	}
 	seen := r.entries(n, p, label)
 	for i := range p.fields {
+		if f := &p.fields[i]; f.or != "" {
+			r.oneOf(f, p, seen, label, at)
+		}
 		r.field(&p.fields[i], p, seen, into, label, at, n.Pos)
 	}
 }
@@ -91,13 +94,13 @@ func (p *plan) meant(key string, word func(string) string) (near, hint string) {
 			return near, "write " + near
 		}
 	}
-	for _, home := range homes()[key] {
-		if home == "" {
-			return "", key + " stands at the margin, in no group"
-		}
-		return "", key + " belongs under " + home
+	hint = "the keys here: " + strings.Join(keys, ", ")
+	if known := homes()[key]; len(known) > 0 && known[0] == "" {
+		hint = key + " stands at the margin, in no group; " + hint
+	} else if len(known) > 0 {
+		hint = key + " belongs under " + known[0] + "; " + hint
 	}
-	return "", "the keys here: " + strings.Join(keys, ", ")
+	return "", hint
 }
 
 // wordIn tells the word of a key of the mapping as written, "" where there is none.
@@ -132,6 +135,22 @@ func (r *reader) field(f *field, p *plan, seen map[string]node.Entry, into refle
 		msg += ", want " + f.want(to.Type())
 	}
 	r.find(at, msg, f.add(to.Type()))
+}
+
+// oneOf finds two keys of which one stands in the place of the other, and the lack of both. Where a key that belongs
+// beside one of them is there, it has its finding already.
+func (r *reader) oneOf(f *field, p *plan, seen map[string]node.Entry, label string, at place) {
+	_, first := seen[f.key]
+	second, also := seen[f.or]
+	switch {
+	case first && also:
+		r.find(placeOf(second.Value), f.or+": have it beside "+f.key+", want one of them", "write one of them here, and the other in a row of its own")
+	case !first && !also && !slices.ContainsFunc(p.fields, func(o field) bool {
+		_, there := seen[o.key]
+		return there && (o.with == f.key || o.with == f.or)
+	}):
+		r.find(at, label+": have no "+f.key+" and no "+f.or+", want one of them", "add, for example, "+f.key+": "+f.example)
+	}
 }
 
 // belongs reports whether the key has its place here, and whether that is certain. A key that is written

@@ -21,13 +21,15 @@ const (
 
 // ParameterSpec is one nationally determined parameter.
 type ParameterSpec struct {
-	Key, Ascii string // "α_cc", "alpha_cc"
-	Kind       ParameterKind
-	Min, Max   float64                 // bounds of a value, in Unit; both 0: none
-	Unit       string                  // of the value, of the result of the expression, of the table's values
-	Symbols    map[string]quantity.Dim // that an expression may use, by their names in formulas
-	Rows       []string                // of a table
-	Columns    int                     // of a table
+	Key, Ascii  string // "α_cc", "alpha_cc"
+	Kind        ParameterKind
+	Min, Max    float64                 // bounds of a value, in Unit; both 0: none
+	Unit        string                  // of the value, of the result of the expression, of the table's values
+	Symbols     map[string]quantity.Dim // that an expression may use, by their names in formulas
+	Rows        []string                // of a table
+	Columns     int                     // of a table
+	Name        string                  // in words; for the schema
+	Recommended string                  // value or expression that stands without an entry, "" for a table; for the schema
 }
 
 // ProductSpec is a prestressing product of the tables, as far as reading needs it.

@@ -36,10 +36,10 @@ type TableRow struct {
 
 // parameterText is a parameter as it stands in the file.
 type parameterText struct {
-	Value      *node.Node `key:"value?"`
-	Expression *node.Node `key:"expression?"`
-	Table      *node.Node `key:"table?"`
-	Source     Word       `key:"source" eg:"national annex, clause"`
+	Value      *node.Node `key:"value?" what:"value that replaces the recommended one"`
+	Expression *node.Node `key:"expression?" what:"expression in symbols of the note"`
+	Table      *node.Node `key:"table?" what:"rows of values, all of them; repeat the recommended ones where they stay"`
+	Source     Word       `key:"source" eg:"national annex, clause" what:"document and clause that state it"`
 }
 
 // spelled is a parameter's key without what may be left out in writing.

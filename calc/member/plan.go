@@ -35,6 +35,9 @@ type field struct {
 	when     string // the key that decides whether this one belongs here
 	of       []string
 	with     string // the key beside which this one belongs
+	or       string // the key in whose place this one may stand
+	among    string // the key whose rows this one names
+	what     string // what the key holds
 }
 
 var (
@@ -72,7 +75,8 @@ func planOf(t reflect.Type) *plan {
 
 func newField(index int, s reflect.StructField, key string) field {
 	tag := s.Tag
-	f := field{index: index, example: tag.Get("eg"), std: tag.Get("default"), why: tag.Get("why"), name: tag.Get("text") == "name", with: tag.Get("with")}
+	f := field{index: index, example: tag.Get("eg"), std: tag.Get("default"), why: tag.Get("why"), name: tag.Get("text") == "name",
+		with: tag.Get("with"), or: tag.Get("or"), among: tag.Get("among"), what: tag.Get("what")}
 	f.key, f.optional = strings.CutSuffix(key, "?")
 	if w := tag.Get("words"); w != "" {
 		f.words = strings.Split(w, "|")

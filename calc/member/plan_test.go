@@ -3,6 +3,7 @@ package member
 import (
 	"reflect"
 	"slices"
+	"strings"
 	"testing"
 )
 
@@ -30,6 +31,12 @@ func TestPlans(t *testing.T) {
 			if (f.std == "") != (f.why == "") || f.std != "" && !f.optional {
 				t.Errorf("%v %s: a default goes with a reason and a key that may be left out", typ, f.key)
 			}
+			if f.what == "" || strings.HasSuffix(f.what, ".") || strings.TrimSpace(f.what) != f.what {
+				t.Errorf("%v %s: what it holds is not said, or not in the way of the others: %q", typ, f.key, f.what)
+			}
+			if f.or != "" && !(f.optional && p.find(f.or) != nil && p.find(f.or).optional) {
+				t.Errorf("%v %s: of two keys that stand for one another both may be left out", typ, f.key)
+			}
 			for _, by := range []string{f.when, f.with} {
 				if by != "" && p.find(by) == nil {
 					t.Errorf("%v %s: depends on %s, which is no key", typ, f.key, by)
@@ -55,6 +62,7 @@ func TestPlans(t *testing.T) {
 		}
 	}
 	visit(reflect.TypeFor[Member]())
+	visit(reflect.TypeFor[parameterText]())
 	if keys < 80 {
 		t.Errorf("%d keys visited", keys)
 	}

@@ -3,6 +3,7 @@ package member
 import (
 	"fmt"
 	"reflect"
+	"slices"
 	"strings"
 	"unicode/utf8"
 
@@ -121,10 +122,13 @@ func either(words []string) string {
 	return words[0]
 }
 
-// instead proposes the word that was likely meant, or all of them.
+// instead proposes the word that was likely meant, or all of them. A word that one alone begins with means that one.
 func instead(word string, known []string) string {
+	begun := slices.DeleteFunc(slices.Clone(known), func(k string) bool { return len(word) < 3 || !strings.HasPrefix(k, word) })
 	near, ok := quantity.Nearest(word, known)
 	switch {
+	case len(begun) == 1:
+		return "write " + begun[0]
 	case ok:
 		return "write " + near
 	case len(known) == 0:

@@ -4,6 +4,7 @@ import (
 	"flag"
 	"os"
 	"path/filepath"
+	"regexp"
 	"strings"
 	"testing"
 )
@@ -62,5 +63,27 @@ func TestBad(t *testing.T) {
 	}
 	if len(distinct) < 150 {
 		t.Errorf("%d distinct findings", len(distinct))
+	}
+}
+
+var instructs = regexp.MustCompile(`\b(write|add|begin)\b|the keys here: `)
+
+// TestNewcomers reads what people write who see the member file for the first time: every finding says what to write.
+func TestNewcomers(t *testing.T) {
+	people := 0
+	for name, src := range files(t, bad) {
+		if !strings.HasPrefix(name, "new-") {
+			continue
+		}
+		people++
+		_, found := Read(name, src, testOptions)
+		for _, f := range found {
+			if !instructs.MatchString(f.Hint) {
+				t.Errorf("does not say what to write: %s", f)
+			}
+		}
+	}
+	if people < 10 {
+		t.Errorf("%d people", people)
 	}
 }

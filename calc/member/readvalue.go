@@ -55,6 +55,9 @@ func (f *field) inRange(l quantity.Literal) string {
 			return "write " + m.String()
 		}
 	}
+	if f.what != "" {
+		return "write a value within these bounds: " + f.what
+	}
 	return "write a value within these bounds"
 }
 
@@ -64,29 +67,54 @@ func (f *field) write(s string, err error) string {
 	if !errors.As(err, &e) {
 		return ""
 	}
+	if l, err := quantity.Parse(s); err == nil {
+		return f.other(l)
+	}
 	if proposal, ok := strings.CutPrefix(e.Hint, "write "); ok {
-		if l, err := quantity.ParseAs(proposal, f.eg.Unit.Dim()); err == nil && !plainNumber(s) && f.within(l) && !strings.HasPrefix(e.Msg, "have") {
-			return e.Hint
-		}
 		if strings.Contains(proposal, " or ") { // a comma that can be read in two ways
 			return e.Hint
 		}
-	}
-	if l, err := quantity.ParseAs(digits(s), f.eg.Unit.Dim()); err == nil && digits(s) != s {
-		return "write " + l.String()
-	}
-	found := strings.Replace(number.FindString(strings.TrimSpace(s)), ",", ".", 1)
-	if l, err := quantity.Parse(found); err == nil {
-		hint := "write " + quantity.Literal{Number: l.Number, Unit: f.unitFor(l.Number)}.String()
-		if strings.HasPrefix(e.Msg, "unknown unit") && e.Hint == "" {
-			return e.Msg + "; " + hint
+		if l, err := quantity.ParseAs(proposal, f.eg.Unit.Dim()); err == nil && f.within(l) {
+			return e.Hint
 		}
-		return hint
+	}
+	for _, mended := range []string{digits(s), pointed(s)} {
+		if l, err := quantity.ParseAs(mended, f.eg.Unit.Dim()); err == nil && mended != s {
+			return "write " + l.String()
+		}
 	}
 	if strings.Contains(e.Msg, "does not begin with a number") {
 		return "write, for example, " + f.example
 	}
+	if strings.HasPrefix(e.Msg, "unknown unit") && e.Hint == "" {
+		return e.Msg + "; write, for example, " + f.example
+	}
+	found := strings.Replace(number.FindString(strings.TrimSpace(s)), ",", ".", 1)
+	if l, err := quantity.Parse(found); err == nil {
+		return f.other(l)
+	}
 	return e.Msg + "; write, for example, " + f.example
+}
+
+// gravity turns a mass into its weight.
+var gravity = quantity.Literal{Number: "9.81", Unit: quantity.MustUnit("m/s²")}.Quantity()
+
+// other is the hint for a value that can be read, but is of another dimension: a unit left out or mistaken, a mass
+// instead of its weight, a load by area instead of by length.
+func (f *field) other(l quantity.Literal) string {
+	have, want := l.Unit.Dim(), f.eg.Unit.Dim()
+	switch {
+	case have.Mul(gravity.Dim) == want:
+		weight := f.eg.Unit.From(l.Quantity().Value * gravity.Value)
+		return "write " + quantity.Literal{Number: short(weight), Unit: f.eg.Unit}.String() + ", the weight of " + l.String()
+	case have.Mul(quantity.Length) == want && have != quantity.None:
+		return "write, for example, " + f.example + ": " + l.String() + " times the width that goes with it"
+	case have != quantity.None || l.Unit.String() == "":
+		if m := (quantity.Literal{Number: l.Number, Unit: f.unitFor(l.Number)}); f.within(m) {
+			return "write " + m.String()
+		}
+	}
+	return "write, for example, " + f.example
 }
 
 // digits replaces letters that stand for digits in a number, the O of "16O mm".
@@ -98,9 +126,13 @@ func digits(s string) string {
 	return strings.NewReplacer("O", "0", "o", "0", "l", "1", "I", "1").Replace(s[:n]) + s[n:]
 }
 
-func plainNumber(s string) bool {
-	l, err := quantity.Parse(s)
-	return err == nil && l.Unit.String() == ""
+// grouped is a number in groups of three behind points, with a decimal comma.
+var grouped = regexp.MustCompile(`^[0-9]{1,3}((?:\.[0-9]{3})+),[0-9]+`)
+
+// pointed writes such a number with a decimal point alone.
+func pointed(s string) string {
+	n := len(grouped.FindString(s))
+	return strings.Replace(strings.ReplaceAll(s[:n], ".", ""), ",", ".", 1) + s[n:]
 }
 
 // shared are units of one dimension that a number without unit may have been meant in.

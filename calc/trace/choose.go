@@ -54,12 +54,16 @@ func (b *Block) Choose(c *clause.Condition) (yes, no Rows) {
 	return yes, no
 }
 
-// On runs f with only these rows active, and not at all if there are none.
+// On runs f on those of these rows that are at work now, and not at all if there are none.
 func (b *Block) On(rows Rows, f func()) {
+	before, all := b.build.mask, b.build.all
+	rows = slices.Clone(rows)
+	for i := range rows {
+		rows[i] = rows[i] && before[i]
+	}
 	if b.stopped() || !rows.Any() {
 		return
 	}
-	before, all := b.build.mask, b.build.all
 	b.build.mask, b.build.all = rows, !slices.Contains(rows, false)
 	f()
 	b.build.mask, b.build.all = before, all

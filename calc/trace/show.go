@@ -133,3 +133,6 @@ func closing(s string, i int) int {
 	}
 	return -1
 }
+
+// Has says whether the block has recorded an entry of this ID.
+func (b *Block) Has(id string) bool { return b.build.note.entries[b.build.path+"/"+id] != nil }

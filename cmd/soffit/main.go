@@ -1,14 +1,19 @@
-// Command soffit writes the design note of a prestressed concrete member from its member file.
+// Command soffit writes the design note of a prestressed concrete member from its member file; and the member file to
+// start from, and the schemas of member file and record.
 //
-// It ends with 0 if every check passes, with 1 if a check fails (the note is written and says so), and with 2 if
-// there is no note.
+// It ends with 0 if it did what was asked and every check passes, with 1 if a check fails (the note is written and says
+// so), and with 2 if there is no note, draft or schema.
 package main
 
 import (
 	"io"
 	"os"
+	"strings"
 
 	"github.com/alecthomas/kong"
+
+	"soffit/calc/design"
+	"soffit/templates"
 )
 
 // Exit codes.
@@ -19,8 +24,12 @@ const (
 )
 
 type commands struct {
+	Version kong.VersionFlag `help:"Print the version."`
+
 	Note    noteCommand    `cmd:"" help:"Write the design note of each member file, as PDF, and its record, as JSON."`
 	Examine examineCommand `cmd:"" help:"Read each member file and say what is wrong with it; write nothing."`
+	Draft   draftCommand   `cmd:"" help:"Write a member file to start from, with a comment on each key."`
+	Schema  schemaCommand  `cmd:"" help:"Print the JSON Schema of the member file or of the record; editors complete and check the file by it."`
 }
 
 // command is one subcommand; it returns the exit code.
@@ -34,22 +43,18 @@ func run(args []string, out, problems io.Writer) int {
 	var c commands
 	code := -1
 	parser, err := kong.New(&c, kong.Name("soffit"), kong.Description(purpose), kong.Writers(out, problems),
+		kong.Vars{"drafts": strings.Join(templates.Drafts(), ", "), "version": design.Program},
 		kong.Exit(func(n int) { code = n }), kong.UsageOnError())
 	if err != nil {
 		panic(err) // a fault of the declarations above, met by every test
 	}
 	ctx, err := parser.Parse(args)
-	if code >= 0 { // help was asked for
+	if code >= 0 { // help or the version was asked for
 		return passes
 	}
 	if err != nil {
 		say(problems, "soffit: %v\n%s\n", err, seeHelp)
 		return noNote
 	}
-	switch ctx.Command() {
-	case "note <file>":
-		return c.Note.run(out, problems)
-	default:
-		return c.Examine.run(out, problems)
-	}
+	return ctx.Selected().Target.Addr().Interface().(command).run(out, problems)
 }

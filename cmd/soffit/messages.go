@@ -3,7 +3,9 @@ package main
 import (
 	"fmt"
 	"io"
+	"strings"
 
+	"soffit/calc/quantity"
 	"soffit/calc/trace"
 )
 
@@ -15,29 +17,43 @@ const (
 
 func say(w io.Writer, format string, args ...any) { fmt.Fprintf(w, format, args...) }
 
+// unknown says which words there are, and which of them was likely meant.
+func unknown(word string, known []string) string {
+	msg := fmt.Sprintf("unknown kind %q; there are %s", word, strings.Join(known, ", "))
+	if near, ok := quantity.Nearest(word, known); ok {
+		msg += "; write " + near
+	}
+	return msg
+}
+
 // summary says in one line what a note came to.
 func summary(n *trace.Note) string {
 	checks := n.Checks()
-	failed := 0
-	var worst *trace.Check
+	var failing []*trace.Check
+	worst := checks[0]
 	for _, c := range checks {
 		if c.Failed() {
-			failed++
+			failing = append(failing, c)
 		}
-		if worst == nil || c.Value[c.Worst] > worst.Value[worst.Worst] {
+		if c.Value[c.Worst] > worst.Value[worst.Worst] {
 			worst = c
 		}
 	}
-	if worst == nil {
-		return "no checks"
+	if len(failing) == 0 {
+		return fmt.Sprintf("all %d checks pass; highest ratio %s, %s%s", len(checks), worst.Ratio[worst.Worst], worst.Name, place(worst))
 	}
-	where := trace.RowName(worst.Axes, worst.Worst)
-	if where != "" {
-		where = " at " + where
+	first := failing[0]
+	size := "ratio " + first.Ratio[first.Worst]
+	if first.Ratio[first.Worst] == "" {
+		size = "margin " + first.Margin[first.Worst] + " " + first.Unit.String()
 	}
-	verdict := fmt.Sprintf("all %d checks pass", len(checks))
-	if failed > 0 {
-		verdict = fmt.Sprintf("%d of %d checks fail: not for construction", failed, len(checks))
+	return fmt.Sprintf("%d of %d checks fail: not for construction; first %s, %s%s", len(failing), len(checks), size, first.Name, place(first))
+}
+
+// place is where a check is worst.
+func place(c *trace.Check) string {
+	if where := trace.RowName(c.Axes, c.Worst); where != "" {
+		return " at " + where
 	}
-	return fmt.Sprintf("%s; highest ratio %s, %s%s", verdict, worst.Ratio[worst.Worst], worst.Name, where)
+	return ""
 }

@@ -10,6 +10,7 @@ import (
 	"sync"
 
 	"soffit/calc/design"
+	"soffit/calc/member"
 	"soffit/calc/trace"
 	"soffit/report/sheet"
 )
@@ -113,17 +114,9 @@ func (c *noteCommand) one(file string) (r result) {
 	if err != nil {
 		return result{err: err}
 	}
-	n, err := design.Run(m)
+	made, err := compose(m)
 	if err != nil {
 		return result{err: err}
-	}
-	record, err := n.JSON()
-	if err != nil {
-		return result{err: fmt.Errorf("%s: %w", file, err)}
-	}
-	pdf, err := sheet.Render(n, sheet.Options{})
-	if err != nil {
-		return result{err: fmt.Errorf("%s: %w", file, err)}
 	}
 	if c.Out != "" {
 		if err := os.MkdirAll(c.Out, 0o755); err != nil {
@@ -131,8 +124,31 @@ func (c *noteCommand) one(file string) (r result) {
 		}
 	}
 	base := c.base(file)
-	if err := write(piece{base + ".pdf", pdf}, piece{base + ".trace.json", record}); err != nil {
+	if err := write(piece{base + ".pdf", made.pdf}, piece{base + ".trace.json", made.record}); err != nil {
 		return result{err: err}
 	}
-	return result{pdf: base + ".pdf", note: n}
+	return result{pdf: base + ".pdf", note: made.note}
+}
+
+// made is a note with its two files.
+type made struct {
+	note        *trace.Note
+	record, pdf []byte
+}
+
+// compose designs a member and sets its note.
+func compose(m *member.Member) (made, error) {
+	n, err := design.Run(m)
+	if err != nil {
+		return made{}, err
+	}
+	record, err := n.JSON()
+	if err != nil {
+		return made{}, fmt.Errorf("%s: %w", m.File, err)
+	}
+	pdf, err := sheet.Render(n, sheet.Options{})
+	if err != nil {
+		return made{}, fmt.Errorf("%s: %w", m.File, err)
+	}
+	return made{n, record, pdf}, nil
 }

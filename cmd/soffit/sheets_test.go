@@ -12,9 +12,10 @@ import (
 	"soffit/calc/trace"
 	"soffit/report/draw"
 	"soffit/report/sheet"
+	"soffit/templates"
 )
 
-// variants are the samples, and one of them with a load that makes a check fail.
+// variants are the samples, one of them with a load that makes a check fail, and the drafts.
 func variants(t testing.TB) map[string][]byte {
 	t.Helper()
 	files, err := filepath.Glob("../../testdata/members/*.yaml")
@@ -34,6 +35,9 @@ func variants(t testing.TB) map[string][]byte {
 	}
 	if len(out) <= len(files) {
 		t.Fatal("no sample is overloaded")
+	}
+	for _, kind := range templates.Drafts() {
+		out["draft-"+kind+".yaml"], _ = templates.Draft(kind)
 	}
 	return out
 }
