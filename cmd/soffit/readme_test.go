@@ -6,6 +6,9 @@ import (
 	"regexp"
 	"strings"
 	"testing"
+
+	"soffit/calc/design"
+	"soffit/calc/ec2"
 )
 
 // TestReadme runs every command of the README in the order in which it stands there, but for the test command
@@ -43,5 +46,28 @@ func TestReadme(t *testing.T) {
 	entries, err := os.ReadDir(out)
 	if err != nil || len(entries) < 2 {
 		t.Errorf("the sample note is not there: %v", err)
+	}
+}
+
+// TestReadmeWords: the README names every product, category, national parameter and chapter that the member file takes.
+func TestReadmeWords(t *testing.T) {
+	data, err := os.ReadFile("../../README.md")
+	if err != nil {
+		t.Fatal(err)
+	}
+	readme := string(data)
+	var words []string
+	for _, p := range ec2.Products {
+		words = append(words, p.Name)
+	}
+	for _, p := range ec2.Parameters {
+		words = append(words, p.Given.Symbol)
+	}
+	words = append(words, ec2.Categories[len("ABCDEFGH"):]...)
+	words = append(words, design.Narratives...)
+	for _, w := range words {
+		if !strings.Contains(readme, w) {
+			t.Errorf("README.md does not name %s", w)
+		}
 	}
 }
