@@ -178,11 +178,15 @@ func (j *job) noneNew(n *trace.Note) bool {
 
 // elevation draws what the member is, in one picture.
 func (j *job) elevation(b *trace.Block) {
-	b.Figure("elevation", "elevation", "The member: tendons, bearings and loads.", "",
-		trace.Plot{Role: "length", Key: "given.span/length"}, trace.Plot{Role: "depth", Key: "given.section/depth"},
-		trace.Plot{Role: "span", Key: "section.flange/span"}, trace.Plot{Role: "support-A", Key: "given.span/bearing-a"}, trace.Plot{Role: "support-B", Key: "given.span/bearing-b"},
-		trace.Plot{Role: "bearing-A", Key: "given.span/bearing-a-length"}, trace.Plot{Role: "bearing-B", Key: "given.span/bearing-b-length"},
-		trace.Plot{Role: "level", Key: "given.tendons/level"}, trace.Plot{Role: "debonded", Key: "given.tendons/debonded-length"},
-		trace.Plot{Role: "load-q", Key: "actions.loads/load"}, trace.Plot{Role: "load-F", Key: "given.actions/point"},
-		trace.Plot{Role: "load-from", Key: "given.actions/from"}, trace.Plot{Role: "load-to", Key: "given.actions/to"})
+	plots := []trace.Plot{{Role: "length", Key: "given.span/length"}, {Role: "depth", Key: "given.section/depth"},
+		{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"}, {Role: "upper", Key: "given.section/part-upper"},
+		{Role: "span", Key: "section.flange/span"}, {Role: "support-A", Key: "given.span/bearing-a"}, {Role: "support-B", Key: "given.span/bearing-b"},
+		{Role: "bearing-A", Key: "given.span/bearing-a-length"}, {Role: "bearing-B", Key: "given.span/bearing-b-length"},
+		{Role: "level", Key: "given.tendons/level"}, {Role: "debonded", Key: "given.tendons/debonded-length"},
+		{Role: "load-q", Key: "actions.loads/load"}, {Role: "load-F", Key: "given.actions/point"},
+		{Role: "load-from", Key: "given.actions/from"}, {Role: "load-to", Key: "given.actions/to"}}
+	if j.hasBars() {
+		plots = append(plots, trace.Plot{Role: "bar-level", Key: "given.bars/level"})
+	}
+	b.Figure("elevation", "elevation", "The member: tendons, bearings and loads.", "", plots...)
 }

@@ -28,7 +28,7 @@ var kinds = map[string]maker{
 }
 
 // spacious are the kinds that are better read over the full width of a sheet than in a column of it.
-var spacious = map[string]bool{"elevation": true, "ultimate": true}
+var spacious = map[string]bool{"elevation": true, "ultimate": true, "tendon-stress": true}
 
 // Kinds are the kinds of figures that can be drawn, sorted.
 func Kinds() []string {

@@ -13,13 +13,20 @@ import (
 // Roles: length, depth (of the concrete), support-A, support-B (bearing centres from end A), bearing-A,
 // bearing-B (lengths of bearings); level (above the soffit) and debonded (length from each end) over the
 // rows of tendons; load-q (force a length), load-F (force), load-from, load-to (from end A) over the loads,
-// where q = 0 marks a point load at load-from; optional span (between bearing centres).
+// where q = 0 marks a point load at load-from; optional span (between bearing centres), height, lower, upper (parts
+// of the section from the soffit up, whose edges are then seen), bar-level (above the soffit) over the rows of bars.
 func elevation(d *data, width draw.Pt) *tape {
 	e := sideView{length: d.one("length"), depth: d.one("depth"), a: d.one("support-A"), b: d.one("support-B"),
 		bearingA: d.one("bearing-A"), bearingB: d.one("bearing-B"), level: d.rows("level")}
 	e.debonded = d.beside("debonded", e.level)
 	if d.has("span") {
 		e.span = d.one("span")
+	}
+	if d.has("height") {
+		e.parts = d.parts()
+	}
+	if d.has("bar-level") {
+		e.bars = d.rows("bar-level")
 	}
 	e.loads = d.loads()
 	if d.err != nil {
@@ -51,7 +58,8 @@ func (e *sideView) fitted(width draw.Pt, beside bool) *tape {
 // sideView is what an elevation shows.
 type sideView struct {
 	length, depth, a, b, bearingA, bearingB, span cell
-	level, debonded                               column
+	level, debonded, bars                         column // bars may be none
+	parts                                         parts  // none if not given
 	loads                                         []loading
 	beside                                        bool // the listing of the rows, else it stands below
 
@@ -88,7 +96,9 @@ func (e *sideView) draw(c draw.Canvas, along scale) {
 	up := e.upright(along)
 	e.per, e.l, e.h = along.per(), along.of(e.length.value), up.of(e.depth.value)
 	c.Rect(0, -e.h, e.l, e.h, draw.Style{Stroke: outline, Fill: concrete})
+	e.edges(c, up)
 	l := e.tendons(c, up)
+	e.reinforcement(c, up, &l)
 	if e.beside {
 		l.draw(c, e.l+6)
 	} else {
@@ -138,6 +148,26 @@ func (e *sideView) tendons(c draw.Canvas, up scale) listing {
 		l.lines = append(l.lines, line)
 	}
 	return l
+}
+
+// edges draws the edges of flanges, haunches and web that are seen from the side.
+func (e *sideView) edges(c draw.Canvas, up scale) {
+	if e.parts.height.len() < 2 {
+		return
+	}
+	levels := e.parts.levels()
+	for _, v := range levels[1 : len(levels)-1] {
+		c.Line(0, -up.of(v), e.l, -up.of(v), edge)
+	}
+}
+
+// reinforcement draws a line of long dashes for each row of bars and adds it to the listing.
+func (e *sideView) reinforcement(c draw.Canvas, up scale, l *listing) {
+	for i, v := range e.bars.cells {
+		y := -up.of(v.value)
+		c.Line(0, y, e.l, y, hair, long...)
+		l.lines = append(l.lines, listed{from: e.l + clearance, y: y, name: e.bars.axis.Rows[i], columns: []entry{{label{}.value(v), beforePoint(v)}}})
+	}
 }
 
 const support draw.Pt = 7 // height of the sign for a support

@@ -45,7 +45,7 @@ func TestNumbersComeFromTheRecord(t *testing.T) {
 		for _, a := range n.Axes {
 			names += strings.Join(a.Rows, " ") + " "
 		}
-		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-ultimate"} {
+		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-ultimate"} {
 			count := 0
 			for _, width := range []draw.Pt{320, 510} {
 				for _, text := range drawn(t, n, figs[id], width).Texts() {

@@ -154,6 +154,11 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 		k.rows("load-to", "c_n", "m", 2, over(loads), each(m.loads, func(l load) float64 { return l.to })),
 	}
 	k.b.Figure("fig-elevation", "elevation", "Elevation", "", el...)
+	seen := append(append([]trace.Plot{}, el...), outline...)
+	if bars != nil {
+		seen = append(seen, bp[2])
+	}
+	k.b.Figure("fig-elevation-parts", "elevation", "Elevation with its edges", "", seen...)
 
 	m.effects(ch, n, stations, el[4:6])
 	m.bending(ch, n, stations, tendons, bars, outline, depth)

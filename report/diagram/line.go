@@ -8,7 +8,8 @@ import (
 
 // Widths of lines.
 const (
-	hair    draw.Pt = 0.4 // dimensions, leaders, axes
+	edge    draw.Pt = 0.25 // edges within an outline
+	hair    draw.Pt = 0.4  // dimensions, leaders, axes
 	medium  draw.Pt = 0.6
 	outline draw.Pt = 0.9 // concrete, governing curves
 )
@@ -20,8 +21,10 @@ var (
 	envelope   = draw.Grey(0.90)
 )
 
-// chain is the dash of axes of symmetry and neutral axes, dashed that of hidden and second lines.
+// chain is the dash of axes of symmetry and neutral axes, dashed that of hidden and second lines, long that of bars
+// seen from the side.
 var (
+	long   = []draw.Pt{7, 1.5}
 	chain  = []draw.Pt{6, 1.5, 1, 1.5}
 	dashed = []draw.Pt{2.4, 1.6}
 )

@@ -2,6 +2,7 @@ package diagram
 
 import (
 	"cmp"
+	"math"
 	"slices"
 
 	"soffit/report/draw"
@@ -89,7 +90,11 @@ func (l listing) beside(c draw.Canvas, x draw.Pt) {
 	x0 := x + bend + 2
 	left, point := l.columns(x0 + l.marked())
 	for i, e := range l.lines {
-		if !e.free {
+		switch turn := e.from + draw.Pt(math.Abs(float64(to[i]-e.y))); {
+		case e.free:
+		case l.crowded(i) && turn < x: // away from the others' lines at once
+			c.Polyline([]draw.Point{{X: e.from, Y: e.y}, {X: turn, Y: to[i]}, {X: x + bend, Y: to[i]}}, draw.Style{Stroke: hair})
+		default:
 			leader(c, e.from, e.y, x, x+bend, to[i])
 		}
 		y := to[i] + middle
@@ -106,6 +111,17 @@ func (l listing) beside(c draw.Canvas, x draw.Pt) {
 	if len(to) > len(l.lines) {
 		l.head(c, left, point, to[len(to)-1]+middle)
 	}
+}
+
+// crowded tells whether the leader of a line would run close along another.
+func (l listing) crowded(i int) bool {
+	const apart = 4
+	for k, e := range l.lines {
+		if k != i && !e.free && math.Abs(float64(e.y-l.lines[i].y)) < apart {
+			return true
+		}
+	}
+	return false
 }
 
 // below draws the listing as a table without leaders, its heads at the baseline y, from x on, the highest

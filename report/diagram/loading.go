@@ -181,29 +181,51 @@ func drawPoints(c draw.Canvas, loads []loading, bands []band, per, l, y, top dra
 		}
 		at[i] = p
 	}
-	// A label stands higher than every line and label within its width; the inner loads come first.
+	// A label stands beside its arrow, on the side where it is lowest, and higher than every arrow and label within
+	// its width; the inner loads come first.
 	order := make([]int, len(points))
 	for i := range order {
 		order[i] = i
 	}
 	outward := func(i int) draw.Pt { return max(at[i].x-l/2, l/2-at[i].x) }
 	slices.SortStableFunc(order, func(a, b int) int { return int(math.Round(float64(100 * (outward(a) - outward(b))))) })
-	for k, i := range order {
+	// tier is the lowest one in which a label is clear of those set before; crossed counts the arrows still to come
+	// that it would be in the way of.
+	tier := func(k int, label0 draw.Pt) (tier, crossed int) {
+		i := order[k]
+		lo, hi := min(label0, at[i].x)-2, max(label0+points[i].label.width, at[i].x)+2
 		for _, j := range order[:k] {
-			lo, hi := at[i].label0-2, at[i].label0+points[i].label.width+2
 			jlo, jhi := min(at[j].x, at[j].label0)-2, max(at[j].x, at[j].label0+points[j].label.width)+2
 			if lo < jhi && jlo < hi {
-				at[i].tier = max(at[i].tier, at[j].tier+1)
+				tier = max(tier, at[j].tier+1)
 			}
 		}
+		for _, j := range order[k+1:] {
+			if at[j].x > lo && at[j].x < hi {
+				crossed++
+			}
+		}
+		return tier, crossed
+	}
+	for k, i := range order {
+		p, w := &at[i], points[i].label.width
+		other := p.x - 3 - w
+		if p.label0 < p.x {
+			other = p.x + 3
+		}
+		t, n := tier(k, p.label0)
+		if u, m := tier(k, other); u+m < t+n && other >= 0 && other+w <= l {
+			p.label0, t = other, u
+		}
+		p.tier = t
 	}
 	for i, p := range at {
+		end := top - 2 - draw.Pt(p.tier)*leading - size*0.6 // beside the label
 		if points[i].size.value < 0 {
-			arrow(c, p.x, p.tip, p.x, p.tail, outline, 5)
+			arrow(c, p.x, p.tip, p.x, end, outline, 5)
 		} else {
-			arrow(c, p.x, p.tail, p.x, p.tip, outline, 5)
+			arrow(c, p.x, end, p.x, p.tip, outline, 5)
 		}
-		c.Line(p.x, p.tail, p.x, top-2-draw.Pt(p.tier)*leading-size*0.6, hair)
 	}
 	for i, p := range at { // where a line cannot go round a label it is broken there
 		base := top - 2 - draw.Pt(p.tier)*leading

@@ -21,7 +21,7 @@ func TestLook(t *testing.T) {
 		t.Skip("no folder given")
 	}
 	for _, w := range []draw.Pt{320, 510} {
-		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-effects", "fig-ultimate", "fig-resistance", "fig-stress"} {
+		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-effects", "fig-ultimate", "fig-resistance", "fig-stress"} {
 			d := pdf.New(pdf.Options{Title: "figures", Created: time.Unix(0, 0)})
 			var s *pdf.Sheet
 			y := draw.SheetHeight

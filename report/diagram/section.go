@@ -87,7 +87,8 @@ func (r dots) last(i int) float64 { return r.x(i, r.number(i)-1) }
 // dot draws one tendon or bar: tendons black, in a sheath where they are debonded at the ends, bars as rings.
 func (r dots) dot(c draw.Canvas, i int, x, y, radius draw.Pt) {
 	if r.bars {
-		c.Circle(x, y, radius, draw.Style{Stroke: medium, Fill: draw.White})
+		// The outer edge of the ring is that of the bar.
+		c.Circle(x, y, max(radius-medium/2, 0.6), draw.Style{Stroke: medium, Fill: draw.White})
 		return
 	}
 	c.Circle(x, y, radius, draw.Style{Fill: draw.Black})

@@ -61,8 +61,9 @@ func tendonStress(d *data, width draw.Pt) *tape {
 	l := label{}.symbol(e.available.line().Symbol).say(draw.Serif, " available at ultimate")
 	l.draw(t, x+20, y+middle)
 	x += 20 + l.width + 16
+	t.Rect(x, y, 16, 5, draw.Style{Fill: envelope})
 	t.Line(x, y, x+16, y, medium, dashed...)
-	label{}.symbol(e.present.line().Symbol).say(draw.Serif, " present").draw(t, x+20, y+middle)
+	label{}.symbol(e.present.line().Symbol).say(draw.Serif, " present, grey below it").draw(t, x+20, y+middle)
 	return t
 }
 

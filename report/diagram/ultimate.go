@@ -2,8 +2,6 @@ package diagram
 
 import (
 	"fmt"
-	"math"
-	"slices"
 
 	"soffit/calc/formula"
 	"soffit/report/draw"
@@ -134,7 +132,7 @@ func (u *equilibrium) draw(c draw.Canvas, up scale, room draw.Pt, in layout) {
 		gap, strainRun, forceRun = 8, 0.85*strainRun, 0.8*forceRun
 	}
 	strain0 := half + gap
-	zero, strain1 := u.strains(c, f, strain0, strainRun)
+	zero, strain1, written := u.strains(c, f, strain0, strainRun)
 	block0 := strain1 + gap
 	block1 := u.stresses(c, f, block0, in)
 	force0 := block1 + gap
@@ -165,6 +163,9 @@ func (u *equilibrium) draw(c draw.Canvas, up scale, room draw.Pt, in layout) {
 	}
 	words(note).centre(c, 0, y)
 	depths.centre(c, 0, y+leading)
+	if l := words("figures: whole strain"); written && (strain0+strain1)/2-l.width/2 > max(words(note).width, depths.width)/2+6 {
+		l.centre(c, (strain0+strain1)/2, y)
+	}
 }
 
 // axis is the height of the neutral axis on paper.
@@ -211,39 +212,6 @@ func (u *equilibrium) section(c draw.Canvas, f frame, half draw.Pt, in layout) {
 	stack(c, x, []draw.Pt{0, u.axis(f)}, []label{short(u.x, in != roomy)})
 }
 
-// strains draws the strain due to bending from the line of zero, compression to the left. It returns where
-// that line is and where the picture ends.
-func (u *equilibrium) strains(c draw.Canvas, f frame, x, run draw.Pt) (zero, end draw.Pt) {
-	at := func(depth float64) float64 { return u.strain.value * (depth - u.x.value) / u.x.value }
-	deepest := u.h.value
-	if len(u.rows) > 0 {
-		deepest = 0
-		for _, r := range u.rows {
-			deepest = max(deepest, r.depth.value)
-		}
-	}
-	tension := max(at(deepest), 0)
-	per := run / draw.Pt(u.strain.value+tension)
-	zero = x + draw.Pt(u.strain.value)*per
-	place := func(depth float64) draw.Point {
-		return draw.Point{X: zero + draw.Pt(at(depth))*per, Y: u.depthAt(f, depth)}
-	}
-	bottom := place(deepest)
-	if at(deepest) > 0 {
-		axis := draw.Point{X: zero, Y: u.axis(f)}
-		c.Polygon([]draw.Point{{X: zero}, place(0), axis}, draw.Style{Fill: compressed})
-	} else {
-		c.Polygon([]draw.Point{{X: zero}, place(0), bottom, {X: zero, Y: bottom.Y}}, draw.Style{Fill: compressed})
-	}
-	for _, r := range u.rows {
-		p := place(r.depth.value)
-		c.Line(zero, p.Y, p.X, p.Y, hair)
-	}
-	c.Polyline([]draw.Point{{X: zero}, place(0), bottom}, draw.Style{Stroke: medium})
-	c.Line(zero, 0, zero, bottom.Y, medium)
-	return zero, x + run
-}
-
 // stresses draws the block of stress with its depth. It returns where the picture ends.
 func (u *equilibrium) stresses(c draw.Canvas, f frame, x draw.Pt, in layout) draw.Pt {
 	low := u.depthAt(f, min(u.block.value, u.h.value))
@@ -262,70 +230,6 @@ func (u *equilibrium) stresses(c draw.Canvas, f frame, x draw.Pt, in layout) dra
 	}
 	l.draw(c, at+4, low/2+middle)
 	return at + 4 + l.width
-}
-
-// forces draws the forces on the part left of a cut: compression towards it, tension away from it, lengths
-// in proportion; the lever arms on one line from the force in the block; and the listing.
-func (u *equilibrium) forces(c draw.Canvas, f frame, x, run draw.Pt, in layout) {
-	greatest := math.Abs(u.force.value)
-	for _, r := range u.rows {
-		greatest = max(greatest, math.Abs(r.force.value))
-	}
-	length := func(v float64) draw.Pt { return max(run*draw.Pt(math.Abs(v)/greatest), 2) }
-	c.Line(x, 0, x, f.y, medium)
-	line := x + run + 8
-	origin := u.depthAt(f, u.centroid.value)
-	first, last := origin, origin
-	force := func(y, l draw.Pt, compression bool) {
-		if compression {
-			arrow(c, x+l, y, x, y, outline, 5)
-		} else {
-			arrow(c, x, y, x+l, y, outline, 5)
-		}
-		if x+l+clearance < line {
-			c.Line(x+l+clearance, y, line, y, hair)
-		}
-	}
-	force(origin, length(u.force.value), true)
-	for _, r := range u.rows {
-		y := u.depthAt(f, r.depth.value)
-		force(y, length(r.force.value), r.force.value < 0)
-		first, last = min(first, y), max(last, y)
-	}
-	c.Line(line, first, line, last, hair)
-	for _, r := range u.rows {
-		ticks(c, line, u.depthAt(f, r.depth.value))
-	}
-	if len(u.rows) > 0 { // the symbol where the line is free for longest
-		at := []draw.Pt{origin}
-		for _, r := range u.rows {
-			if y := u.depthAt(f, r.depth.value); y > origin {
-				at = append(at, y)
-			}
-		}
-		slices.Sort(at)
-		var free, mid draw.Pt
-		for i := 1; i < len(at); i++ {
-			if d := at[i] - at[i-1]; d > free {
-				free, mid = d, (at[i]+at[i-1])/2
-			}
-		}
-		if free > 20 {
-			label{}.symbol(u.rows[0].lever.line.Symbol).right(c, line-3, mid+middle)
-		}
-	}
-	c.Circle(line, origin, 1.6, draw.Style{Stroke: hair, Fill: draw.White})
-	l := u.listing(f, line)
-	thrust := label{}.symbol(u.force.line.Symbol)
-	if in == narrow {
-		l = l.names()
-	} else {
-		thrust = label{}.equals(u.force).say(draw.Serif, " at ").equals(u.centroid)
-		moment := label{}.equals(u.resistance)
-		l.lines = append(l.lines, listed{free: true, y: f.y + 6, remark: &moment})
-	}
-	l.lines = append(l.lines, listed{from: line + 2, y: origin, remark: &thrust})
-	l.draw(c, line+5)
 }
 
 // listing is the rows with their numbers, led to from the line of lever arms at x.

@@ -96,7 +96,7 @@ func (m *setter) binaryClass(c ctx, n *formula.Binary) class {
 			return m.class(c, n.L)
 		}
 	}
-	if c.linear {
+	if c.linear || c.part {
 		return quotient
 	}
 	return fractional
@@ -176,45 +176,17 @@ func (m *setter) linkedSymbol(c ctx, s *formula.Symbol, exp Box) Box {
 	return b
 }
 
-// bracketed sets a node in brackets if wanted.
-func (m *setter) bracketed(c ctx, n formula.Node, want bool) []atom {
-	if !want {
-		return m.expr(c, n)
-	}
-	c.lead = true
-	c.level++
-	return m.enclose(c, m.expr(c, n), '(', ')')
-}
-
-// enclose puts brackets around atoms; around brackets of the same kind they become square.
-func (m *setter) enclose(c ctx, atoms []atom, left, right rune) []atom {
-	if len(atoms) == 0 {
-		return atoms
-	}
-	var whole Box // its measures alone
-	for i := range atoms {
-		whole.Height, whole.Depth = max(whole.Height, atoms[i].box.Height), max(whole.Depth, atoms[i].box.Depth)
-		whole.marks = max(whole.marks, atoms[i].box.marks)
-	}
-	reach := span(c.size, whole)
-	if left == '(' && whole.marks == roundInside {
-		left, right = '[', ']'
-	}
-	out := append([]atom(nil), atoms...)
-	for i := range out {
-		out[i].relation = 0
-		if i > 0 && out[i].cost < never {
-			out[i].cost += perLevel
-		}
-	}
-	first, last := &out[0], &out[len(out)-1]
-	first.box = row(bracket(c.size, left, reach), first.box)
-	last.box = row(last.box, bracket(c.size, right, reach))
-	marks := roundInside
-	if left == '[' {
-		marks = squareInside
-	}
-	first.box.marks = marks
+// joinedBy is two operands with a sign between them, which stays on the line of the first.
+func joinedBy(c ctx, l []atom, sign string, gap float64, r []atom) []atom {
+	b := text(draw.Serif, c.size, sign)
+	out := append(make([]atom, 0, len(l)+len(r)), l...)
+	last := &out[len(out)-1]
+	marks := last.box.marks
+	last.box = row(last.box, Box{Width: draw.Pt(gap) * c.size}, b)
+	last.box.marks = marks
+	n := len(out)
+	out = append(out, r...)
+	out[n].gap, out[n].cost, out[n].relation = draw.Pt(gap)*c.size, atDot, 0
 	return out
 }
 
@@ -256,7 +228,7 @@ func (m *setter) binary(c ctx, n *formula.Binary) []atom {
 		if m.Operand != nil {
 			gap = medium
 		}
-		return append(l, prefixed(c, "·", gap, r, gap, atDot)...)
+		return joinedBy(c, l, "·", gap, r)
 	case '/':
 		return m.divide(c, n)
 	}
@@ -292,13 +264,10 @@ func (m *setter) divide(c ctx, n *formula.Binary) []atom {
 			return m.expr(c, n.L)
 		}
 	}
-	if !c.linear {
+	if !c.linear && !c.part { // fractions within fractions are set in line
 		part := c
 		part.lead, part.level = true, 0
-		if c.nested { // fractions within fractions are set smaller
-			part.size = max(0.82*c.size, 0.62*m.Size)
-		}
-		part.nested = true
+		part.part = true
 		num, den := joined(m.expr(part, n.L)), joined(m.expr(part, n.R))
 		b := fraction(c.size, part.size, num, den)
 		if m.widest == 0 || b.Width <= m.widest {
@@ -310,8 +279,8 @@ func (m *setter) divide(c ctx, n *formula.Binary) []atom {
 	part.lead = false
 	k, q := m.class(c, n.L), m.class(part, n.R)
 	l := m.bracketed(c, n.L, k == summed || k == over || k == armed || m.minus(c, n.L))
-	r := m.bracketed(part, n.R, q != atomic && q != raisedTo && q != called)
-	return append(l, prefixed(c, "/", 0.03, r, 0.03, atDot+20)...)
+	r := m.bracketed(part, n.R, q != atomic && q != quantified && q != raisedTo && q != called)
+	return joinedBy(c, l, "/", 0.03, r)
 }
 
 func (m *setter) power(c ctx, n *formula.Power) Box {

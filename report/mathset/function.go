@@ -99,7 +99,7 @@ func (m *setter) terms(c ctx, n *formula.Rows) []atom {
 		in.lead = true
 		return in
 	}
-	show := make([]int, 0, 4)
+	show := make([]int, 0, 4) // −1 stands for dots
 	if count <= 4 {
 		for i := range count {
 			show = append(show, i)
@@ -120,6 +120,7 @@ func (m *setter) terms(c ctx, n *formula.Rows) []atom {
 	for i := range show {
 		if show[i] < 0 {
 			all = append(all, prefixed(c, "+", medium, term(i), medium, atSign)...)
+			all[len(all)-1].dots = true
 			continue
 		}
 		in := at(show[i])
@@ -170,7 +171,7 @@ func under(size draw.Pt, b, script Box) Box {
 	w := max(b.Width, script.Width)
 	var out Box
 	out.put((w-b.Width)/2, 0, b)
-	out.put((w-script.Width)/2, b.Depth+0.10*size+script.Height, script)
+	out.put((w-script.Width)/2, b.Depth+indexGap*size+script.Height, script)
 	out.Width = w
 	return out
 }
@@ -244,12 +245,15 @@ func (m *setter) narrowed(size draw.Pt, atoms []atom, room draw.Pt) Box {
 	if m.widest == 0 || b.Width <= room {
 		return b
 	}
+	atoms = append([]atom(nil), atoms...)
 	for i := range atoms {
-		atoms[i].relation = 0
+		if atoms[i].relation > 0 { // a comparison stays whole
+			atoms[i].relation, atoms[i].cost = 0, atOpening
+		}
 	}
 	var out Box
 	y := draw.Pt(0)
-	for i, l := range breakLines(atoms, size, max(room, 4*size)) {
+	for i, l := range breakLines(atoms, size, max(room, 4*size), never) {
 		if i > 0 {
 			y += max(out.Depth-y+0.2*size+l.Box.Height, 1.2*size)
 			l.X = size
@@ -272,13 +276,11 @@ func (m *setter) cond(c ctx, n formula.Cond) []atom {
 		return out
 	case *formula.Logic:
 		l, r := m.cond(c, n.L), m.cond(c, n.R)
-		if n.Op == "and" {
-			if o, ok := n.L.(*formula.Logic); ok && o.Op == "or" {
-				l = m.enclose(c, l, '(', ')')
-			}
-			if o, ok := n.R.(*formula.Logic); ok && o.Op == "or" {
-				r = m.enclose(c, r, '(', ')')
-			}
+		if o, ok := n.L.(*formula.Logic); ok && o.Op != n.Op {
+			l = m.enclose(c, l, '(', ')')
+		}
+		if o, ok := n.R.(*formula.Logic); ok && o.Op != n.Op {
+			r = m.enclose(c, r, '(', ')')
 		}
 		return append(l, prefixed(c, n.Op, thick, r, thick+0.05, atWord)...)
 	}

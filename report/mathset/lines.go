@@ -56,25 +56,34 @@ const least = 0.8
 // stand under the first relation, other lines further in. A fraction too wide for the column is set with
 // a solidus; what is too wide still is made smaller, to four fifths at most. Wider than that it stays and
 // reaches out of the column, which a Recorder finds.
+//
+// A line begins with a relation, a sign or an item of a list; only where even the smallest size does not fit
+// otherwise does one end with a dot or a solidus.
 func (r Row) Lines(width draw.Pt) Block {
-	best := r.at(r.size, 0, width)
+	best := r.at(r.size, 0, width, usual)
 	if best.Width() <= width+0.01 {
 		return best
 	}
 	indent := draw.Pt(2) * r.size
-	for _, scale := range []draw.Pt{1, 0.93, 0.86, least} {
-		b := r.at(r.size*scale, width-indent, width)
-		if b.Width() <= width+0.01 {
-			return b
-		}
-		if b.Width() < best.Width() {
-			best = b
+	for _, dearest := range []int{usual, never} {
+		for _, scale := range []draw.Pt{1, 0.93, 0.86, least} {
+			b := r.at(r.size*scale, width-indent, width, dearest)
+			if b.Width() <= width+0.01 {
+				return b
+			}
+			if b.Width() < best.Width() {
+				best = b
+			}
 		}
 	}
 	return best
 }
 
-func (r Row) at(size, widest, width draw.Pt) Block {
+// Size is the size the block is set in.
+func (b Block) Size() draw.Pt { return b.size }
+
+// at sets the row within a width, fractions no wider than widest, with no break as dear as dearest.
+func (r Row) at(size, widest, width draw.Pt, dearest int) Block {
 	atoms := r.atoms
 	if size != r.size || widest > 0 {
 		atoms = r.again(size, widest)
@@ -83,7 +92,7 @@ func (r Row) at(size, widest, width draw.Pt) Block {
 	if len(atoms) == 0 {
 		return b
 	}
-	b.Lines = breakLines(atoms, size, width)
+	b.Lines = breakLines(atoms, size, width, dearest)
 	y := draw.Pt(0)
 	for i := range b.Lines {
 		l := &b.Lines[i]
@@ -97,19 +106,18 @@ func (r Row) at(size, widest, width draw.Pt) Block {
 	return b
 }
 
-// breakLines chooses the breaks of least cost. A line more is better than a break at a sign, so that a
-// formula falls apart at its relations while it can.
-func breakLines(atoms []atom, size, width draw.Pt) []Line {
+// breakLines chooses the breaks of least cost below dearest. A line more is better than a break at a sign, so that
+// a formula falls apart at its relations while it can. Numbers begin a line of their own, if there is more than one.
+func breakLines(atoms []atom, size, width draw.Pt, dearest int) []Line {
 	// Where the first relation stands, and what follows it.
 	var signAt, afterSign draw.Pt
-	x := draw.Pt(0)
+	x, found := draw.Pt(0), false
 	for i, a := range atoms {
 		if i > 0 {
 			x += a.gap
 		}
-		if a.relation > 0 {
-			signAt, afterSign = x, x+a.relation
-			break
+		if a.relation > 0 && !found {
+			signAt, afterSign, found = x, x+a.relation, true
 		}
 		x += a.box.Width
 	}
@@ -126,6 +134,7 @@ func breakLines(atoms []atom, size, width draw.Pt) []Line {
 		}
 		return afterSign
 	}
+	divided := x > width+0.01
 	const perLine, perOver = 30, 1e7
 	n := len(atoms)
 	cost := make([]float64, n+1)
@@ -143,7 +152,10 @@ func breakLines(atoms []atom, size, width draw.Pt) []Line {
 				w += atoms[end-1].gap
 			}
 			w += atoms[end-1].box.Width
-			if end < n && atoms[end].cost >= never {
+			if end > start+1 && atoms[end-1].turns && divided {
+				break
+			}
+			if end < n && (atoms[end].cost >= dearest || end == start+1 && atoms[start].dots) {
 				continue
 			}
 			k := cost[start] + perLine

@@ -32,9 +32,14 @@ const (
 	// not make them grow.
 	plainReach = 0.62
 
+	indexGap = 0.2 // between a sign or word and the index below it
+
 	scriptScale = 0.70
 	leastScript = 0.55 // of the display size
 )
+
+// Smallest is the least size of type anywhere in a formula.
+const Smallest draw.Pt = 6.5
 
 // metrics are heights of the serif face in em.
 type metrics struct {

@@ -58,7 +58,7 @@ func grouped(s string) string {
 func raised(f draw.Face, size draw.Pt, base, exponent string) Box {
 	b := text(f, size, base)
 	b.space(0.02 * size)
-	e := text(f, size*scriptScale, exponent)
+	e := text(f, scriptOf(size), exponent)
 	b.put(b.Width, -supUp*size, e)
 	b.Width += e.Width
 	return b
@@ -78,7 +78,7 @@ func unit(f draw.Face, size draw.Pt, s string) Box {
 			plain.Reset()
 		}
 		if power.Len() > 0 {
-			e := text(f, size*scriptScale, power.String())
+			e := text(f, scriptOf(size), power.String())
 			b.space(0.03 * size)
 			b.put(b.Width, -0.36*size, e)
 			b.Width += e.Width

@@ -51,16 +51,22 @@ type atom struct {
 	gap      draw.Pt // before it, inside a line
 	cost     int     // of a break before it
 	relation draw.Pt // width of the relation at its front with the gap after it, 0 if none
+	dots     bool    // stands for terms left out: not alone on a line
+	turns    bool    // begins a line of its own where the row takes more than one
 }
 
-// Costs of breaking before an atom, a line more costing perLine: at a relation, a sign, a dot, each level of brackets more.
+// Costs of breaking before an atom, a line more costing perLine: at a relation, a sign, each level of brackets more.
+// Breaks that cost more than usual are made only where there is no other way: after a dot or a solidus, within a
+// condition, and where little but the opening of a bracket would end a line.
 const (
 	atRelation = 0
 	atWord     = 2
 	atSign     = 40
 	atList     = 45
-	atDot      = 90
 	perLevel   = 50
+	usual      = 1000
+	atDot      = 2000
+	atOpening  = 9000
 	never      = 1 << 20
 )
 
@@ -75,13 +81,16 @@ type ctx struct {
 	linear bool // fractions with a solidus
 	lead   bool // nothing stands to the left: a minus sign needs no brackets
 	level  int  // of brackets
-	nested bool // within a fraction
+	part   bool // of a fraction
 	at     map[string]int
 }
 
 func (m *setter) script(size draw.Pt) draw.Pt {
-	return max(size*scriptScale, leastScript*m.Size)
+	return max(scriptOf(size), leastScript*m.Size)
 }
+
+// scriptOf is the size of a script to matter of a size.
+func scriptOf(size draw.Pt) draw.Pt { return max(size*scriptScale, min(size, Smallest)) }
 
 func (s Setting) row(set func(m *setter, c ctx) []atom) Row {
 	again := func(size, widest draw.Pt) []atom {
@@ -154,6 +163,17 @@ func (r Row) Then(gap float64, o Row) Row {
 // relation.
 func (r Row) Related(rel string, o Row) Row {
 	return r.with(o, func(size draw.Pt, atoms []atom) []atom { return related(size, rel, atoms) })
+}
+
+// Next is Related, but the other row begins a line of its own where the whole takes more than one.
+func (r Row) Next(rel string, o Row) Row {
+	return r.with(o, func(size draw.Pt, atoms []atom) []atom {
+		out := related(size, rel, atoms)
+		if len(out) > 0 {
+			out[0].turns = true
+		}
+		return out
+	})
 }
 
 // with is the row followed by what join makes of the other.

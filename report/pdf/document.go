@@ -16,7 +16,7 @@ import (
 )
 
 // Options describe the document. Created is the date written into the file; it comes from the member
-// file, never from a clock.
+// file, never from a clock. A document whose Created is zero carries no date.
 type Options struct {
 	Title, Author, Subject, Keywords string
 	Language                         string // "en" if empty
@@ -77,8 +77,12 @@ func (d *Document) Bytes() ([]byte, error) {
 		Size: fpdf.SizeType{Wd: float64(draw.SheetWidth), Ht: float64(draw.SheetHeight)}})
 	f.SetCatalogSort(true)
 	f.SetCompression(false) // done when finishing, with one compressor for all sheets
-	f.SetCreationDate(d.options.Created.UTC())
-	f.SetModificationDate(d.options.Created.UTC())
+	created := d.options.Created.UTC()
+	if created.IsZero() { // the writer would take the clock's; it is taken out when finishing
+		created = time.Unix(0, 0).UTC()
+	}
+	f.SetCreationDate(created)
+	f.SetModificationDate(created)
 	f.SetProducer("Soffit", true)
 	f.SetTitle(d.options.Title, true)
 	f.SetAuthor(d.options.Author, true)
@@ -99,7 +103,7 @@ func (d *Document) Bytes() ([]byte, error) {
 		return nil, fmt.Errorf("pdf: %w", err)
 	}
 	return finish(out.Bytes(), finishing{faces: faces, outline: d.outline, anchors: anchors,
-		language: d.options.Language, sheets: len(d.sheets), plain: d.options.Plain})
+		language: d.options.Language, sheets: len(d.sheets), plain: d.options.Plain, undated: d.options.Created.IsZero()})
 }
 
 func (d *Document) anchors() (map[string]place, error) {

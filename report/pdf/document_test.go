@@ -220,3 +220,20 @@ func BenchmarkDocument(b *testing.B) {
 		}
 	}
 }
+
+func TestUndated(t *testing.T) {
+	d := New(Options{Title: "note"})
+	d.Sheet()
+	out, err := d.Bytes()
+	if err != nil {
+		t.Fatal(err)
+	}
+	for _, key := range []string{"/CreationDate", "/ModDate"} {
+		if bytes.Contains(out, []byte(key)) {
+			t.Errorf("a document without a date carries %s", key)
+		}
+	}
+	if !bytes.Contains(out, []byte("/Producer")) {
+		t.Error("its other data are lost")
+	}
+}

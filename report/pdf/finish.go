@@ -7,6 +7,7 @@ import (
 	"errors"
 	"fmt"
 	"maps"
+	"regexp"
 	"slices"
 	"strconv"
 	"strings"
@@ -46,6 +47,9 @@ func (e embedded) tag() string {
 	return string(b[:])
 }
 
+// dates are the entries of the file's information that say when it was made.
+var dates = regexp.MustCompile(`/(?:CreationDate|ModDate) \([^)]*\)\n?`)
+
 type finishing struct {
 	faces    []embedded
 	outline  []outlineEntry
@@ -53,6 +57,7 @@ type finishing struct {
 	language string
 	sheets   int
 	plain    bool
+	undated  bool
 }
 
 // finish goes over the writer's file object by object and adds what the writer leaves out: compressed
@@ -95,6 +100,8 @@ func finish(file []byte, f finishing) ([]byte, error) {
 			head = bytes.ReplaceAll(head, []byte("/Subtype /Link "), []byte("/Subtype /Link /F 4 "))
 		case bytes.Contains(head, []byte("/Type /Font")):
 			head = []byte(fontNames.Replace(string(head)))
+		case f.undated && bytes.Contains(head, []byte("/CreationDate (")):
+			head = dates.ReplaceAll(head, nil)
 		case bytes.Contains(head, []byte("/ProcSet")):
 			head = []byte(resourceNames.Replace(string(head)))
 		case bytes.Contains(head, []byte("/Type /Outlines")):

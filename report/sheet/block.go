@@ -5,6 +5,7 @@ import (
 
 	"soffit/calc/trace"
 	"soffit/report/draw"
+	"soffit/report/text"
 )
 
 // chapter sets a chapter: its heading, then its blocks.
@@ -27,12 +28,14 @@ func (c *composer) chapter(ch *trace.Chapter) {
 func (c *composer) heading(number, title, anchor, words string) {
 	running := title
 	if number != "" {
-		running = number + "  " + title
+		running = number + "\u2002" + title
 	}
-	lines := wrap(draw.Bold, chapterSize, workColumn.w+resultColumn.w, title)
-	words = draw.Fit(draw.Serif, textSize, right-workColumn.x-draw.Width(draw.Bold, chapterSize, title)-20, words)
-	h := chapterSize*ascent + draw.Pt(len(lines)-1)*chapterSize*1.2 + 7
-	c.add(&element{owner: "chapter " + title, above: 26, height: h + 1, keep: true, running: running, anchors: []string{anchor},
+	lines := text.Words(draw.Bold, title).Lines(workColumn.w+resultColumn.w, text.Style{Size: chapterSize, Leading: chapterSize * 1.2})
+	if len(lines) > 0 {
+		words = draw.Fit(draw.Serif, textSize, right-workColumn.x-lines[0].Width-20, words)
+	}
+	h := chapterSize*ascent + draw.Pt(max(len(lines), 1)-1)*chapterSize*1.2 + 7
+	c.add(&element{owner: "chapter " + title, above: 26, height: h + 1, keep: true, opens: true, running: running, anchors: []string{anchor},
 		ruled: number != "", spans: spanFull,
 		paint: func(cv draw.Canvas, y draw.Pt) {
 			cv.Owner("full chapter " + title)
@@ -42,13 +45,19 @@ func (c *composer) heading(number, title, anchor, words string) {
 				x = workColumn.x
 			}
 			for i, l := range lines {
-				cv.Text(x, y+chapterSize*(ascent+1.2*draw.Pt(i)), draw.Bold, chapterSize, l)
+				l.Draw(cv, x, y+chapterSize*(ascent+1.2*draw.Pt(i)))
 			}
 			if words != "" {
 				draw.TextRight(cv, right, y+chapterSize*ascent, draw.Serif, textSize, words)
 			}
 			cv.Line(left, y+h, right, y+h, strongRule)
 		}})
+}
+
+// part opens a part after the chapters, on a new sheet unless a third of the sheet is left.
+func (c *composer) part(title, anchor, words string) {
+	c.heading("", title, anchor, words)
+	c.elements[len(c.elements)-1].least = body / 3
 }
 
 // blockHeading opens a block; where it runs over rows it says which of them is worked.
@@ -61,7 +70,7 @@ func (c *composer) blockHeading(b *trace.Block) {
 			fmt.Sprintf("Worked in full at %s; the record holds all %d rows.", b.Over.Rows[b.Row], len(b.Over.Rows)))
 	}
 	el := e.element(true)
-	el.above, el.keep, el.spans, el.ruled = 15, true, spanWide, !plain(b)
+	el.above, el.keep, el.opens, el.spans, el.ruled = 15, true, true, spanWide, !plain(b)
 	c.add(el)
 }
 

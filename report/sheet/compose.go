@@ -9,6 +9,7 @@ import (
 	"soffit/calc/trace"
 	"soffit/report/draw"
 	"soffit/report/mathset"
+	"soffit/report/text"
 )
 
 // composer turns the entries of a note into elements.
@@ -68,37 +69,43 @@ func rowNumbers(at map[string]int) map[string]string {
 	return out
 }
 
-// result is what the result column says of a line at a row: symbol = value, in two lines where one is too long.
+// result is what the result column says of a line at a row: symbol = value, somewhat smaller where one line is too
+// long for it, in two lines where that is too long too.
 func (c *composer) result(e *columns, l *trace.Line, w worked) {
-	set := mathset.Setting{Size: textSize, Index: rowNumbers(w.indices())}
-	symbol, value := set.Symbol(l.Symbol), set.Result(l.Shown[w.flat], l.Unit.String())
-	if one := symbol.Related("=", value); one.Width() <= e.result.w || e.wide {
-		e.result.lines(one.Lines(wideColumn.w), textSize, textLead, 0, 0)
-	} else {
-		e.result.row(symbol, textSize, textLead, 0, 0)
-		e.result.row(set.Words(draw.Serif, "=").Then(0.278, value), textSize, textLead, 2, 0)
+	for _, size := range []draw.Pt{textSize, 9.3, noteSize} {
+		set := mathset.Setting{Size: size, Index: rowNumbers(w.indices())}
+		symbol, value := set.Symbol(l.Symbol), set.Result(l.Shown[w.flat], l.Unit.String())
+		one := symbol.Related("=", value)
+		fits := one.Width() <= e.result.w
+		switch {
+		case fits || e.wide && size == noteSize:
+			e.result.lines(one.Lines(wideColumn.w), textSize, textLead, 0, 0)
+		case size == noteSize:
+			e.result.row(symbol, textSize, textLead, 0, 0)
+			e.result.row(set.Words(draw.Serif, "=").Then(0.278, value), textSize, textLead, 2, 0)
+		}
+		if fits {
+			break
+		}
 	}
 	e.result.right(0, e.result.w)
 }
 
 // title adds the words of an entry, and the row it is worked for where that is not the block's.
 func (c *composer) title(e *columns, b *trace.Block, name string, axes []*trace.Axis, w worked) {
-	p := phrase(draw.Serif, capital(name))
-	at := place(b, axes, w)
-	if at == "" {
-		e.work.paragraph(p, textSize, textLead, 0)
-		return
-	}
-	beside := phrase(draw.Italic, " — "+at)
-	for i := range beside {
-		beside[i].Scale = float64(noteSize / textSize)
-	}
-	if one := append(p[:len(p):len(p)], beside...); one.Width(textSize) <= e.work.w {
-		e.work.paragraph(one, textSize, textLead, 0)
-		return
+	p := text.Words(draw.Serif, capital(name))
+	if at := place(b, axes, w); at != "" {
+		whole := draw.Width(draw.Italic, noteSize, "— "+at) <= e.work.w // it is not divided where one line holds it
+		if whole {
+			at = strings.ReplaceAll(at, " ", "\u00a0")
+		}
+		p = append(p, text.Run{Face: draw.Serif, Text: " "})
+		for _, r := range text.Words(draw.Italic, "—\u00a0"+at) {
+			r.Scale, r.Whole = float64(noteSize/textSize), whole
+			p = append(p, r)
+		}
 	}
 	e.work.paragraph(p, textSize, textLead, 0)
-	e.work.words(draw.Italic, noteSize, noteLead, 0.8, "for "+at)
 }
 
 // place names the rows an entry is worked for; the implicit row only where it is not the block's.

@@ -23,7 +23,7 @@ func (c *composer) headings() []heading {
 			out = append(out, heading{1, b.Number, b.Title, b.Path()})
 		}
 	}
-	return append(out, heading{0, "", "Symbols", "part:symbols"}, heading{0, "", "References", "part:references"},
+	return append(out, heading{0, "", "Symbols", "part:symbols"}, heading{0, "", "Clauses used", "part:references"},
 		heading{0, "", "The member file as given", "part:input"})
 }
 
@@ -48,8 +48,12 @@ func (c *composer) contents() {
 		total += cells[i].h
 	}
 	if total <= room {
-		for _, k := range cells {
-			c.add(&element{owner: "contents", height: k.h, paint: func(cv draw.Canvas, y draw.Pt) {
+		for i, k := range cells {
+			above := draw.Pt(0)
+			if i == 0 {
+				above = 4
+			}
+			c.add(&element{owner: "contents", above: above, height: k.h, paint: func(cv draw.Canvas, y draw.Pt) {
 				cv.Owner("full contents")
 				k.paint(cv, left, y)
 			}})
@@ -58,7 +62,7 @@ func (c *composer) contents() {
 		for i, h := range list {
 			cells[i] = c.contentsLine(h, twinWidth)
 		}
-		c.add(twin("contents", cells, 0))
+		c.add(twin("contents", cells, 8))
 	}
 	c.partHead("How to read a sheet")
 	c.add(keepTogether(textElements(lines, fullColumn, "reading", 3, false, spanFull))...)
@@ -75,7 +79,7 @@ func (c *composer) contentsLine(h heading, w draw.Pt) cell {
 	if h.number == "" {
 		at = in
 	}
-	lines := wrap(face, textSize, w-34-at, h.title)
+	lines := text.Words(face, h.title).Lines(w-34-at, text.Style{Size: textSize, Leading: lead})
 	last := len(lines) - 1
 	return cell{lead*draw.Pt(len(lines)) + above, above, func(cv draw.Canvas, x, y draw.Pt) {
 		first := y + above + textSize*ascent
@@ -84,11 +88,11 @@ func (c *composer) contentsLine(h heading, w draw.Pt) cell {
 		end := x + w - draw.Width(face, textSize, sheet)
 		cv.Text(x+in, first, face, textSize, h.number)
 		for i, l := range lines {
-			cv.Text(x+at, first+draw.Pt(i)*lead, face, textSize, l)
+			l.Draw(cv, x+at, first+draw.Pt(i)*lead)
 		}
 		cv.Text(end, base, face, textSize, sheet)
 		// The dots of all lines stand under each other.
-		if from := x + at + draw.Width(face, textSize, lines[last]) + 5; from < x+w-24 {
+		if from := x + at + lines[last].Width + 5; from < x+w-24 {
 			cv.Line(x+w-20, base-0.5, from, base-0.5, 0.5, 0.5, 3.5)
 		}
 		cv.Link(x, y+above, w, lead*draw.Pt(last+1), h.anchor)

@@ -60,7 +60,7 @@ func referenceLines(r clause.Ref, document string) []string {
 // break it into many lines.
 func (e *columns) formula(r mathset.Row) {
 	b := r.Lines(e.work.w - indent)
-	if narrow := b.Width() > e.work.w-indent+0.05; narrow || len(b.Lines) > 4 {
+	if narrow := b.Width() > e.work.w-indent+0.05 || b.Size() < textSize; narrow || len(b.Lines) > 4 {
 		if w := r.Lines(wideColumn.w - indent); narrow || w.Height()+textLead < 0.8*b.Height() {
 			b, e.wide = w, true
 		}
@@ -78,7 +78,7 @@ func (e *columns) element(onFirst bool) *element {
 			target = e.work.inks[0].y
 		}
 		shift = max(0, target-e.result.baseline)
-		if e.wide {
+		if e.wide && !e.clear(shift) {
 			shift = e.work.bottom + 3
 		}
 	}
@@ -105,7 +105,7 @@ func (e *columns) element(onFirst bool) *element {
 	out := &element{owner: number, above: entryGap, height: h, ruled: true}
 	work, result := "work ", "result "
 	if e.wide {
-		work, result, out.spans = "wide ", "wide ", spanWide
+		work, result, out.spans, out.across = "wide ", "wide ", spanWide, e.overhang(shift)
 	}
 	if e.head.Key != "" {
 		out.anchors = []string{e.head.Key}
@@ -124,6 +124,47 @@ func (e *columns) element(onFirst bool) *element {
 			c.Owner("check " + number)
 			tickBox(c, y+tick)
 		}
+	}
+	return out
+}
+
+// clear tells whether the result, moved down by shift, stands clear of the work that reaches into its column.
+func (e *columns) clear(shift draw.Pt) bool {
+	const apart = 12
+	top, left := e.result.inks[0].y+shift-textSize-2, resultColumn.w
+	for i := range e.result.inks {
+		left = min(left, e.result.inks[i].x)
+	}
+	for i := range e.work.inks {
+		k := &e.work.inks[i]
+		if k.y+k.down() > top && workColumn.x+k.x+k.width()+apart > resultColumn.x+left {
+			return false
+		}
+	}
+	return true
+}
+
+// overhang is where work, or a result moved down by shift, stands across the hairline between the two columns; pieces
+// of the hairline too short to be seen as one are left out.
+func (e *columns) overhang(shift draw.Pt) []reach {
+	const shortest = 10
+	out := []reach{}
+	add := func(k *ink, x, y draw.Pt) {
+		if x+k.x >= rule2+3 || x+k.x+k.width() <= rule2-3 {
+			return
+		}
+		r := reach{y + k.y - k.up() - 1, y + k.y + k.down() + 1}
+		if n := len(out); n > 0 && r.from-out[n-1].to < shortest {
+			out[n-1].to = r.to
+			return
+		}
+		out = append(out, r)
+	}
+	for i := range e.work.inks {
+		add(&e.work.inks[i], workColumn.x, 0)
+	}
+	for i := range e.result.inks {
+		add(&e.result.inks[i], resultColumn.x, shift)
 	}
 	return out
 }

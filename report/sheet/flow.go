@@ -19,6 +19,7 @@ type page struct {
 	running string // chapter at the top of the sheet
 	y       draw.Pt
 	head    *element // the table head in force on this sheet
+	rows    int      // placed under it
 }
 
 // ruled tells whether the page is a calculation sheet.
@@ -34,14 +35,15 @@ func (p *page) ruled() bool {
 // flow fills sheets with elements in order.
 type flow struct {
 	pages   []*page
-	waiting []*element // floats for the top of the next sheet
+	waiting []*element // floats for the next place outside a table with room for them
+	table   *element   // the head of the table that the last element belongs to
 	running string
 }
 
 // fill lays out the elements of the parts on sheets. An element taller than a sheet is an error.
 func fill(elements []*element) ([]*page, error) {
 	f := &flow{}
-	f.turn()
+	f.turn(false)
 	for i := 0; i < len(elements); {
 		n := chunk(elements[i:])
 		if err := f.put(elements[i:i+n], elements[i+n:]); err != nil {
@@ -49,8 +51,9 @@ func fill(elements []*element) ([]*page, error) {
 		}
 		i += n
 	}
+	f.land()
 	for len(f.waiting) > 0 {
-		f.turn()
+		f.turn(false)
 	}
 	return f.pages, nil
 }
@@ -69,16 +72,19 @@ func (f *flow) page() *page { return f.pages[len(f.pages)-1] }
 // leastSplit is the room below a heading in which an element is begun that goes on overleaf.
 const leastSplit draw.Pt = 80
 
-// turn begins a sheet, with the floats that wait for it.
-func (f *flow) turn() {
+// turn begins a sheet, with the floats that wait for it unless a table goes on there.
+func (f *flow) turn(inTable bool) {
 	f.pages = append(f.pages, &page{running: f.running, y: bodyTop})
-	waiting := f.waiting
-	f.waiting = nil
-	for i, e := range waiting {
-		if !f.fits(waiting[i : i+1]) {
-			f.waiting = waiting[i:]
-			return
-		}
+	if !inTable {
+		f.land()
+	}
+}
+
+// land places the floats that wait, as many as the sheet has room for.
+func (f *flow) land() {
+	for len(f.waiting) > 0 && f.fits(f.waiting[:1]) {
+		e := f.waiting[0]
+		f.waiting = f.waiting[1:]
 		f.place(e)
 	}
 }
@@ -86,7 +92,7 @@ func (f *flow) turn() {
 // need is the height of a run on the current sheet, with what must be repeated above it.
 func (f *flow) need(es []*element) draw.Pt {
 	h, p := draw.Pt(0), f.page()
-	head := p.head
+	head, rows := p.head, p.rows
 	for i, e := range es {
 		if len(p.placed) > 0 || i > 0 {
 			h += e.above
@@ -97,17 +103,42 @@ func (f *flow) need(es []*element) draw.Pt {
 				h += headGap
 			}
 		}
+		if e.head != head || e.head == e {
+			rows = 0
+		}
+		h += e.gap(rows)
+		if e.head != e {
+			rows++
+		}
 		head = e.head
 		h += e.height
 	}
 	return h
 }
 
+// gap is the space above a row of a table that stands below so many others on its sheet.
+func (e *element) gap(rows int) draw.Pt {
+	if e.grouped && rows > 0 && rows%groupOf == 0 {
+		return groupGap
+	}
+	return 0
+}
+
 func (f *flow) fits(es []*element) bool { return f.page().y+f.need(es) <= bodyBottom+0.01 }
 
 func (f *flow) put(es, after []*element) error {
-	if es[0].fresh && len(f.page().placed) > 0 {
-		for f.turn(); len(f.waiting) > 0 || len(f.page().placed) > 0; f.turn() {
+	inTable := es[0].head != nil && es[0].head != es[0] && es[0].head == f.table
+	if !inTable {
+		f.land()
+	}
+	switch {
+	case es[0].fresh:
+		f.clear()
+	case es[0].least > 0 && f.page().y+es[0].above+es[0].least > bodyBottom:
+		f.clear()
+	case es[0].opens: // figures from before come first
+		for len(f.waiting) > 0 {
+			f.turn(false)
 		}
 	}
 	if f.fits(es) {
@@ -121,22 +152,14 @@ func (f *flow) put(es, after []*element) error {
 			return f.divide(last)
 		}
 	}
-	// A figure waits for the next sheet; a heading above it then leads what comes after it.
-	if last.floats && len(f.page().placed) > 0 {
-		lead := es[:len(es)-1]
-		next := after[:min(len(after), 1)]
-		if len(after) > 0 {
-			next = after[:chunk(after)]
-		}
-		enough := len(next) > 0 && !next[0].fresh && !next[len(next)-1].floats
-		if len(lead) == 0 && f.queued()+last.height < body/2 || enough && f.fits(append(lead[:len(lead):len(lead)], next...)) {
-			f.all(lead)
-			f.waiting = append(f.waiting, last)
-			return nil
-		}
+	// A figure without a heading waits for the next sheet, unless a heading follows it.
+	if last.floats && len(es) == 1 && len(f.page().placed) > 0 && len(after) > 0 && !after[0].opens && !after[0].fresh &&
+		f.queued()+last.height < body/2 {
+		f.waiting = append(f.waiting, last)
+		return nil
 	}
 	if len(f.page().placed) > 0 {
-		f.turn()
+		f.turn(inTable)
 		return f.put(es, after)
 	}
 	// The run is taller than a sheet: it breaks where it must.
@@ -145,11 +168,18 @@ func (f *flow) put(es, after []*element) error {
 			if len(f.page().placed) == 0 {
 				return fmt.Errorf("%s is taller than a sheet", e.owner)
 			}
-			f.turn()
+			f.turn(true)
 		}
 		f.place(e)
 	}
 	return nil
+}
+
+// clear begins a new sheet, after those of the figures that wait, unless the sheet is empty.
+func (f *flow) clear() {
+	for len(f.waiting) > 0 || len(f.page().placed) > 0 {
+		f.turn(false)
+	}
 }
 
 // headGap is the space above a repeated head that does not begin its sheet.
@@ -176,12 +206,12 @@ func (f *flow) divide(e *element) error {
 			if len(f.page().placed) == 0 {
 				return fmt.Errorf("%s does not fit on a sheet", e.owner)
 			}
-			f.turn()
+			f.turn(true)
 			continue
 		}
 		f.place(first)
 		if rest != nil {
-			f.turn()
+			f.turn(true)
 		}
 		e = rest
 	}
@@ -207,7 +237,14 @@ func (f *flow) place(e *element) {
 		p.placed = append(p.placed, placed{e.head, p.y, true})
 		p.y += e.head.height
 	}
-	p.head = e.head
+	if e.head != p.head || e.head == e {
+		p.rows = 0
+	}
+	p.y += e.gap(p.rows)
+	if e.head != e {
+		p.rows++
+	}
+	p.head, f.table = e.head, e.head
 	if e.running != "" {
 		if len(p.placed) == 0 {
 			p.running = e.running

@@ -47,10 +47,17 @@ func TestFigureWaitsForTheNextSheet(t *testing.T) {
 	if got, want := filled(t, piece("a", body-100), figure, piece("b", 40), piece("c", 100)), "a b | figure c"; got != want {
 		t.Errorf("have %q, want %q", got, want)
 	}
-	// A heading above it leads what comes after it, and nothing new begins before it.
+	// A heading above it stays with it, and nothing new begins before it.
 	heading, fresh := piece("heading", 20), piece("fresh", 20)
-	heading.keep, fresh.fresh = true, true
-	if got, want := filled(t, piece("a", body-100), heading, figure, piece("b", 40), fresh), "a heading b | figure | fresh"; got != want {
+	heading.keep, heading.opens, fresh.fresh = true, true, true
+	if got, want := filled(t, piece("a", body-100), heading, figure, piece("b", 40), fresh), "a | heading figure b | fresh"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+	// It never passes the next heading.
+	if got, want := filled(t, piece("a", body-100), figure, heading, piece("b", 40)), "a | figure heading b"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+	if got, want := filled(t, piece("a", body-100), figure, piece("b", 40), heading, piece("c", 40)), "a b | figure heading c"; got != want {
 		t.Errorf("have %q, want %q", got, want)
 	}
 	if got, want := filled(t, piece("a", body-100), figure), "a | figure"; got != want {
@@ -68,6 +75,83 @@ func TestTableHeadIsRepeated(t *testing.T) {
 		es = append(es, r)
 	}
 	if got, want := filled(t, es...), "a head row row | head row row row row"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+}
+
+// rowsUnder are a head of 30 points and rows of 20 under it.
+func rowsUnder(name string, rows int) []*element {
+	head := piece(name, 30)
+	head.keep, head.head = true, head
+	out := []*element{head}
+	for range rows {
+		r := piece("row", 20)
+		r.head = head
+		out = append(out, r)
+	}
+	return out
+}
+
+func TestFigureStaysOutOfTables(t *testing.T) {
+	figure := piece("figure", 200)
+	figure.floats = true
+	es := append([]*element{piece("a", body-100), figure}, rowsUnder("head", 5)...)
+	if got, want := filled(t, append(es, piece("b", 40))...), "a head row row row | head row row figure b"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+}
+
+func TestGapsCountFromTheHeadOfTheSheet(t *testing.T) {
+	es := append([]*element{piece("a", body-30-7*20-groupGap)}, rowsUnder("head", 16)...)
+	for _, e := range es[1:] {
+		e.grouped = true
+	}
+	pages, err := fill(es)
+	if err != nil {
+		t.Fatal(err)
+	}
+	for n, p := range pages {
+		rows := 0
+		for i := 1; i < len(p.placed); i++ {
+			if p.placed[i].owner != "row" {
+				continue
+			}
+			want := draw.Pt(0)
+			if rows > 0 && rows%groupOf == 0 {
+				want = groupGap
+			}
+			if got := p.placed[i].y - p.placed[i-1].y - p.placed[i-1].height; got != want {
+				t.Errorf("sheet %d, row %d: a gap of %v, want %v", n+1, rows+1, float64(got), float64(want))
+			}
+			rows++
+		}
+	}
+	if len(pages) != 2 {
+		t.Fatalf("%d sheets, want 2", len(pages))
+	}
+}
+
+func TestPartWantsRoom(t *testing.T) {
+	part := piece("part", 20)
+	part.keep, part.opens, part.least = true, true, body/3
+	if got, want := filled(t, piece("a", body*0.7), part, piece("b", 40)), "a | part b"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+	if got, want := filled(t, piece("a", body*0.6), part, piece("b", 40)), "a part b"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+}
+
+func TestHeadingHasTwoLinesBelow(t *testing.T) {
+	heading := piece("heading", 20)
+	heading.keep, heading.opens = true, true
+	es := func(h draw.Pt) []*element {
+		return keepHeadings([]*element{piece("a", body-60), heading, piece("b", h), piece("c", 30)})
+	}
+	if got, want := filled(t, es(12)...), "a | heading b c"; got != want {
+		t.Errorf("have %q, want %q", got, want)
+	}
+	if got, want := filled(t, es(30)...), "a heading b | c"; got != want {
 		t.Errorf("have %q, want %q", got, want)
 	}
 }

@@ -7,6 +7,7 @@ import (
 
 	"soffit/calc/trace"
 	"soffit/report/draw"
+	"soffit/report/text"
 )
 
 // furniture is what every sheet carries around its body.
@@ -112,7 +113,7 @@ func (f *furniture) draw(c draw.Canvas, n int, p *page) {
 	room = line(1, draw.Marks, headSize-1.2, f.fingerprint, left)
 	c.Text(left, y[1], draw.Serif, headSize, draw.Fit(draw.Serif, headSize, room, f.issue))
 	room = line(2, draw.Serif, headSize, f.roles, left)
-	c.Text(left, y[2], draw.Serif, headSize, draw.Fit(draw.Serif, headSize, room, p.running))
+	running(c, left, y[2], room, p.running)
 	c.Line(left, headRule, right, headRule, strongRule)
 
 	c.Owner("foot")
@@ -127,6 +128,16 @@ func (f *furniture) draw(c draw.Canvas, n int, p *page) {
 	}
 }
 
+// running sets the chapter in the head, cut where it is too long; symbols in it stand as mathematics.
+func running(c draw.Canvas, x, y, room draw.Pt, title string) {
+	lines := text.Words(draw.Serif, title).Lines(10*width, text.Style{Size: headSize, Leading: headLine})
+	if len(lines) == 1 && lines[0].Width <= room {
+		lines[0].Draw(c, x, y)
+		return
+	}
+	c.Text(x, y, draw.Serif, headSize, draw.Fit(draw.Serif, headSize, room, title))
+}
+
 // columns draws the heads of the columns and the hairlines between them, left out where an element stands across.
 func (f *furniture) columns(c draw.Canvas, p *page) {
 	c.Owner("head")
@@ -137,31 +148,53 @@ func (f *furniture) columns(c draw.Canvas, p *page) {
 	c.Line(left, columnRule, right, columnRule, hairline)
 	c.Owner("hairline")
 	for i, x := range []draw.Pt{rule1, rule2, rule3} {
-		open := true
-		from := columnRule
+		h := hairlineAt{c: c, x: x, from: columnRule, open: true}
 		for k, e := range p.placed {
-			crossed := !e.ruled || e.spans == spanFull || e.spans == spanWide && i == 1
 			top := columnRule
 			if k > 0 {
 				top = (p.placed[k-1].y + p.placed[k-1].height + e.y) / 2
 			}
-			switch {
-			case crossed && open:
-				if top > from+1 {
-					c.Line(x, from, x, top, hairline)
+			if e.ruled && e.spans == spanWide && i == 1 && e.across != nil {
+				h.resume(top)
+				for _, r := range e.across {
+					h.stop(e.y + r.from)
+					h.resume(e.y + r.to)
 				}
-				open = false
-			case !crossed && !open:
-				from, open = top, true
+				continue
+			}
+			if !e.ruled || e.spans == spanFull || e.spans == spanWide && i == 1 {
+				h.stop(top)
+			} else {
+				h.resume(top)
 			}
 		}
-		if open {
-			last := p.placed[len(p.placed)-1]
-			end := last.y + last.height + 8
-			if footRule-end < 90 {
-				end = footRule
-			}
-			c.Line(x, from, x, end, hairline)
+		last := p.placed[len(p.placed)-1]
+		end := last.y + last.height + 8
+		if footRule-end < 90 {
+			end = footRule
 		}
+		h.stop(end)
+	}
+}
+
+// hairlineAt draws a hairline down a sheet, with gaps.
+type hairlineAt struct {
+	c       draw.Canvas
+	x, from draw.Pt
+	open    bool
+}
+
+// stop ends the line where something stands across it.
+func (h *hairlineAt) stop(y draw.Pt) {
+	if h.open && y > h.from+1 {
+		h.c.Line(h.x, h.from, h.x, y, hairline)
+	}
+	h.open = false
+}
+
+// resume goes on with it.
+func (h *hairlineAt) resume(y draw.Pt) {
+	if !h.open {
+		h.from, h.open = y, true
 	}
 }

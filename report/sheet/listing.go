@@ -24,24 +24,65 @@ const (
 	listingStart draw.Pt = 22 // of the text, right of the line numbers
 )
 
-// listing sets the member file as given, with its line numbers.
+// listing sets the member file as given, with its line numbers: in two columns where nearly all of its lines are short
+// enough, the others going on in the next line.
 func (c *composer) listing() {
+	lines := inputLines(c.note.Document.Input)
+	long := 0
+	for _, s := range lines {
+		if len(numbered(s, 1, twinWidth).set) > 1 {
+			long++
+		}
+	}
+	if len(lines) > 1 && long*mostLong <= len(lines) {
+		cells := make([]cell, len(lines))
+		for i, s := range lines {
+			l := numbered(s, i+1, twinWidth)
+			cells[i] = cell{l.height(), 0, func(cv draw.Canvas, x, y draw.Pt) {
+				cv.Anchor(lineAnchor(i+1), left, y-8)
+				l.paint(cv, x, y)
+			}}
+		}
+		c.add(twin("member file", cells, 8))
+		return
+	}
 	var out []*element
-	for i, s := range inputLines(c.note.Document.Input) {
-		lines := text.Listing([]string{printable(s)}, fullColumn.w-listingStart, text.Style{Size: listingSize, Leading: listingLead})
-		number := strconv.Itoa(i + 1)
-		e := &element{owner: "member file", height: listingLead * draw.Pt(len(lines)), anchors: []string{lineAnchor(i + 1)}}
+	for i, s := range lines {
+		l := numbered(s, i+1, fullColumn.w)
+		e := &element{owner: "member file", height: l.height(), anchors: []string{lineAnchor(i + 1)}}
+		if i == 0 {
+			e.above = 8
+		}
 		e.paint = func(cv draw.Canvas, y draw.Pt) {
 			cv.Owner("full member file")
-			base := y + listingSize
-			draw.TextRight(cv, left+listingStart-8, base, draw.Serif, listingSize, number)
-			for k, l := range lines {
-				l.Draw(cv, left+listingStart, base+draw.Pt(k)*listingLead)
-			}
+			l.paint(cv, left, y)
 		}
 		out = append(out, e)
 	}
 	c.add(keepEnds(out)...)
+}
+
+// mostLong says which part of the lines may be too long for two columns: one in so many.
+const mostLong = 5
+
+// inputSet is a line of the member file set, with its number.
+type inputSet struct {
+	number string
+	set    []text.Line
+}
+
+func numbered(s string, n int, w draw.Pt) inputSet {
+	return inputSet{strconv.Itoa(n), text.Listing([]string{printable(s)}, w-listingStart, text.Style{Size: listingSize, Leading: listingLead})}
+}
+
+func (l inputSet) height() draw.Pt { return listingLead * draw.Pt(len(l.set)) }
+
+func (l inputSet) paint(cv draw.Canvas, x, y draw.Pt) {
+	base := y + listingSize
+	draw.TextRight(cv, x+listingStart-8, base, draw.Serif, listingSize, l.number)
+	for k, line := range l.set {
+		line.Draw(cv, x+listingStart, base+draw.Pt(k)*listingLead)
+	}
 }
 
 // printable replaces what no face can show; the record keeps the file itself.

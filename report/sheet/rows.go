@@ -28,9 +28,10 @@ func (c *composer) run(b *trace.Block, entries []trace.Entry) int {
 	switch {
 	case len(c.elements) == start:
 		return n // on no row was any of them computed
+	case kind(entries[0]) != 1: // the table of a step may stand overleaf
 	case n == 1:
 		c.elements[start].keep = true
-	case kind(entries[0]) == 1:
+	default:
 		// Of a long list the first two lines stay together, and the last three with the table.
 		for i := start; i < len(c.elements); i++ {
 			c.elements[i].keep = i == start || len(c.elements)-i <= 3 || n <= 5

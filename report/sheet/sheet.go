@@ -5,6 +5,7 @@ package sheet
 
 import (
 	"fmt"
+	"slices"
 	"time"
 
 	"soffit/calc/trace"
@@ -71,16 +72,16 @@ func layOut(n *trace.Note) (*layout, error) {
 	for _, ch := range n.Chapters {
 		c.chapter(ch)
 	}
-	c.heading("", "Symbols", "part:symbols", "")
+	c.part("Symbols", "part:symbols", "")
 	c.symbolList()
-	c.heading("", "References", "part:references", "")
+	c.part("Clauses used", "part:references", "")
 	c.referenceList()
-	c.heading("", "The member file as given", "part:input", n.Document.InputName)
+	c.part("The member file as given", "part:input", n.Document.InputName)
 	c.listing()
 	if c.err != nil {
 		return nil, c.err
 	}
-	pages, err := fill(c.elements)
+	pages, err := fill(keepHeadings(c.elements))
 	if err != nil {
 		return nil, fmt.Errorf("sheet: %w", err)
 	}
@@ -120,19 +121,18 @@ func author(d *trace.Document) string {
 	return ""
 }
 
-// issued is the date the file carries: the latest in the document, for no clock takes part.
+// issued is the date the file carries, for no clock takes part: that on which it was prepared, else that of the
+// last revision which has one. It is zero where neither is dated.
 func issued(d *trace.Document) time.Time {
-	latest := time.Unix(0, 0).UTC()
-	see := func(s string) {
-		if t, err := time.Parse(time.DateOnly, s); err == nil && t.After(latest) {
-			latest = t
+	for _, r := range d.Roles {
+		if t, err := time.Parse(time.DateOnly, r.Date); err == nil && r.Role == "prepared" {
+			return t
 		}
 	}
-	for _, r := range d.Roles {
-		see(r.Date)
+	for _, i := range slices.Backward(d.History) {
+		if t, err := time.Parse(time.DateOnly, i.Date); err == nil {
+			return t
+		}
 	}
-	for _, i := range d.History {
-		see(i.Date)
-	}
-	return latest
+	return time.Time{}
 }

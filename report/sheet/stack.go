@@ -31,21 +31,39 @@ func (k *ink) width() draw.Pt {
 	return draw.Width(k.face, k.size, k.text)
 }
 
+// up and down are how far the ink reaches above its baseline and below.
+func (k *ink) up() draw.Pt {
+	switch {
+	case k.box != nil:
+		return k.box.Height
+	case k.line != nil:
+		return k.line.Height
+	}
+	return k.size * ascent
+}
+
+func (k *ink) down() draw.Pt {
+	switch {
+	case k.box != nil:
+		return k.box.Depth
+	case k.line != nil:
+		return k.line.Depth
+	}
+	return k.size * descent
+}
+
 func (k *ink) paint(c draw.Canvas, x, y draw.Pt) {
 	x, y = x+k.x, y+k.y
-	up, down := k.size*ascent, k.size*descent
 	switch {
 	case k.box != nil:
 		k.box.Draw(c, x, y)
-		up, down = k.box.Height, k.box.Depth
 	case k.line != nil:
 		k.line.Draw(c, x, y)
-		up, down = k.line.Height, k.line.Depth
 	default:
 		c.Text(x, y, k.face, k.size, k.text)
 	}
 	if k.link != "" {
-		c.Link(x, y-up, k.width(), up+down, k.link)
+		c.Link(x, y-k.up(), k.width(), k.up()+k.down(), k.link)
 	}
 }
 
@@ -84,8 +102,12 @@ func (s *stack) lines(b mathset.Block, size, lead, gap, in draw.Pt) {
 		l := &b.Lines[i]
 		if i > 0 {
 			gap = 0
-			if l.Box.Height > size*(ascent+0.1) || b.Lines[i-1].Box.Depth > size*(descent+0.1) {
-				gap = 0.38 * size // fractions above each other keep apart
+			high, deep := l.Box.Height > size*(ascent+0.1), b.Lines[i-1].Box.Depth > size*(descent+0.1)
+			switch { // fractions above each other keep apart
+			case high && deep:
+				gap = 0.38*size + 3
+			case high || deep:
+				gap = 0.38 * size
 			}
 		}
 		least := lead
@@ -98,8 +120,8 @@ func (s *stack) lines(b mathset.Block, size, lead, gap, in draw.Pt) {
 
 // words adds words of the record, broken at blanks.
 func (s *stack) words(f draw.Face, size, lead, gap draw.Pt, words string) {
-	if strings.ContainsAny(words, "_`⁰¹²³⁴⁵⁶⁷⁸⁹⁻") {
-		s.paragraph(phrase(f, words), size, lead, gap)
+	if strings.ContainsAny(words, "_`⁰¹²³⁴⁵⁶⁷⁸⁹⁻₀₁₂₃₄₅₆₇₈₉") {
+		s.paragraph(text.Words(f, words), size, lead, gap)
 		return
 	}
 	for i, line := range wrap(f, size, s.w, words) {
@@ -130,6 +152,9 @@ func (s *stack) right(n int, end draw.Pt) {
 // small keeps the baseline of the last line where it was, for small print below the line a result stands on.
 func (s *stack) small(add func()) {
 	keep := s.baseline
+	if n := len(s.inks); n > 0 && s.bottom-s.baseline > s.inks[n-1].size*(descent+0.1) {
+		s.bottom += 2 // clear of a fraction
+	}
 	add()
 	s.baseline = keep
 }

@@ -19,7 +19,7 @@ func (c *composer) step(b *trace.Block, s *trace.Step) {
 	symbols := o.symbols()
 	row := symbols.Symbol(s.Symbol).Related("=", symbols.Expr(s.Formula.Expr))
 	if len(s.Uses) > 0 {
-		row = row.Related("=", o.numbers().Expr(s.Formula.Expr))
+		row = row.Next("=", o.numbers().Expr(s.Formula.Expr))
 	}
 	e.formula(row)
 	c.inUnits(e, s.Formula.Expr)

@@ -15,7 +15,9 @@ type table struct {
 	rows    [][]string // labels of each row
 	labels  [][]stack  // those labels, set
 	columns []tableColumn
-	mark    int // the row worked in full, −1 for none
+	mark    int  // the row worked in full, −1 for none
+	along   bool // its rows are places along the member
+	placed  bool // its first column says where they are
 }
 
 type tableColumn struct {
@@ -31,9 +33,10 @@ type tableColumn struct {
 const (
 	labelGap draw.Pt = 5.5 // between number and name of a row
 	cellPad  draw.Pt = 3   // beside the outer ones
-	groupOf          = 5   // rows between gaps
-	whole            = 8   // rows that are not divided over sheets
-	headLead draw.Pt = 9.5 // between the lines of a table's head
+	groupOf          = 5   // rows between gaps, which guide the eye
+	groupGap draw.Pt = 3
+	whole            = 8    // rows that are not divided over sheets
+	headLead draw.Pt = 10.2 // between the lines of a table's head
 	rowLead  draw.Pt = 11.2
 )
 
@@ -67,9 +70,9 @@ func printed(s string) string {
 	return b.String() + s[len(whole):]
 }
 
-// pointAt divides a number before its point.
+// pointAt divides a number before its point, two numbers with dots between them before that of the second.
 func pointAt(cell string) (before, after string) {
-	if i := strings.IndexByte(cell, '.'); i >= 0 {
+	if i := strings.LastIndexByte(cell, '.'); i >= 0 {
 		return cell[:i], cell[i:]
 	}
 	return cell, ""
@@ -84,6 +87,7 @@ func (k *tableColumn) face(i int) draw.Face {
 
 // measure finds the width of a column.
 func (k *tableColumn) measure() {
+	k.left, k.right = 0, 0
 	for i, s := range k.cells {
 		if s == "–" {
 			continue
@@ -124,8 +128,48 @@ func (t *table) setLabels() []draw.Pt {
 }
 
 // elements measures the table: in the work column where it is narrow enough, across work and result, or across
-// the sheet; in several tables one under the other where even that is too narrow.
+// the sheet; in several tables one under the other where even that is too narrow, each with the names of its rows
+// and the column of their places.
 func (t *table) elements(above draw.Pt) []*element {
+	for n := 1; ; n++ {
+		var out []*element
+		for i, p := range t.divided(n) {
+			if i > 0 {
+				above = 9
+			}
+			es := p.folded().fitted(above, n >= len(t.columns))
+			if es == nil {
+				out = nil
+				break
+			}
+			out = append(out, es...)
+		}
+		if out != nil {
+			return out
+		}
+	}
+}
+
+// divided is the table in n parts of about as many columns; each begins with the places of the rows.
+func (t *table) divided(n int) []*table {
+	kept := 0
+	if t.placed {
+		kept = 1
+	}
+	rest := t.columns[kept:]
+	n = max(min(n, len(rest)), 1)
+	out := make([]*table, 0, n)
+	for k := range n {
+		p := *t
+		p.columns = append(t.columns[:kept:kept], rest[k*len(rest)/n:(k+1)*len(rest)/n]...)
+		out = append(out, &p)
+	}
+	return out
+}
+
+// fitted measures the table in the narrowest place that holds it; nil where none does, unless it must be set.
+func (t *table) fitted(above draw.Pt, must bool) []*element {
+	t.labels = nil
 	for i := range t.columns {
 		t.columns[i].measure()
 	}
@@ -137,14 +181,10 @@ func (t *table) elements(above draw.Pt) []*element {
 			}
 		}
 	}
-	n := len(t.columns)
-	for n > 1 && t.width(labels, 8.5, n) > fullColumn.w {
-		n--
+	if must {
+		return t.measured(labels, 6.5, t.width(labels, 6.5, len(t.columns)), spanFull, above)
 	}
-	first, rest := *t, *t
-	rest.labels = nil
-	first.columns, rest.columns = t.columns[:n], t.columns[n:]
-	return append(first.measured(labels, 8.5, first.width(labels, 8.5, n), spanFull, above), rest.elements(9)...)
+	return nil
 }
 
 // width is that of the labels and the first n columns.
@@ -200,8 +240,8 @@ func (t *table) measured(labels []draw.Pt, gap, w draw.Pt, s span, above draw.Pt
 	}
 	out := []*element{head}
 	for i := range t.rows {
-		e := &element{owner: t.owner, height: rowLead, ruled: true, spans: s, head: head}
-		if i == len(t.rows)-1 || t.group(i) {
+		e := &element{owner: t.owner, height: rowLead, ruled: true, spans: s, head: head, grouped: len(t.rows) > groupOf+2}
+		if i == len(t.rows)-1 {
 			e.height += 3
 		}
 		e.paint = func(c draw.Canvas, y draw.Pt) {
@@ -216,9 +256,6 @@ func (t *table) measured(labels []draw.Pt, gap, w draw.Pt, s span, above draw.Pt
 	keepEnds(out[1:])
 	return out
 }
-
-// group tells whether a gap follows the row, to guide the eye.
-func (t *table) group(i int) bool { return i%groupOf == groupOf-1 && len(t.rows) > groupOf+2 }
 
 func (t *table) paintRow(c draw.Canvas, i int, x0, y, w, gap draw.Pt, labels []draw.Pt) {
 	last := i == len(t.rows)-1

@@ -20,6 +20,7 @@ func (c *composer) tableEntry(b *trace.Block, t *trace.Table) {
 	if t.Axis == b.Over {
 		out.mark = b.Row
 	}
+	out.along = t.Axis.Index == ""
 	for _, key := range t.Columns {
 		switch e := c.note.Entry(key).(type) {
 		case *trace.Check:
@@ -31,10 +32,24 @@ func (c *composer) tableEntry(b *trace.Block, t *trace.Table) {
 			return
 		}
 	}
+	if l := placesOf(c.note, t); l != nil {
+		out.placed = out.columns[0].rising(func(i int) float64 { return l.Values[i] })
+	}
 	es := out.elements(3)
 	title.spans = min(es[0].spans, spanWide)
 	c.add(title)
 	c.add(es...)
+}
+
+// placesOf is the first column of a table along the member, where it has one value for each place.
+func placesOf(n *trace.Note, t *trace.Table) *trace.Line {
+	if len(t.Columns) == 0 || t.Axis.Index != "" {
+		return nil
+	}
+	if l := trace.LineOf(n.Entry(t.Columns[0])); l != nil && len(l.Axes) == 1 {
+		return l
+	}
+	return nil
 }
 
 // tableColumns adds the column of a line, one for each row of its index axes where it has others than the table's.

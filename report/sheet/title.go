@@ -22,8 +22,8 @@ func (c *composer) titleSheet() {
 			cv.Owner("full title")
 			head.paint(cv, left, y)
 		}})
-	c.facts([][2]string{{"document", d.Number}, {"revision", d.Revision}, {"status", d.Status}, {"member file", d.InputName},
-		{"fingerprint", strings.TrimPrefix(c.mark, "sha256:")}})
+	c.facts([][2]string{{"document", d.Number}, {"revision", d.Revision}, {"status", d.Status}, {"member file", d.InputName}})
+	c.fingerprints()
 	c.verdictWords()
 	c.limits()
 	c.history(d.History)
@@ -36,7 +36,7 @@ func (c *composer) titleSheet() {
 
 // partHead opens a section of the title sheet.
 func (c *composer) partHead(words string) {
-	c.add(&element{owner: words, above: 13, height: textSize*(ascent+descent) + 1, keep: true, paint: func(cv draw.Canvas, y draw.Pt) {
+	c.add(&element{owner: words, above: 13, height: textSize*(ascent+descent) + 1, keep: true, opens: true, paint: func(cv draw.Canvas, y draw.Pt) {
 		cv.Owner("full " + words)
 		cv.Text(left, y+textSize*ascent, draw.Bold, textSize, words)
 	}})
@@ -44,26 +44,42 @@ func (c *composer) partHead(words string) {
 
 // facts lists what the document is, name and value.
 func (c *composer) facts(facts [][2]string) {
+	const in = 80
 	for i, f := range facts {
 		if f[1] == "" {
 			continue
 		}
-		v := stack{w: fullColumn.w - 80}
-		face, size := draw.Serif, textSize
-		if f[0] == "fingerprint" {
-			face, size = draw.Marks, 7.5
-		}
-		v.words(face, size, textLead, 0, f[1])
-		v.inks[0].y = textSize * ascent
-		name := f[0]
-		e := &element{owner: name, above: 1, height: max(v.bottom, textLead), keep: i < len(facts)-1}
-		e.paint = func(cv draw.Canvas, y draw.Pt) {
-			cv.Owner("full " + name)
-			cv.Text(left, y+textSize*ascent, draw.Italic, textSize, name)
-			v.paint(cv, left+80, y)
-		}
-		c.add(e)
+		v := stack{w: fullColumn.w - in}
+		v.words(draw.Serif, textSize, textLead, 0, f[1])
+		c.fact(f[0], in, v, i < len(facts)-1)
 	}
+}
+
+// fingerprints shows both, each with what it covers.
+func (c *composer) fingerprints() {
+	const in = 80
+	for i, f := range [][3]string{
+		{"engineering", c.mark, "fingerprint of input, formulas, printed values and verdicts: what a role signs"},
+		{"document", c.note.DocumentFingerprint(), "fingerprint of all that and of names, dates, titles and narrative"},
+	} {
+		v := stack{w: fullColumn.w - in}
+		v.words(draw.Marks, 7.5, textLead, 0, strings.TrimPrefix(f[1], "sha256:"))
+		v.words(draw.Serif, smallSize, smallLead, 0, f[2])
+		c.fact(f[0], in, v, i == 0)
+		c.elements[len(c.elements)-1].above = 3
+	}
+}
+
+// fact is one line of what the document is.
+func (c *composer) fact(name string, in draw.Pt, v stack, keep bool) {
+	v.inks[0].y = textSize * ascent
+	e := &element{owner: name, above: 1, height: max(v.bottom, textLead), keep: keep}
+	e.paint = func(cv draw.Canvas, y draw.Pt) {
+		cv.Owner("full " + name)
+		cv.Text(left, y+textSize*ascent, draw.Italic, textSize, name)
+		v.paint(cv, left+in, y)
+	}
+	c.add(e)
 }
 
 // verdictWords says in a frame what the checks come to, and names those that fail.
@@ -117,7 +133,7 @@ func (s *stack) named(k *trace.Check) {
 		words += ": the highest ratio, "
 	}
 	n := len(s.inks)
-	s.paragraph(append(phrase(draw.Serif, words), figure), tableSize, tableLead, 3)
+	s.paragraph(append(text.Words(draw.Serif, words), figure), tableSize, tableLead, 3)
 	for i := n; i < len(s.inks); i++ {
 		s.inks[i].link = k.Key
 	}

@@ -147,7 +147,9 @@ func bar(c draw.Canvas, s slot, base draw.Pt, ratio float64, fails bool) {
 	}
 	c.Line(s.x+one, y-2.2, s.x+one, y, 0.7)
 	c.Line(s.x+one, y+h, s.x+one, y+h+2.2, 0.7)
-	if w < one {
+	if w <= one {
 		c.Line(s.x+one, y, s.x+one, y+h, 0.7)
+	} else { // white within the bar, to be seen on black
+		c.Rect(s.x+one-0.5, y+0.2, 1, h-0.4, draw.Style{Fill: draw.White})
 	}
 }

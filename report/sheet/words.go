@@ -6,69 +6,7 @@ import (
 	"unicode/utf8"
 
 	"soffit/report/draw"
-	"soffit/report/mathset"
-	"soffit/report/text"
 )
-
-// phrase is words of the record as a paragraph: `symbols` and words with a subscript, as f_ctm, stand as
-// mathematics.
-func phrase(face draw.Face, s string) text.Paragraph {
-	var out text.Paragraph
-	plain := func(s string) {
-		if s != "" {
-			out = append(out, text.Run{Face: face, Text: s})
-		}
-	}
-	set := func(s string) bool {
-		if _, err := mathset.Inline(textSize, s); err != nil {
-			return false
-		}
-		out = append(out, text.Math(func(size draw.Pt) mathset.Row {
-			r, err := mathset.Inline(size, s)
-			if err != nil {
-				panic("sheet: a symbol that was read is read no more: " + s)
-			}
-			return r
-		}))
-		return true
-	}
-	if !strings.ContainsAny(s, "_`") {
-		plain(s)
-		return out
-	}
-	for i, part := range strings.Split(s, "`") {
-		if i%2 == 1 && set(part) {
-			continue
-		}
-		for part != "" {
-			start, end := subscripted(part)
-			plain(part[:start])
-			if start < end && !set(part[start:end]) {
-				plain(part[start:end])
-			}
-			part = part[end:]
-		}
-	}
-	return out
-}
-
-// subscripted finds the first word with a subscript; both ends are the length of s where there is none.
-func subscripted(s string) (start, end int) {
-	at := strings.IndexByte(s, '_')
-	if at < 0 {
-		return len(s), len(s)
-	}
-	start = strings.LastIndexFunc(s[:at], func(r rune) bool { return unicode.IsSpace(r) || r == '(' }) + 1
-	end = len(s)
-	if i := strings.IndexFunc(s[at:], unicode.IsSpace); i >= 0 {
-		end = at + i
-	}
-	end = start + len(strings.TrimRight(s[start:end], ",.;:"))
-	if !strings.Contains(s[start:end], "(") {
-		end = start + len(strings.TrimRight(s[start:end], ")"))
-	}
-	return start, end
-}
 
 // capital begins words with a capital, but not where they begin with a symbol.
 func capital(s string) string {

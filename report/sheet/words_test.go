@@ -50,16 +50,6 @@ func TestCapital(t *testing.T) {
 	}
 }
 
-func TestSubscripted(t *testing.T) {
-	for in, want := range map[string]string{"Cracking moment at f_ctm, bottom": "f_ctm", "ratio (ε_ud/ε_uk) of": "ε_ud/ε_uk", "l_pt2 bottom A": "l_pt2",
-		"none": "", "tensile strength f_ctm(t).": "f_ctm(t)", "of f_{p0,1k};": "f_{p0,1k}"} {
-		start, end := subscripted(in)
-		if got := in[start:end]; got != want {
-			t.Errorf("in %q: %q, want %q", in, got, want)
-		}
-	}
-}
-
 func TestWrap(t *testing.T) {
 	const w = 60
 	for _, s := range []string{"a few words that go on", "unbreakablewordthatisfartoolongforthecolumn", "KD-S-CN-0412-rev-P02-for-review", "x"} {

@@ -143,6 +143,9 @@ func Listing(text []string, width draw.Pt, style Style) []Line {
 				put(lead + s)
 				break
 			}
+			if i := strings.LastIndexByte(s[:n], ' ') + 1; i > n*2/3 { // behind a blank near the end
+				n = i
+			}
 			put(lead + s[:n])
 			s = s[n:]
 		}

@@ -173,17 +173,23 @@ func (w *walker) blocks(parent ast.Node) []block {
 // runs reads what is within a block.
 func (w *walker) runs(parent ast.Node, face draw.Face, anchor string) Paragraph {
 	var out Paragraph
+	before := "" // of the same words: an underscore divides them for the parser
 	for n := parent.FirstChild(); n != nil; n = n.NextSibling() {
 		switch n := n.(type) {
 		case *ast.Text:
-			s := string(util.UnescapePunctuations(n.Segment.Value(w.src)))
+			s := before + string(util.UnescapePunctuations(n.Segment.Value(w.src)))
+			before = ""
+			if next, ok := n.NextSibling().(*ast.Text); ok && !n.HardLineBreak() && !n.SoftLineBreak() && next != nil {
+				before = s
+				continue
+			}
 			if strings.ContainsRune(s, '&') {
 				s = string(util.ResolveEntityNames(util.ResolveNumericReferences([]byte(s))))
 				for _, r := range draw.Missing(face, s) {
 					w.trouble(w.at, "", "no typeface of the note has the sign %q (U+%04X)", r, r)
 				}
 			}
-			out = append(out, Run{Face: face, Text: s, Anchor: anchor})
+			out = append(out, wordsTo(face, anchor, s)...)
 			switch {
 			case n.HardLineBreak():
 				out = append(out, NewLine())

@@ -47,6 +47,7 @@ type Run struct {
 	Text   string
 	Anchor string // where it leads, "" for nowhere
 	Scale  float64
+	Whole  bool // set without a break within it
 	math   func(size draw.Pt) mathset.Row
 	broken bool // the line ends here
 }
@@ -131,7 +132,11 @@ func (p Paragraph) items(size, width draw.Pt) []item {
 				space = blank
 				continue
 			}
-			for i, part := range parts(r.Face, s, w, width) {
+			cuts := []part{{text: w}}
+			if !r.Whole {
+				cuts = parts(r.Face, s, w, width)
+			}
+			for i, part := range cuts {
 				it := r.item(s, part.text)
 				if i == 0 && space == 0 && !forced && joins(last(out), it, width) {
 					after = endsInFigure(part.text)
@@ -313,6 +318,9 @@ func (p Paragraph) Lines(width draw.Pt, style Style) []Line {
 			out = append(out, newLine(l, style, last(out)))
 		}
 		items = items[n:]
+	}
+	if n := len(out); n > 1 { // neither the first line nor the last stands alone on a sheet
+		out[0].Keep, out[n-2].Keep = true, true
 	}
 	return out
 }
