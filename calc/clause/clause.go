@@ -61,6 +61,7 @@ type Formula struct {
 	Text     string // in the notation of calc/formula
 	Unit     string // display unit of the result
 	Digits   int    // significant digits printed and carried; 0 means 5
+	Origin   string // where a formula of the member file stands, for errors; "" for the program's own
 	Domain   string // a condition on the operands outside which there is no result; "" if none
 	Examples []Example
 
@@ -114,11 +115,11 @@ func (f *Formula) SignificantDigits() int {
 	return f.Digits
 }
 
-// With is the same formula with another text and reference, for a national parameter given as an
-// expression. The symbol on the left stays.
-func (f *Formula) With(expr string, ref Ref) *Formula {
+// With is the same formula with another expression, for a national parameter of the member file. The symbol on the
+// left stays.
+func (f *Formula) With(expr, origin string) *Formula {
 	left, _, _ := strings.Cut(f.Text, "=")
-	return &Formula{ID: f.ID, Name: f.Name, Ref: ref, Text: strings.TrimSpace(left) + " = " + expr,
+	return &Formula{ID: f.ID, Name: f.Name, Ref: f.Ref, Origin: origin, Text: strings.TrimSpace(left) + " = " + expr,
 		Unit: f.Unit, Digits: f.Digits, Domain: f.Domain}
 }
 

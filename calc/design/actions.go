@@ -3,6 +3,7 @@ package design
 import (
 	"cmp"
 	"fmt"
+	"math"
 	"slices"
 
 	"soffit/calc/ec2"
@@ -12,8 +13,8 @@ import (
 	"soffit/templates"
 )
 
-// parts40 is in how many equal parts the span is cut for stations.
-const parts40 = 40
+// spanParts is in how many equal parts the span is cut for stations.
+const spanParts = 40
 
 // station is a place along the member at which everything is worked.
 type station struct {
@@ -21,8 +22,9 @@ type station struct {
 	x    float64 // mm from end A
 }
 
-// stationList is the tenths and fortieths of the span, each load, and where the force of a row of tendons starts,
-// has been handed over and can be anchored in full. Places nearer than 1 mm to an earlier one are the same.
+// stationList is the fortieths of the span, each load, and where the force of a row of tendons starts, has been handed
+// over and can be anchored in full. Bearings and loads stand where they are, to the last digit, for the shear force
+// jumps there; the others are rounded to 1 mm. One place has one station.
 func (j *job) stationList() []station {
 	length := j.m.Span.Length.Base()
 	a, b := j.m.Span.BearingA.FromEnd.Base(), length-j.m.Span.BearingB.FromEnd.Base()
@@ -32,26 +34,30 @@ func (j *job) stationList() []station {
 			return
 		}
 		for _, s := range all {
-			if s.x > x-1 && s.x < x+1 {
+			if s.x == x {
 				return
 			}
 		}
+		for slices.ContainsFunc(all, func(s station) bool { return s.name == name }) {
+			name += "′"
+		}
 		all = append(all, station{name, x})
 	}
+	round := func(name string, x float64) { add(name, math.Round(x)) }
 	add("bearing A", a)
 	add("bearing B", b)
-	add("mid-span", (a+b)/2)
-	for k := 1; k < parts40; k++ {
-		add(fmt.Sprintf("%g l", float64(k)/parts40), a+(b-a)*float64(k)/parts40)
-	}
 	for _, l := range j.loadRows()[1:] {
 		from, to := l.from.Quantity().Value, l.to.Quantity().Value
 		if from == to {
-			add(l.name, from)
+			add("load "+l.name, from)
 			continue
 		}
-		add(l.name+" from", from)
-		add(l.name+" to", to)
+		add("load "+l.name+" from", from)
+		add("load "+l.name+" to", to)
+	}
+	round("mid-span", (a+b)/2)
+	for k := 1; k < spanParts; k++ {
+		round(fmt.Sprintf("%g l", float64(k)/spanParts), a+(b-a)*float64(k)/spanParts)
 	}
 	for i, r := range j.rows.Rows {
 		row := trace.Place{{Axis: j.rows, Row: i}}
@@ -61,8 +67,8 @@ func (j *job) stationList() []station {
 			x    float64
 		}{{"start", debonded}, {"l_pt2", debonded + j.base("prestress.transmission/upper-transmission-length", row)},
 			{"l_bpd", debonded + j.base("prestress.transmission/anchorage-length", row)}} {
-			add(p.name+" "+r+" A", p.x)
-			add(p.name+" "+r+" B", length-p.x)
+			round(p.name+" "+r+" A", p.x)
+			round(p.name+" "+r+" B", length-p.x)
 		}
 	}
 	slices.SortFunc(all, func(s, t station) int { return cmp.Compare(s.x, t.x) })
@@ -87,7 +93,7 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 	list := j.stationList()
 	names, x := make([]string, len(list)), make([]quantity.Literal, len(list))
 	for i, s := range list {
-		names[i], x[i] = s.name, number(s.x, "m", 3)
+		names[i], x[i] = s.name, number(s.x, "m", places(s.x)+3)
 	}
 	j.stations = j.n.Axis("station", "station along the member", "", names)
 
@@ -98,16 +104,32 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 
 	b = c.Block("effects", "Effects of each load along the member", j.stations, trace.Take(j.span, j.actionData, j.reactions)...)
 	j.effects = b
-	b.Row = j.stations.Row("mid-span")
-	b.GivenRows(def("position", "x_m", "Distance of the station from end A, rounded to 1 mm", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", parts40))
+	b.GivenRows(def("position", "x_m", "Distance of the station from end A", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", spanParts))
+	b.Row = j.midSpan()
 	b.Steps(mechanics.LoadMoment, mechanics.ShearLeft, mechanics.ShearRight)
 
 	j.ultimate = j.ultimateCombinations(c)
 	j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CharacteristicFactor, ec2.CharacteristicMoment, ec2.CharacteristicEnvelope)
-	j.frequent = j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, ec2.FrequentMoment, ec2.FrequentEnvelope)
+	j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, ec2.FrequentMoment, ec2.FrequentEnvelope)
 	b = c.Block("quasi-permanent", "Quasi-permanent combination", j.stations, trace.Take(j.actionData, j.effects)...)
-	b.Row = j.stations.Row("mid-span")
+	b.Row = j.midSpan()
 	b.Step(ec2.QuasiPermanentMoment)
 	b.Table("service", "Largest moments in service along the member", j.stations, "actions.effects/position", "actions.characteristic/characteristic", "actions.frequent/frequent", "quasi-permanent")
 	j.effectsFigure()
+}
+
+// midSpan is the station nearest to the middle of the span: a load may stand there and give it its name.
+func (j *job) midSpan() int {
+	x := trace.LineOf(j.n.Entry("actions.effects/position"))
+	if x == nil {
+		return 0
+	}
+	middle := (j.base("given.span/bearing-a", nil) + j.base("given.span/bearing-b", nil)) / 2
+	best := 0
+	for i, v := range x.Values {
+		if math.Abs(v-middle) < math.Abs(x.Values[best]-middle) {
+			best = i
+		}
+	}
+	return best
 }

@@ -17,9 +17,9 @@ func (j *job) basisChapter(c *trace.Chapter) {
 	b := c.Block("code", "Code and situation", nil)
 	s := &j.m.Basis
 	b.Text("code", fmt.Sprintf("Code: %s, with EN 1990. Combination of actions at the ultimate limit state: %s. Consequence class %s; "+
-		"supervision of the design %s; design working life %s.%s\n\nThe clause and equation numbers were recalled, not checked against "+
-		"the opened standard, when the program was written.", s.Code.Text, s.Combination.Text, s.ConsequenceClass.Text,
-		s.SupervisionLevel.Text, s.DesignWorkingLife, exposures(s.Exposure)))
+		"supervision of the design %s; design working life %s.%s Cement class %s, which decides nothing in this note.\n\nThe clause and equation numbers were recalled, not checked against "+
+		"the opened standard, when the program was written.", literal(s.Code.Text), s.Combination.Text, s.ConsequenceClass.Text,
+		s.SupervisionLevel.Text, s.DesignWorkingLife, exposures(s.Exposure), j.m.Concrete.CementClass.Text))
 	j.nationalParameters(c)
 	b = c.Block("assumptions", "Assumptions and defaults", nil)
 	b.Text("assumptions", j.assumptions())
@@ -28,6 +28,13 @@ func (j *job) basisChapter(c *trace.Chapter) {
 	b = c.Block("limits", "What this note covers, and what it does not", nil)
 	b.Text("limits", templates.Text("limits"))
 }
+
+// literal keeps text of the member file from being read as Markdown or as a value.
+func literal(s string) string {
+	return markup.Replace(s)
+}
+
+var markup = strings.NewReplacer("{", "(", "}", ")", "`", "'", "*", `\*`, "_", `\_`, "[", `\[`, "]", `\]`, "<", `\<`, "|", `\|`, "#", `\#`, `\`, `\\`)
 
 func exposures(list []member.Word) string {
 	if len(list) == 0 {
@@ -53,7 +60,7 @@ func (j *job) nationalParameters(c *trace.Chapter) {
 		case p.Formula != nil:
 			f, source := j.formula(p.Formula)
 			if tree, err := f.Parsed(); err == nil {
-				expressions = append(expressions, fmt.Sprintf("`%s` (%s; %s)", tree, p.Given.Ref, source))
+				expressions = append(expressions, fmt.Sprintf("`%s` (%s; %s)", tree, p.Given.Ref, literal(source)))
 			}
 		case p.Rows != nil:
 			j.combinationFactors(b, p, own)
@@ -99,7 +106,7 @@ func (j *job) formula(f *clause.Formula) (*clause.Formula, string) {
 					text += "·[" + u + "]"
 				}
 			}
-			return f.With(text, f.Ref), nationalSource(own)
+			return f.With(text, fmt.Sprintf("national parameter %s, line %d of the member file", own.Key, own.Pos.Line)), nationalSource(own)
 		}
 	}
 	return f, "recommended expression"

@@ -15,8 +15,9 @@ func (j *job) bending(b *trace.Block) {
 		b.Step(ec2.BarCounts)
 	}
 	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
-	there, _ := b.Choose(ec2.TensionSteelThere)
+	there, none := b.Choose(ec2.TensionSteelThere)
 	b.On(there, func() { b.Step(pick(j.hasBars(), ec2.TensionDepthWithBars, ec2.TensionDepth)) })
+	b.On(none, func() { b.Step(ec2.DepthWithoutTensionSteel) })
 	b.Step(pick(j.hasBars(), ec2.LimitForceWithBars, ec2.LimitForce))
 	anchored, bare := b.Choose(ec2.SteelAnchored)
 	b.On(anchored, func() {

@@ -95,21 +95,20 @@ func (j *job) ultimateCombinations(c *trace.Chapter) *trace.Block {
 	b.Step(ec2.LowerFactor)
 	b.Steps(ec2.UltimateMoment, ec2.UltimateMomentMin, ec2.UltimateShearLeft, ec2.UltimateShearRight, ec2.UltimateShearLeftMin, ec2.UltimateShearRightMin)
 	b.Steps(ec2.MomentEnvelope, ec2.MomentEnvelopeMin, ec2.ShearLeftEnvelope, ec2.ShearRightEnvelope, ec2.ShearLeftEnvelopeMin, ec2.ShearRightEnvelopeMin)
-	b.Row = j.stations.Row("mid-span")
+	b.Row = j.midSpan()
 	b.Table("along", "Moments and shear forces at the ultimate limit state along the member", j.stations, "actions.effects/position",
 		"moment", "moment-least", "shear-left", "shear-left-least", "shear-right", "shear-right-least")
 	return b
 }
 
 // combination records a service combination: its factors, its moments and their largest.
-func (j *job) combination(c *trace.Chapter, slug, title string, list func(*job) []combination, factor, moment, largest *clause.Formula) *trace.Block {
+func (j *job) combination(c *trace.Chapter, slug, title string, list func(*job) []combination, factor, moment, largest *clause.Formula) {
 	combinations := list(j)
 	axis := j.n.Axis(slug+" combination", "combination, "+slug, "n", names(combinations))
 	b := c.Block(slug, title, j.stations, trace.Take(j.actionData, j.effects)...)
 	j.marks(b, axis, combinations)
 	b.Steps(factor, moment, largest)
-	b.Row = j.stations.Row("mid-span")
-	return b
+	b.Row = j.midSpan()
 }
 
 // effectsFigure draws the ultimate moments and shear forces.

@@ -4,6 +4,7 @@ package design
 
 import (
 	"fmt"
+	"path/filepath"
 	"slices"
 	"strconv"
 	"strings"
@@ -26,10 +27,10 @@ type job struct {
 
 	rows, bars, parts, loads, stations *trace.Axis
 
-	parameters, constants, concrete, section, span, tendons, barData, actionData      *trace.Block
-	strengths, tendonStrengths, barStrengths, gross, positions, spanLength            *trace.Block
-	reactions, effects, ultimate, frequent, stress, transmission, barAnchorage, along *trace.Block
-	resistance                                                                        *trace.Block
+	parameters, constants, concrete, section, span, tendons, barData, actionData *trace.Block
+	strengths, tendonStrengths, barStrengths, gross, positions, spanLength       *trace.Block
+	reactions, effects, ultimate, stress, transmission, barAnchorage, along      *trace.Block
+	resistance                                                                   *trace.Block
 
 	steel []trace.Source // what the resistance of a section takes
 	form  form           // the shape as a stack of parts
@@ -63,7 +64,7 @@ func run(m *member.Member, trying bool) (*trace.Note, error) {
 func document(m *member.Member) trace.Document {
 	d := &m.Document
 	out := trace.Document{Program: Program, Project: d.Project.Text, Title: d.Title.Text, Number: d.Number.Text,
-		Revision: d.Revision.Text, Status: d.Status.Text, InputName: m.File, Input: string(m.Source)}
+		Revision: d.Revision.Text, Status: d.Status.Text, Originator: d.Originator.Text, InputName: filepath.Base(m.File), Input: string(m.Source)}
 	for _, r := range []struct {
 		role string
 		of   member.Role

@@ -96,7 +96,7 @@ func (j *job) tendonRow(r *member.StrandRow) tendon {
 		t.area, t.diameter, t.fpk, t.ep, t.ultimate = p.Area.Literal, p.Diameter.Literal, p.Fpk.Literal, p.Ep.Literal, p.StrainAtMaximum.Literal
 		t.proof = number(p.Fp01k.Base()*p.Area.Base(), "kN", 3)
 		t.source = fmt.Sprintf("%s: f_p0,1k = %s declared × area; %s", r.Product.Text, p.Fp01k, p.Source.Text)
-		if p.Kind.Text == "wire" {
+		if p.Kind.Text == "indented wire" {
 			t.bondTransfer, t.bondUltimate, t.shape = "2.7", "1.4", "0.25"
 		}
 		return t
@@ -117,7 +117,7 @@ func (j *job) givenTendons(c *trace.Chapter) {
 	var sources []string
 	for i, r := range rows {
 		names[i] = r.row.Name.Text
-		if s := "- " + r.source; !strings.Contains(strings.Join(sources, "\n"), s) {
+		if s := "- " + literal(r.source); !strings.Contains(strings.Join(sources, "\n"), s) {
 			sources = append(sources, s)
 		}
 	}
@@ -251,7 +251,7 @@ func (j *job) loadRows() []load {
 			l := &a.Loads[i]
 			n := load{name: a.Name.Text, origin: member.Origin{Pos: l.Pos, Given: true}, action: k, category: a.Category.Text, permanent: a.Kind.Text == "permanent"}
 			if len(a.Loads) > 1 {
-				n.name = fmt.Sprintf("%s %d", a.Name.Text, i+1)
+				n.name = fmt.Sprintf("%s (%d)", a.Name.Text, i+1)
 			}
 			if l.Point.Present() {
 				n.q, n.f, n.from, n.to = none, l.Point.Literal, l.At.Literal, l.At.Literal

@@ -9,6 +9,7 @@ import (
 	"soffit/calc/design"
 	"soffit/calc/ec2"
 	"soffit/calc/member"
+	"soffit/calc/quantity"
 	"soffit/calc/trace"
 )
 
@@ -217,6 +218,89 @@ func TestOverReinforced(t *testing.T) {
 	}
 }
 
+// station finds a row by the place of its station, mm.
+func station(t *testing.T, n *trace.Note, x float64) int {
+	t.Helper()
+	l := trace.LineOf(n.Entry("actions.effects/position"))
+	for i, v := range l.Values {
+		if math.Abs(v-x) < 1e-6 {
+			return i
+		}
+	}
+	t.Fatalf("no station at %g mm", x)
+	return 0
+}
+
+// TestShearJumpsAtBearings: whatever the decimals of a bearing, its station has the shear force of the end beyond it on
+// one side and the reaction on the other, and a symmetric beam has the same at both ends.
+func TestShearJumpsAtBearings(t *testing.T) {
+	for _, from := range []string{"152.4 mm", "150.6 mm", "100.5 mm", "150 mm", "150.123456 mm"} {
+		text := strings.ReplaceAll(beam{}.text(), "from end: 150 mm", "from end: "+from)
+		m, findings := member.Read("beam.yaml", []byte(text), design.Options())
+		if err := findings.Err(); err != nil {
+			t.Fatal(err)
+		}
+		n, err := design.Run(m)
+		if err != nil {
+			t.Fatal(err)
+		}
+		a := m.Span.BearingA.FromEnd.Base()
+		left, right := trace.LineOf(n.Entry("actions.ultimate/shear-left-least")), trace.LineOf(n.Entry("actions.ultimate/shear-right"))
+		i, k := station(t, n, a), station(t, n, 12300-a)
+		if left.Values[i] > 0 || right.Values[i] < 100e3 {
+			t.Errorf("%s: V = %s and %s kN beside bearing A", from, left.Shown[i], right.Shown[i])
+		}
+		near(t, from+": bearing B", -trace.LineOf(n.Entry("actions.ultimate/shear-left-least")).Values[k], right.Values[i], 1e-4)
+	}
+}
+
+// TestNamesThatMeet: an action called as a station, and one called as a load of another, take nothing away from the
+// largest moment.
+func TestNamesThatMeet(t *testing.T) {
+	plain := beam{}.run(t)
+	n := beam{actions: "  - {name: finishes, kind: permanent, loads: [{uniform: 4 kN/m}]}\n  - {name: floor, kind: variable, category: B, loads: [{uniform: 6 kN/m}]}\n" +
+		"  - {name: mid-span, kind: permanent, loads: [{point: 0.001 kN, at: 0.6 m}]}\n  - {name: crane, kind: permanent, loads: [{point: 0.001 kN, at: 1 m}, {point: 0.001 kN, at: 2 m}]}\n  - {name: crane 1, kind: permanent, loads: [{point: 0.001 kN, at: 1 m}]}"}.run(t)
+	a, b := trace.LineOf(plain.Entry("ultimate.largest-moment/largest-moment")), trace.LineOf(n.Entry("ultimate.largest-moment/largest-moment"))
+	near(t, "largest moment", b.Values[0], a.Values[0], 1e-4)
+}
+
+// TestWorstOfFailing: where nothing resists, the place with the largest moment without resistance is the worst, not one
+// with a ratio.
+func TestWorstOfFailing(t *testing.T) {
+	n := beam{strands: "  bond: good\n  rows:\n    - {name: low, product: Y1860S7-12.5, count: 2, spacing: 40 mm, height: 50 mm, debonded length: 5 m, jacking stress: 1340 MPa, stated losses: {at release: 100 MPa, final: 250 MPa, source: invented}}"}.run(t)
+	c := n.Entry("ultimate.bending/bending-sufficient").(*trace.Check)
+	if !c.Failed() || c.Margin[c.Worst] == "" || n.Ranked()[0] != c && n.Ranked()[0].Margin[n.Ranked()[0].Worst] == "" {
+		t.Errorf("worst is %s: ratio %q, margin %q", trace.RowName(c.Axes, c.Worst), c.Ratio[c.Worst], c.Margin[c.Worst])
+	}
+}
+
+// TestParameterExpressions: every symbol that an expression may use can be used; one that gives less than nothing is
+// refused.
+func TestParameterExpressions(t *testing.T) {
+	for _, p := range ec2.Parameters {
+		for s, d := range p.Symbols {
+			expr := s
+			switch d {
+			case quantity.Stress:
+				expr = "100·[mm²]·" + s + "/[MPa]"
+			case quantity.Length:
+				expr = "1·[mm]·" + s
+			}
+			for _, sign := range []string{"", "−"} {
+				text := beam{combination: `6.10, national parameters: {"` + p.ASCII + `": {expression: "` + sign + expr + `", source: invented}}`}.text()
+				m, findings := member.Read("beam.yaml", []byte(text), design.Options())
+				if err := findings.Err(); err != nil {
+					t.Fatal(err)
+				}
+				_, err := design.Run(m)
+				if sign == "" && err != nil || sign != "" && (err == nil || !strings.Contains(err.Error(), "negative area")) {
+					t.Errorf("%s = %s%s: %v", p.ASCII, sign, expr, err)
+				}
+			}
+		}
+	}
+}
+
 // TestWhollyCompressed: too much steel gives a note that fails and says why, not a resistance.
 func TestWhollyCompressed(t *testing.T) {
 	rows := ""
@@ -239,12 +323,12 @@ func TestWhollyCompressed(t *testing.T) {
 // finding with its line.
 func TestNarrative(t *testing.T) {
 	for text, want := range map[string]string{
-		"It resists {M_Rd}, {f_cd} of concrete.":       "",
-		"Largest: {actions.ultimate/moment}.":          "",
-		"A {M_Rdx}.":                                   "beam.yaml:16:3: narrative, ultimate: {M_Rdx}: no step of the note gives this symbol",
-		"A {f_{pd,i}}.":                                "single values only",
-		"A {a b}.":                                     "is no symbol",
-		"A {ultimate.bending/nothing}.":                "no value under this name",
+		"It resists {M_Rd}, {f_cd} of concrete.":        "",
+		"Largest: {actions.ultimate/moment}.":           "",
+		"A {M_Rdx}.":                                    "beam.yaml:16:3: narrative, ultimate: {M_Rdx}: no step of the note gives this symbol",
+		"A {f_{pd,i}}.":                                 "single values only",
+		"A {a b}.":                                      "is no symbol",
+		"A {ultimate.bending/nothing}.":                 "no value under this name",
 		"Code such as `{M_Rdx}` stays as it is written": "",
 	} {
 		src := beam{}.text() + "narrative:\n  ultimate: |\n    " + text + "\n"

@@ -37,7 +37,7 @@ func (j *job) alongChapter(c *trace.Chapter) {
 	}
 	b := c.Block("along", "Stress present and available along the member", j.stations, takes...)
 	j.along = b
-	b.Row = j.stations.Row("mid-span")
+	b.Row = j.midSpan()
 	b.Steps(ec2.BondedLength, ec2.PresentStress, ec2.InitialPresentStress, ec2.AvailableStress)
 	if j.hasBars() {
 		b.Step(ec2.BarAvailableStress)

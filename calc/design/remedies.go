@@ -2,6 +2,7 @@ package design
 
 import (
 	"fmt"
+	"slices"
 
 	"soffit/calc/member"
 )
@@ -35,11 +36,17 @@ func lowest(m *member.Member) *member.StrandRow {
 	return &m.Strands.Rows[low]
 }
 
-// moreTendons adds to the lowest row that has room.
+// spaced says that the tendons of a row stand apart, at least 30 mm.
+func spaced(r *member.StrandRow) bool { return r.Spacing.Base() >= 30 }
+
+// moreTendons adds to the lowest row while there is room.
 func moreTendons(m *member.Member, step int) string {
 	r := lowest(m)
 	before := r.Count.N
 	r.Count.N += step
+	if !spaced(r) {
+		return ""
+	}
 	f := formOf(&m.Shape)
 	edge := 2 * r.Height.Base() // as far from the sides as from the soffit
 	if float64(r.Count.N-1)*r.Spacing.Base() > f.lower[0].Quantity().Value-edge {
@@ -58,11 +65,13 @@ func addedRow(m *member.Member, step int) string {
 		}
 	}
 	like := low.Name.Text
-	low.Name.Text, low.Count.N = "added", 2*step
+	low.Name.Text, low.Count.N = unused("added", func(n string) bool {
+		return slices.ContainsFunc(rows, func(r member.StrandRow) bool { return r.Name.Text == n })
+	}), 2*step
 	low.Height.Literal = number(top+50, "mm", places(top))
 	f := formOf(&m.Shape)
 	shape, err := f.shape()
-	if err != nil || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
+	if err != nil || !spaced(&low) || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
 		return ""
 	}
 	m.Strands.Rows = append(rows, low)
@@ -90,7 +99,9 @@ func addedBars(m *member.Member, step int) string {
 	if err != nil || shape.WidthAt(height) < 2*low.Height.Base()+60 {
 		return ""
 	}
-	bar := member.BarRow{Name: member.Word{Text: "added bars"}, Count: member.Count{N: 2}, DuctilityClass: member.Word{Text: "B"}}
+	bar := member.BarRow{Name: member.Word{Text: unused("added bars", func(n string) bool {
+		return slices.ContainsFunc(m.Bars.Rows, func(r member.BarRow) bool { return r.Name.Text == n })
+	})}, Count: member.Count{N: 2}, DuctilityClass: member.Word{Text: "B"}}
 	bar.Diameter.Literal, bar.Fyk.Literal = plain(diameter, "mm"), plain("500", "MPa")
 	bar.Height.Literal = number(height, "mm", places(height))
 	bar.Spacing.Literal = number(shape.WidthAt(height)-2*low.Height.Base(), "mm", 0)
@@ -103,6 +114,14 @@ func addedBars(m *member.Member, step int) string {
 	return fmt.Sprintf("two bars of %s mm more at %s above the soffit, %s", diameter, bar.Height, bar.Fyk)
 }
 
+// unused is a name, with marks added until it is not taken.
+func unused(name string, taken func(string) bool) string {
+	for taken(name) {
+		name += "′"
+	}
+	return name
+}
+
 // strongerConcrete raises f_ck by 5 MPa a step, to 90 MPa at most; the strength at release stays.
 func strongerConcrete(m *member.Member, step int) string {
 	v := m.Concrete.Fck.Base() + 5*float64(step)
@@ -110,7 +129,7 @@ func strongerConcrete(m *member.Member, step int) string {
 		return ""
 	}
 	before := m.Concrete.Fck.String()
-	m.Concrete.Fck.Literal = number(v, "MPa", 0)
+	m.Concrete.Fck.Literal = number(v, "MPa", places(v))
 	return fmt.Sprintf("f_ck %s instead of %s", m.Concrete.Fck, before)
 }
 

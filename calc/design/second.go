@@ -30,7 +30,7 @@ func (j *job) secondChapter(c *trace.Chapter) {
 // secondStatics weighs the loads with the influence lines of each station, which need no reaction.
 func (j *job) secondStatics(c *trace.Chapter) {
 	b := c.Block("statics", "Moments from influence lines", j.stations, trace.Take(j.span, j.actionData, j.reactions, j.effects)...)
-	b.Row = j.stations.Row("mid-span")
+	b.Row = j.midSpan()
 	b.Found("influence lines drawn from the movement of the beam as a mechanism", 6, func(r *trace.Row) ([]float64, error) {
 		q, f, from, to := r.Column("q_i"), r.Column("F_i"), r.Column("a_i"), r.Column("b_i")
 		loads := make([]statics.Load, len(q))

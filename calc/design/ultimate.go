@@ -51,7 +51,7 @@ func (j *job) cracked(c *trace.Chapter) {
 	b.Row = j.resistance.Row
 	b.Text("cracked", templates.Text("cracked"))
 	b.Given(def("strut-angle", "θ", "Angle of the struts: the flattest allowed, shear not being justified here", "°", ref(ec2.Code, "6.2.3(2)")), plain(linkAngle, "°"), "assumption on the safe side")
-	b.Decide(ec2.NoLargerMoment)
+	b.Require(ec2.NoLargerMoment)
 	b.Step(ec2.BottomStress)
 	cracked, _ := b.Choose(ec2.CrackedAtUltimate)
 	b.On(cracked, func() {
@@ -67,10 +67,7 @@ func (j *job) cracked(c *trace.Chapter) {
 // withShear adds the tension of the shear force where the section cracks, and asks for cracks before failure.
 func (j *job) withShear(b *trace.Block) {
 	b.Step(ec2.LargestShear)
-	there, none := b.Choose(ec2.TensionSteelThere)
-	b.On(there, func() { b.Step(ec2.LeverArm) })
-	b.On(none, func() { b.Step(ec2.LeverArmOfDepth) })
-	b.Steps(ec2.AddedMoment, ec2.MomentWithShear)
+	b.Steps(ec2.LeverArm, ec2.AddedMoment, ec2.MomentWithShear)
 	b.Check(ec2.BendingWithShear)
 	b.Text("warning", templates.Text("warning"))
 	b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
@@ -79,7 +76,7 @@ func (j *job) withShear(b *trace.Block) {
 
 // steelLimits checks minimum steel at every station where steel is bonded in the tension zone, and maximum steel.
 func (j *job) steelLimits(c *trace.Chapter) {
-	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.stress, j.along, j.resistance)
+	takes := trace.Take(j.parameters, j.concrete, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.stress, j.along, j.resistance)
 	if j.hasBars() {
 		takes = append(takes, trace.Take(j.barData, j.barStrengths)...)
 	}
@@ -93,14 +90,18 @@ func (j *job) steelLimits(c *trace.Chapter) {
 	}
 	b.Given(def("reference-strength", "f_yk", "Yield strength that the minimum is expressed in", "MPa"), strength, source)
 	b.Steps(ec2.TensionPartDepth, ec2.TensionPartArea, ec2.TensionWidth)
-	there, none := b.Choose(ec2.TensionSteelThere)
 	minimum, _ := j.formula(ec2.MinimumSteel)
-	b.On(there, func() { b.Step(minimum) })
-	b.On(none, func() { b.Step(ec2.MinimumSteelOfDepth) })
+	b.Step(minimum)
+	if minimum != ec2.MinimumSteel {
+		b.Require(ec2.MinimumSteelPositive)
+	}
 	b.Step(pick(j.hasBars(), ec2.TensionSteelWithBars, ec2.TensionSteel))
 	b.Check(ec2.MinimumSteelProvided)
 	maximum, _ := j.formula(ec2.MaximumSteel)
 	b.Step(maximum)
+	if maximum != ec2.MaximumSteel {
+		b.Require(ec2.MaximumSteelPositive)
+	}
 	b.Step(pick(j.hasBars(), ec2.TotalSteelWithBars, ec2.TotalSteel))
 	b.Check(ec2.MaximumSteelKept)
 }

@@ -1,7 +1,6 @@
 package design
 
 import (
-	"cmp"
 	"fmt"
 	"slices"
 	"strings"
@@ -88,7 +87,7 @@ func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 				break
 			}
 			if left := failures(n); left == 0 {
-				worst := worstOf(n)
+				worst := n.Ranked()[0]
 				record(r.id, fmt.Sprintf("Every check passes with %s; highest ratio, %s", words, worst.Name), worst.Ratio[worst.Worst])
 				for _, k := range failing {
 					found[k.Key] = true
@@ -132,11 +131,6 @@ func failures(n *trace.Note) int {
 		}
 	}
 	return count
-}
-
-// worstOf is the check with the highest ratio.
-func worstOf(n *trace.Note) *trace.Check {
-	return slices.MaxFunc(n.Checks(), func(a, b *trace.Check) int { return cmp.Compare(a.Value[a.Worst], b.Value[b.Worst]) })
 }
 
 // keyed makes an ID of a key: no slash and no point.

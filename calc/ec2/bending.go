@@ -154,8 +154,9 @@ var (
 			Examples: hand("2.2 kN·m", "F_{p,i} = 1 kN, 2 kN", "z_{p,i} = 1000 mm, 600 mm")})
 )
 
-// balanced is the domain of a resistance: the forces balance to a thousandth.
-const balanced = "abs(ΔF) ≤ 0.001·F_c"
+// balanced is the domain of a resistance: the forces balance to a thousandth, or to 50 N where next to no steel is
+// anchored.
+const balanced = "abs(ΔF) ≤ max(0.001·F_c; 0.05·[kN])"
 
 // TendonLever and BarLever are lever arms about the line of F_c.
 var (

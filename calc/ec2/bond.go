@@ -114,8 +114,7 @@ var AnchorageBond = clause.Define(&clause.Formula{
 // AnchorageLength is l_bpd.
 var AnchorageLength = clause.Define(&clause.Formula{
 	ID: "anchorage-length", Name: "Anchorage length at ultimate", Ref: en("8.10.2.3(4)", "8.21"),
-	Text: "l_{bpd,i} = l_{pt2,i} + α_{2,i}·φ_{p,i}·(σ_{pd,i} − σ_{pm∞,i})/f_{bpd,i}", Unit: "mm",
-	Domain: "σ_{pm∞,i} ≤ σ_{pd,i}",
+	Text: "l_{bpd,i} = l_{pt2,i} + α_{2,i}·φ_{p,i}·max(0; σ_{pd,i} − σ_{pm∞,i})/f_{bpd,i}", Unit: "mm",
 	Examples: hand("1605.4 mm", "l_{pt2,i} = 1249.3 mm", "α_{2,i} = 0.19", "φ_{p,i} = 15.2 mm", "σ_{pd,i} = 1426.1 MPa", "σ_{pm∞,i} = 1145 MPa",
 		"f_{bpd,i} = 2.28 MPa"),
 })
@@ -144,7 +143,7 @@ var InitialPresentStress = clause.Define(&clause.Formula{
 // AvailableStress is σ_av.
 var AvailableStress = clause.Define(&clause.Formula{
 	ID: "available-stress", Name: "Stress that can be anchored at ultimate", Ref: en("8.10.2.3(5) Figure 8.17", ""),
-	Text: "σ_{av,i} = cases(s_i ≤ l_{pt2,i}: σ_{pt,i}; s_i < l_{bpd,i}: σ_{pm∞,i} + (σ_{pd,i} − σ_{pm∞,i})·(s_i − l_{pt2,i})/(l_{bpd,i} − l_{pt2,i}); otherwise: σ_{pd,i})",
+	Text: "σ_{av,i} = cases(s_i ≤ l_{pt2,i}: min(σ_{pt,i}; σ_{pd,i}); s_i < l_{bpd,i}: σ_{pm∞,i} + (σ_{pd,i} − σ_{pm∞,i})·(s_i − l_{pt2,i})/(l_{bpd,i} − l_{pt2,i}); otherwise: σ_{pd,i})",
 	Unit: "MPa",
 	Examples: append(hand("1285.6 MPa", "s_i = 1427.35 mm", "l_{pt2,i} = 1249.3 mm", "σ_{pt,i} = 1145 MPa", "l_{bpd,i} = 1605.4 mm",
 		"σ_{pm∞,i} = 1145 MPa", "σ_{pd,i} = 1426.1 MPa"),

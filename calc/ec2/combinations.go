@@ -8,7 +8,7 @@ import "soffit/calc/clause"
 
 // CombinationFactor is ψ of a load in an ultimate or characteristic combination.
 var CombinationFactor = clause.Define(&clause.Formula{
-	ID: "combination-factor", Name: "Combination factor of each load: 1 where its action leads, ψ₀ where it does not", Ref: en1990("6.4.3.2", "6.10"),
+	ID: "combination-factor", Name: "Combination factor of each load: 1 where its action leads, ψ₀ where it does not", Ref: en1990("6.4.3.2(3)", ""),
 	Text: "ψ_{i,n} = cases(l_{i,n} = 1: 1; otherwise: ψ_{0,i})", Unit: "", Digits: 3,
 	Examples: []clause.Example{by("EN 1990 Table A1.1, category A", clause.Recalled, "0.7", "l_{i,n} = 0", "ψ_{0,i} = 0.7")},
 })
@@ -51,14 +51,14 @@ var UpperFactorReduced = clause.Define(&clause.Formula{
 
 // LowerFactor is the factor of a load where it is favourable.
 var LowerFactor = clause.Define(&clause.Formula{
-	ID: "lower-factor", Name: "Factor where the load is favourable", Ref: en1990("6.4.3.2, Table A1.2(B)", "6.10"),
+	ID: "lower-factor", Name: "Factor where the load is favourable", Ref: en1990("6.4.3.2(3), Table A1.2(B)", ""),
 	Text: "γ_{f,i} = cases(k_{G,i} = 1: γ_{G,inf}; otherwise: 0)", Unit: "",
 	Examples: hand("0", "k_{G,i} = 0", "γ_{G,inf} = 1"),
 })
 
 func ultimate(id, name, symbol, op, effect string) *clause.Formula {
 	return clause.Define(&clause.Formula{
-		ID: id, Name: name, Ref: en1990("6.4.3.2", "6.10"),
+		ID: id, Name: name, Ref: en1990("6.4.3.2(3)", ""),
 		Text: symbol + " = Σ_i(" + op + "(γ_{u,i,n}·" + effect + "; γ_{f,i}·" + effect + "))",
 		Unit: unitOf(effect), Digits: 6, Examples: factorExample(op, effect),
 	})

@@ -125,13 +125,6 @@ var DesignStrength = clause.Define(&clause.Formula{
 	Examples: hand("33.333 MPa", "α_cc = 1.0", "f_ck = 50 MPa", "γ_C = 1.5"),
 })
 
-// DesignTensileStrength is f_ctd.
-var DesignTensileStrength = clause.Define(&clause.Formula{
-	ID: "design-tensile-strength", Name: "Design tensile strength of the concrete", Ref: en("3.1.6(2)P", "3.16"),
-	Text: "f_ctd = α_ct·f_{ctk,0.05}/γ_C", Unit: "MPa",
-	Examples: hand("1.9 MPa", "α_ct = 1.0", "f_{ctk,0.05} = 2.85 MPa", "γ_C = 1.5"),
-})
-
 // MeanStrengthAtRelease is f_cm(t) from the strength asked for at release.
 var MeanStrengthAtRelease = clause.Define(&clause.Formula{
 	ID: "mean-strength-at-release", Name: "Mean compressive strength at release", Ref: en("3.1.2(5)", ""),

@@ -30,12 +30,6 @@ var LeverArm = clause.Define(&clause.Formula{
 	Examples: hand("951.82 mm", "d = 1025 mm", "d_c = 73.18 mm"),
 })
 
-// LeverArmOfDepth bounds z where no tension steel is bonded.
-var LeverArmOfDepth = clause.Define(&clause.Formula{
-	ID: "lever-arm-of-depth", Name: "Lever arm, no tension steel being bonded here: not more than the depth", Ref: en("6.2.3(7)", ""), Text: "z = h", Unit: "mm",
-	Examples: hand("1100 mm", "h = 1100 mm"),
-})
-
 // AddedMoment is the moment equivalent of the tension that shear adds, ΔF_td·z.
 var AddedMoment = clause.Define(&clause.Formula{
 	ID: "added-moment", Name: "Moment equal to the tension that shear adds, vertical links", Ref: en("6.2.3(7)", "6.18"),

@@ -38,6 +38,12 @@ var TensionSteelThere = &clause.Condition{
 	Yes: "steel below the centroid is bonded here", No: "no steel below the centroid is bonded here",
 }
 
+// DepthWithoutTensionSteel is d where no steel is bonded in the tension zone: the whole depth, which asks the most.
+var DepthWithoutTensionSteel = clause.Define(&clause.Formula{
+	ID: "depth-without-tension-steel", Name: "Effective depth, no steel being bonded in the tension zone: the whole depth", Ref: en(compatible, ""), Text: "d = h", Unit: "mm",
+	Examples: hand("1100 mm", "h = 1100 mm"),
+})
+
 // AxisRatio is x/d.
 var AxisRatio = clause.Define(&clause.Formula{
 	ID: "axis-ratio", Name: "Relative depth of the neutral axis", Ref: en(compatible, ""), Text: "ξ_x = x/d", Unit: "",

@@ -34,12 +34,13 @@ var MinimumSteel = clause.Define(&clause.Formula{
 	},
 })
 
-// MinimumSteelOfDepth is A_s,min where no steel is bonded in the tension zone, d taken as h: nothing covers it.
-var MinimumSteelOfDepth = clause.Define(&clause.Formula{
-	ID: "minimum-steel-of-depth", Name: "Minimum area of longitudinal steel in tension, no steel being bonded there: depth in place of effective depth", Ref: en("9.2.1.1(1)", "9.1N"),
-	Text: "A_{s,min} = max(0.26·f_ctm/f_yk·b_t·h; 0.0013·b_t·h)", Unit: "mm²",
-	Examples: hand("150.8 mm²", "f_ctm = 2.9 MPa", "f_yk = 500 MPa", "b_t = 100 mm", "h = 1000 mm"),
-})
+// MinimumSteelPositive refuses an expression of the member file that gives less than nothing.
+var MinimumSteelPositive = &clause.Condition{ID: "minimum-steel-positive", Name: "Minimum steel", Ref: en("9.2.1.1(1)", ""), Text: "A_{s,min} ≥ 0·[mm²]",
+	Yes: "not negative", No: "the expression for the minimum steel gives a negative area"}
+
+// MaximumSteelPositive does the same for the maximum.
+var MaximumSteelPositive = &clause.Condition{ID: "maximum-steel-positive", Name: "Maximum steel", Ref: en("9.2.1.1(3)", ""), Text: "A_{s,max} ≥ 0·[mm²]",
+	Yes: "not negative", No: "the expression for the maximum steel gives a negative area"}
 
 // The steel counted towards the minimum: rows bonded at the station.
 var TensionSteelWithBars, TensionSteel = steelSums(

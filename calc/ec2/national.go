@@ -16,7 +16,6 @@ type Parameter struct {
 	Symbols  map[string]quantity.Dim // what a replacing expression may use
 	Rows     []string                // of a table
 	Table    [][]string              // recommended numbers, row by row
-	Note     string                  // what the value does in the note
 }
 
 func number(id, symbol, ascii, name, value string, lo, hi float64, ref clause.Ref) Parameter {
@@ -47,10 +46,10 @@ var Parameters = []Parameter{
 	{Given: clause.Given{ID: "combination-factors", Symbol: "ψ", Name: "Combination factors ψ₀, ψ₁, ψ₂ by category", Ref: en1990("Table A1.1", "")},
 		ASCII: "psi", Rows: Categories, Table: combinationFactors},
 	{Given: clause.Given{ID: MinimumSteel.ID, Symbol: "A_{s,min}", Name: MinimumSteel.Name, Unit: MinimumSteel.Unit, Ref: MinimumSteel.Ref},
-		ASCII: "A_s,min", Formula: MinimumSteel, Symbols: map[string]quantity.Dim{"f_ctm": quantity.Stress, "f_yk": quantity.Stress,
+		ASCII: "A_s,min", Min: 1, Max: 1e6, Formula: MinimumSteel, Symbols: map[string]quantity.Dim{"f_ctm": quantity.Stress, "f_yk": quantity.Stress,
 			"f_ck": quantity.Stress, "b_t": quantity.Length, "d": quantity.Length}},
 	{Given: clause.Given{ID: MaximumSteel.ID, Symbol: "A_{s,max}", Name: MaximumSteel.Name, Unit: MaximumSteel.Unit, Ref: MaximumSteel.Ref},
-		ASCII: "A_s,max", Formula: MaximumSteel, Symbols: map[string]quantity.Dim{"A_c": quantity.Area}},
+		ASCII: "A_s,max", Min: 1, Max: 1e7, Formula: MaximumSteel, Symbols: map[string]quantity.Dim{"A_c": quantity.Area}},
 }
 
 // Categories are the categories of variable actions, EN 1990 Table A1.1.

@@ -137,7 +137,7 @@ type Strands struct {
 type Product struct {
 	Pos             diag.Pos
 	Name            Word  `key:"name" eg:"Y1860S7-15.7" text:"name" what:"name, as the rows use it"`
-	Kind            Word  `key:"kind" words:"strand|wire|bar" what:"kind of tendon"`
+	Kind            Word  `key:"kind" words:"strand|indented wire" what:"kind of tendon: 8.10.2.2 has bond values for these alone"`
 	Area            Value `key:"area" eg:"150 mm²" from:"1 mm²" to:"20000 mm²" what:"nominal area of one tendon"`
 	Diameter        Value `key:"diameter" eg:"15.7 mm" from:"1 mm" to:"160 mm" what:"nominal diameter"`
 	Mass            Value `key:"mass?" eg:"1.172 kg/m" from:"0.005 kg/m" to:"200 kg/m" what:"mass per length, to be held against the area"`

@@ -2,6 +2,7 @@ package trace
 
 import (
 	"fmt"
+	"slices"
 	"strconv"
 
 	"soffit/calc/clause"
@@ -20,6 +21,11 @@ func (n *Note) Err() error { return n.err }
 // Axis declares a named run of rows. Index is empty for an implicit axis, or the letter i, j or n.
 func (n *Note) Axis(name, title, index string, rows []string) *Axis {
 	a := &Axis{Name: name, Title: title, Index: index, Rows: rows}
+	for i, r := range rows {
+		if a.Row(r) != i && n.err == nil {
+			n.err = fmt.Errorf("two rows of %s are named %q", title, r)
+		}
+	}
 	n.Axes = append(n.Axes, a)
 	return a
 }
@@ -118,8 +124,26 @@ func (b *Block) record(e Entry) {
 	b.build.note.entries[key] = e
 	b.Entries = append(b.Entries, e)
 	if l := LineOf(e); l != nil {
+		for _, other := range b.build.symbols[l.Symbol.Name] {
+			if l.meets(&other.Series) {
+				b.fail("%s is given twice on one row, by %s and %s", l.Symbol.Name, other.Key, l.Key)
+			}
+		}
 		b.build.symbols[l.Symbol.Name] = append(b.build.symbols[l.Symbol.Name], l)
 	}
+}
+
+// meets says whether two series have a value on the same row.
+func (s *Series) meets(t *Series) bool {
+	if !slices.Equal(s.Axes, t.Axes) {
+		return true
+	}
+	for i := range s.Shown {
+		if s.Taken(i) && t.Taken(i) {
+			return true
+		}
+	}
+	return false
 }
 
 // bind finds who supplies each symbol: this block, or exactly one of the blocks it takes.

@@ -79,6 +79,18 @@ func (b *Block) Decide(c *clause.Condition) {
 	}
 }
 
+// Require records a condition that must hold on every row, or the note ends in an error.
+func (b *Block) Require(c *clause.Condition) {
+	b.Decide(c)
+	if b.stopped() {
+		return
+	}
+	e := b.build.note.entries[b.build.path+"/"+c.ID].(*Choice)
+	if i := slices.Index(e.Outcomes, No); i >= 0 {
+		b.fail("%s: %s%s", c.Name, c.No, at(e.Axes, i))
+	}
+}
+
 func (b *Block) decide(c *clause.Condition) (*Choice, error) {
 	cond, err := c.Parsed()
 	if err != nil {

@@ -10,11 +10,14 @@ import (
 )
 
 // Closure recomputes every step, choice and check from its own formula and the printed operands alone, and
-// compares what comes out with what is printed. It needs nothing but the record, as read back from its JSON:
+// compares what comes out with what is printed; the fingerprint that a file states is held against the record too. It needs nothing but the record, as read back from its JSON:
 // no unrounded value takes part. It returns how many values it proved and every difference.
 func Closure(n *Note) (proved int, differences []error) {
 	say := func(key string, err error) {
 		differences = append(differences, fmt.Errorf("%s: %w", key, err))
+	}
+	if n.stated != "" && n.stated != n.Fingerprint() {
+		say("the record", fmt.Errorf("its fingerprint is %s, it states %s", n.Fingerprint(), n.stated))
 	}
 	n.Each(func(_ *Chapter, b *Block, e Entry) {
 		var count int
@@ -54,6 +57,9 @@ func (n *Note) operands(b *Block, symbols []*formula.Symbol, uses []Use) (*frame
 			if l == nil {
 				return nil, fmt.Errorf("no value under key %s", key)
 			}
+			if l.Symbol.Name != s.Name {
+				return nil, fmt.Errorf("%s is taken from %s, which gives %s", s.Name, key, l.Symbol.Name)
+			}
 			at := -1
 			if picked {
 				for _, a := range l.Axes {
@@ -92,6 +98,9 @@ func (n *Note) proveStep(b *Block, e *Step) (int, error) {
 	tree, err := formula.Parse(e.Formula.String())
 	if err != nil {
 		return 0, err
+	}
+	if tree.Symbol.Name != e.Symbol.Name {
+		return 0, fmt.Errorf("the formula gives %s, the entry %s", tree.Symbol.Name, e.Symbol.Name)
 	}
 	prog := formula.Compile(tree.Expr)
 	fr, err := n.operands(b, prog.Symbols, e.Uses)
@@ -194,6 +203,9 @@ func (n *Note) proveRoot(e *Root) (int, error) {
 		return 0, fmt.Errorf("no residual or no scale")
 	}
 	count := 0
+	if len(scale.Values) != len(e.Shown) || len(residual.Values) != len(e.Shown) {
+		return count, fmt.Errorf("residual and scale run over other rows")
+	}
 	for i := range e.Shown {
 		if !e.Taken(i) || !residual.Taken(i) {
 			continue

@@ -141,9 +141,6 @@ func (f *frame) dim(symbols []*formula.Symbol) func(*formula.Symbol) (quantity.D
 func (f *frame) values(symbols []*formula.Symbol) string {
 	var b strings.Builder
 	for i, s := range symbols {
-		if len(s.Index) > 0 {
-			continue
-		}
 		sup := f.slots[i][0]
 		if b.Len() > 0 {
 			b.WriteString(", ")

@@ -20,22 +20,24 @@ type Note struct {
 	Chapters []*Chapter
 
 	entries map[string]Entry
+	stated  string // fingerprint in the file it was read from
 	err     error
 }
 
 // Document is what the title sheet says: none of it decides a number.
 type Document struct {
-	Program   string    `json:"program"`
-	Project   string    `json:"project"`
-	Title     string    `json:"title"`
-	Number    string    `json:"number"`
-	Revision  string    `json:"revision"`
-	Status    string    `json:"status"`
-	Roles     []Role    `json:"roles,omitempty"`
-	History   []Issue   `json:"history,omitempty"`
-	Drawings  []Drawing `json:"drawings,omitempty"`
-	InputName string    `json:"inputName"`
-	Input     string    `json:"input"`
+	Program    string    `json:"program"`
+	Project    string    `json:"project"`
+	Title      string    `json:"title"`
+	Number     string    `json:"number"`
+	Revision   string    `json:"revision"`
+	Status     string    `json:"status"`
+	Originator string    `json:"originator,omitempty"`
+	Roles      []Role    `json:"roles,omitempty"`
+	History    []Issue   `json:"history,omitempty"`
+	Drawings   []Drawing `json:"drawings,omitempty"`
+	InputName  string    `json:"inputName"`
+	Input      string    `json:"input"`
 }
 
 // Role is one person's part in the document; Date is ISO 8601 or empty.

@@ -1,8 +1,8 @@
 package trace
 
 import (
+	"errors"
 	"fmt"
-	"strings"
 
 	"soffit/calc/formula"
 	"soffit/calc/quantity"
@@ -16,9 +16,12 @@ type reader struct {
 
 func (in *noteJSON) note() (*Note, error) {
 	n := New(in.Document)
-	n.Axes = in.Axes
+	n.Axes, n.stated = in.Axes, in.Fingerprint
 	r := &reader{axes: map[string]*Axis{}}
 	for _, a := range in.Axes {
+		if a == nil || len(a.Rows) == 0 {
+			return nil, errors.New("an axis without rows")
+		}
 		if a.Work < 0 || a.Work >= len(a.Rows) {
 			return nil, fmt.Errorf("axis %q has no row %d", a.Name, a.Work)
 		}
@@ -33,7 +36,9 @@ func (in *noteJSON) note() (*Note, error) {
 			if bj.Over != "" {
 				b.Over = r.axis(bj.Over)
 				if r.err == nil {
-					b.Row = max(b.Over.Row(bj.Row), 0)
+					if b.Row = b.Over.Row(bj.Row); b.Row < 0 {
+						return nil, fmt.Errorf("block %s has no row %q", bj.Number, bj.Row)
+					}
 				}
 			}
 			c.Blocks = append(c.Blocks, b)
@@ -188,16 +193,24 @@ func (r *reader) check(j *entryJSON) Entry {
 	}
 	e.Demand, e.Limit = j.Uses[0], j.Uses[1]
 	e.Fails, e.Value = make([]bool, n), make([]float64, n)
+	e.Worst = -1
 	for i, v := range j.Verdict {
+		if v != "fails" && v != "passes" && v != "" {
+			r.fail(fmt.Errorf("unknown verdict %q", v))
+		}
 		e.Fails[i] = v == "fails"
 		if e.Ratio[i] != "" {
 			f, err := quantity.Value(e.Ratio[i])
 			r.fail(err)
 			e.Value[i] = f
 		}
-		if strings.Compare(RowName(e.Axes, i), j.Worst) == 0 {
+		if RowName(e.Axes, i) == j.Worst {
 			e.Worst = i
 		}
+	}
+	if e.Worst < 0 {
+		r.fail(fmt.Errorf("no row %q is the worst", j.Worst))
+		e.Worst = 0
 	}
 	if j.Effect != nil {
 		e.Effect = float64(*j.Effect)

@@ -15,6 +15,9 @@ func (b *Block) Step(f *clause.Formula) {
 		return
 	}
 	if err := b.step(f); err != nil {
+		if f.Origin != "" {
+			err = fmt.Errorf("%s: %w", f.Origin, err)
+		}
 		b.fail("%s: %w", f.ID, err)
 	}
 }

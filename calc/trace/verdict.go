@@ -3,6 +3,7 @@ package trace
 import (
 	"errors"
 	"math"
+	"slices"
 
 	"soffit/calc/clause"
 	"soffit/calc/formula"
@@ -47,6 +48,7 @@ func (b *Block) Check(c *clause.Check) {
 	uses := fr.uses(symbols)
 	e := &Check{Head: b.head(c.ID, c.Name, c.Ref), Axes: axes, Demand: uses[0], Limit: uses[1], Ratio: make([]string, n),
 		Margin: make([]string, n), Fails: make([]bool, n), Value: make([]float64, n), Unit: limit.Unit, Worst: -1}
+	var worst rank
 	err = b.each(fr, axes, func(i int) error {
 		fr.shadow = false
 		d, l := fr.Value(0), fr.Value(1)
@@ -60,8 +62,9 @@ func (b *Block) Check(c *clause.Check) {
 		if l > 0 && ls > 0 {
 			e.Effect = math.Max(e.Effect, math.Abs(d/l-ds/ls))
 		}
-		if e.Worst < 0 || e.worse(i, e.Worst) {
-			e.Worst = i
+		r := rankOf(e.Fails[i], d, l)
+		if e.Worst < 0 || r.above(worst) {
+			e.Worst, worst = i, r
 		}
 		return nil
 	})
@@ -94,10 +97,52 @@ func (c *Check) judge(i int, d, l float64, decimals int) {
 	c.Margin[i] = quantity.Format(c.Unit.From(l-d), decimals)
 }
 
-// worse orders rows: failing before passing, then by ratio, then the one without room left.
-func (c *Check) worse(i, j int) bool {
-	if c.Fails[i] != c.Fails[j] {
-		return c.Fails[i]
+// rank orders rows and checks by how bad they are: failing against a limit that is not positive, by what is missing;
+// failing, by ratio; passing, by ratio; passing a limit that is not positive, by what is left.
+type rank struct {
+	class int
+	size  float64
+}
+
+func rankOf(fails bool, demand, limit float64) rank {
+	switch {
+	case fails && limit <= 0:
+		return rank{3, demand - limit}
+	case fails:
+		return rank{2, demand / limit}
+	case limit > 0:
+		return rank{1, demand / limit}
 	}
-	return c.Value[i] > c.Value[j]
+	return rank{0, demand - limit}
+}
+
+func (r rank) above(s rank) bool { return r.class > s.class || r.class == s.class && r.size > s.size }
+
+// rank is that of the governing row.
+func (c *Check) rank() rank {
+	switch {
+	case c.Ratio[c.Worst] == "" && c.Failed():
+		return rank{class: 3}
+	case c.Failed():
+		return rank{2, c.Value[c.Worst]}
+	case c.Ratio[c.Worst] != "":
+		return rank{1, c.Value[c.Worst]}
+	}
+	return rank{}
+}
+
+// Ranked is all checks, the worst first: failing before passing, by ratio; those that have a margin in place of a
+// ratio come first where they fail and last where they pass.
+func (n *Note) Ranked() []*Check {
+	checks := n.Checks()
+	slices.SortStableFunc(checks, func(a, b *Check) int {
+		switch ra, rb := a.rank(), b.rank(); {
+		case ra.above(rb):
+			return -1
+		case rb.above(ra):
+			return 1
+		}
+		return 0
+	})
+	return checks
 }

@@ -41,6 +41,5 @@ func read(file string) (*member.Member, error) {
 	if err := findings.Err(); err != nil {
 		return nil, err
 	}
-	m.File = filepath.Base(file)
 	return m, nil
 }

@@ -37,7 +37,29 @@ type command interface {
 	run(out, problems io.Writer) int
 }
 
-func main() { os.Exit(run(os.Args[1:], os.Stdout, os.Stderr)) }
+func main() {
+	out := &checked{w: os.Stdout}
+	code := run(os.Args[1:], out, os.Stderr)
+	if out.err != nil {
+		say(os.Stderr, "soffit: %v\n", out.err)
+		code = noNote
+	}
+	os.Exit(code)
+}
+
+// checked remembers that something could not be said.
+type checked struct {
+	w   io.Writer
+	err error
+}
+
+func (c *checked) Write(p []byte) (int, error) {
+	n, err := c.w.Write(p)
+	if err != nil {
+		c.err = err
+	}
+	return n, err
+}
 
 func run(args []string, out, problems io.Writer) int {
 	var c commands

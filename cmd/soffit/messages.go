@@ -28,26 +28,22 @@ func unknown(word string, known []string) string {
 
 // summary says in one line what a note came to.
 func summary(n *trace.Note) string {
-	checks := n.Checks()
-	var failing []*trace.Check
-	worst := checks[0]
+	checks := n.Ranked()
+	failing := 0
 	for _, c := range checks {
 		if c.Failed() {
-			failing = append(failing, c)
-		}
-		if c.Value[c.Worst] > worst.Value[worst.Worst] {
-			worst = c
+			failing++
 		}
 	}
-	if len(failing) == 0 {
+	worst := checks[0]
+	if failing == 0 {
 		return fmt.Sprintf("all %d checks pass; highest ratio %s, %s%s", len(checks), worst.Ratio[worst.Worst], worst.Name, place(worst))
 	}
-	first := failing[0]
-	size := "ratio " + first.Ratio[first.Worst]
-	if first.Ratio[first.Worst] == "" {
-		size = "margin " + first.Margin[first.Worst] + " " + first.Unit.String()
+	size := "ratio " + worst.Ratio[worst.Worst]
+	if worst.Ratio[worst.Worst] == "" {
+		size = "margin " + worst.Margin[worst.Worst] + " " + worst.Unit.String()
 	}
-	return fmt.Sprintf("%d of %d checks fail: not for construction; first %s, %s%s", len(failing), len(checks), size, first.Name, place(first))
+	return fmt.Sprintf("%d of %d checks fail: not for construction; worst %s, %s%s", failing, len(checks), size, worst.Name, place(worst))
 }
 
 // place is where a check is worst.

@@ -2,6 +2,7 @@ package diagram
 
 import (
 	"cmp"
+	"fmt"
 	"slices"
 	"strings"
 
@@ -34,6 +35,8 @@ func tendonStress(d *data, width draw.Pt) *tape {
 		}
 		kinds = append(kinds, e)
 	}
+	left := kinds[min(len(kinds), mostKinds):]
+	kinds = kinds[:min(len(kinds), mostKinds)]
 	reach := 0.0
 	for _, e := range kinds {
 		reach = max(reach, e.full(along))
@@ -64,8 +67,14 @@ func tendonStress(d *data, width draw.Pt) *tape {
 	t.Rect(x, y, 16, 5, draw.Style{Fill: envelope})
 	t.Line(x, y, x+16, y, medium, dashed...)
 	label{}.symbol(e.present.line().Symbol).say(draw.Serif, " present, grey below it").draw(t, x+20, y+middle)
+	if len(left) > 0 {
+		label{}.say(draw.Serif, fmt.Sprintf("%d more rows differ from these and are not drawn; the record holds them", len(left))).draw(t, yRoom, y+12+middle)
+	}
 	return t
 }
+
+// mostKinds is how many graphs a figure has.
+const mostKinds = 9
 
 // endStress is the stress in rows that are alike.
 type endStress struct {

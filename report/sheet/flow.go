@@ -1,6 +1,7 @@
 package sheet
 
 import (
+	"cmp"
 	"fmt"
 
 	"soffit/report/draw"
@@ -38,6 +39,7 @@ type flow struct {
 	waiting []*element // floats for the next place outside a table with room for them
 	table   *element   // the head of the table that the last element belongs to
 	running string
+	tall    string // owner of a float that no sheet has room for
 }
 
 // fill lays out the elements of the parts on sheets. An element taller than a sheet is an error.
@@ -54,6 +56,9 @@ func fill(elements []*element) ([]*page, error) {
 	f.land()
 	for len(f.waiting) > 0 {
 		f.turn(false)
+	}
+	if f.tall != "" {
+		return nil, fmt.Errorf("%s is taller than a sheet", f.tall)
 	}
 	return f.pages, nil
 }
@@ -72,11 +77,20 @@ func (f *flow) page() *page { return f.pages[len(f.pages)-1] }
 // leastSplit is the room below a heading in which an element is begun that goes on overleaf.
 const leastSplit draw.Pt = 80
 
-// turn begins a sheet, with the floats that wait for it unless a table goes on there.
+// turn begins a sheet, with the floats that wait for it unless a table goes on there. A float that does not even fit an
+// empty sheet is set there, and named as the fault that ends the
+// setting: it would be waited for without end.
 func (f *flow) turn(inTable bool) {
 	f.pages = append(f.pages, &page{running: f.running, y: bodyTop})
-	if !inTable {
-		f.land()
+	if inTable {
+		return
+	}
+	f.land()
+	if p := f.page(); len(p.placed) == 0 && len(f.waiting) > 0 {
+		e := f.waiting[0]
+		f.waiting = f.waiting[1:]
+		f.tall = cmp.Or(f.tall, e.owner)
+		f.place(e)
 	}
 }
 

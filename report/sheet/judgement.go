@@ -1,9 +1,7 @@
 package sheet
 
 import (
-	"cmp"
 	"fmt"
-	"slices"
 	"strings"
 
 	"soffit/calc/quantity"
@@ -12,28 +10,12 @@ import (
 
 // judgement is what the checks of a note come to.
 type judgement struct {
-	checks []*trace.Check // failing first, then by ratio; margins last
+	checks []*trace.Check // the worst first
 	fail   int
 }
 
 func judge(n *trace.Note) judgement {
-	j := judgement{checks: n.Checks()}
-	slices.SortStableFunc(j.checks, func(a, b *trace.Check) int {
-		switch fa, fb := a.Failed(), b.Failed(); {
-		case fa != fb && fa:
-			return -1
-		case fa != fb:
-			return 1
-		}
-		ma, mb := a.Ratio[a.Worst] == "", b.Ratio[b.Worst] == ""
-		switch {
-		case ma != mb && ma:
-			return 1
-		case ma != mb:
-			return -1
-		}
-		return cmp.Compare(printedRatio(b), printedRatio(a))
-	})
+	j := judgement{checks: n.Ranked()}
 	for _, k := range j.checks {
 		if k.Failed() {
 			j.fail++

@@ -22,7 +22,11 @@ func (c *composer) titleSheet() {
 			cv.Owner("full title")
 			head.paint(cv, left, y)
 		}})
-	c.facts([][2]string{{"document", d.Number}, {"revision", d.Revision}, {"status", d.Status}, {"member file", d.InputName}})
+	facts := [][2]string{{"document", d.Number}, {"revision", d.Revision}, {"status", d.Status}, {"member file", d.InputName}}
+	if d.Originator != "" {
+		facts = append([][2]string{{"originator", d.Originator}}, facts...)
+	}
+	c.facts(facts)
 	c.fingerprints()
 	c.verdictWords()
 	c.limits()
