@@ -1,7 +1,5 @@
 package bending
 
-import "math"
-
 // Pivot says which strain is at its limit.
 type Pivot int
 
@@ -13,6 +11,8 @@ const (
 	// PivotCore: the section is wholly compressed and the fibre at the depth (1 − ε_c2/ε_cu2)·h is at ε_c2
 	// (EN 1992-1-1, 6.1(6) and figure 6.1); by Fibres alone.
 	PivotCore
+	// PivotFlange: the mean strain of the compression flange is at its limit (EN 1992-1-1, 6.1(5)).
+	PivotFlange
 )
 
 func (p Pivot) String() string {
@@ -23,6 +23,8 @@ func (p Pivot) String() string {
 		return "steel"
 	case PivotCore:
 		return "core"
+	case PivotFlange:
+		return "flange"
 	}
 	return "none"
 }
@@ -38,11 +40,13 @@ type Axis struct {
 	Concrete      float64 // N, force of the concrete, compression positive
 	ConcreteDepth float64 // mm, depth of that force below the top fibre
 	Steel         float64 // N, sum of the layers, tension positive
-	// Moment is M_Rd, N·mm, about the top fibre, sagging positive. It is not positive where the steel pulls
-	// at or above the force of the concrete: then the section does not resist sagging.
+	Axial         float64 // N, the axial force, compression positive
+	// Moment is M_Rd, N·mm, sagging positive: that of concrete and steel about the depth of the axial force,
+	// about any depth if there is none. It is not positive where the steel pulls at or above the force of the
+	// concrete: then the section does not resist sagging.
 	Moment float64
 
-	Residual float64 // N, Concrete − Steel
+	Residual float64 // N, Concrete − Steel − Axial
 	Lo, Hi   float64 // mm, the bracket in which X was found
 	Evals    int     // evaluations of the balance in the search
 }
@@ -51,40 +55,40 @@ type Axis struct {
 // (0, h/λ], where the block covers the whole section; x > h says that the section is wholly compressed.
 // The curvature is the smaller of ε_cu/x and what Curvature gives for the layers.
 //
-// Where steel governs, the block stands although the top fibre is below ε_cu: TopStrain tells. Where more
-// than one state balances, which takes a strain limit reached in a layer that is not the lowest, the state of
-// smallest curvature is returned, for it is reached first; such states are told apart in 16 steps over the
-// depth in which that limit can govern, and at the peaks between them.
+// Where steel, or a flange, governs, the block stands although the top fibre is below ε_cu: TopStrain tells.
+// Where more than one state balances, which takes a strain limit reached in a layer that is not the lowest or
+// in a flange, the state of smallest curvature is returned, for it is reached first; such states are told apart
+// in 16 steps over the depth in which that limit can govern, and at the peaks between them.
 //
-// Residual is below 1e-6 of the concrete's force. Domain: λ in (0, 1], η·f_cd > 0, ε_cu > 0. Errors are
-// *Refusal with every Reason. Nothing is allocated unless it fails.
+// Residual is below 1e-6 of the force of the concrete, or of the axial one if that is greater. Domain: λ in
+// (0, 1], η·f_cd > 0, ε_cu > 0. Errors are *Refusal with every Reason. Nothing is allocated unless it fails.
 func (s *Section) NeutralAxis(law BlockLaw, layers []Layer) (Axis, error) {
-	switch {
-	case !(law.Lambda > 0 && law.Lambda <= 1):
-		return Axis{}, &Refusal{BadConcrete, -1, law.Lambda, 1}
-	case !(law.EtaFcd > 0) || math.IsInf(law.EtaFcd, 0):
-		return Axis{}, &Refusal{BadConcrete, -1, law.EtaFcd, math.Inf(1)}
-	case !(law.EpsCu > 0) || math.IsInf(law.EpsCu, 0):
-		return Axis{}, &Refusal{BadConcrete, -1, law.EpsCu, math.Inf(1)}
+	return s.NeutralAxisUnder(Conditions{}, law, layers)
+}
+
+// NeutralAxisUnder is NeutralAxis under conditions.
+func (s *Section) NeutralAxisUnder(c Conditions, law BlockLaw, layers []Layer) (Axis, error) {
+	if err := law.check(); err != nil {
+		return Axis{}, err
 	}
-	p := problem{section: s, layers: layers, block: law, epsCu: law.EpsCu}
+	p := problem{section: s, layers: layers, block: law, epsCu: law.EpsCu, Conditions: c}
 	return p.solve(s.height / law.Lambda)
 }
 
 // Fibres finds the neutral axis and M_Rd a second way, with the parabola–rectangle law of the concrete,
 // integrated over the section. x is sought in (0, 10·h]; where x > h the strain turns about the core
 // (PivotCore) instead of the top fibre. All else as NeutralAxis. Domain: n ≥ 1, 0 < ε_c2 ≤ ε_cu2, f_cd > 0.
+//
+// With N = 1, ε_c3 for ε_c2 and ε_cu3 for ε_cu2 the law is the bilinear one of 3.1.7(2).
 func (s *Section) Fibres(law Parabola, layers []Layer) (Axis, error) {
-	switch {
-	case !(law.N >= 1) || math.IsInf(law.N, 0):
-		return Axis{}, &Refusal{BadConcrete, -1, law.N, math.Inf(1)}
-	case !(law.EpsCu2 > 0) || math.IsInf(law.EpsCu2, 0):
-		return Axis{}, &Refusal{BadConcrete, -1, law.EpsCu2, math.Inf(1)}
-	case !(law.EpsC2 > 0 && law.EpsC2 <= law.EpsCu2):
-		return Axis{}, &Refusal{BadConcrete, -1, law.EpsC2, law.EpsCu2}
-	case !(law.Fcd > 0) || math.IsInf(law.Fcd, 0):
-		return Axis{}, &Refusal{BadConcrete, -1, law.Fcd, math.Inf(1)}
+	return s.FibresUnder(Conditions{}, law, layers)
+}
+
+// FibresUnder is Fibres under conditions.
+func (s *Section) FibresUnder(c Conditions, law Parabola, layers []Layer) (Axis, error) {
+	if err := law.check(); err != nil {
+		return Axis{}, err
 	}
-	p := problem{section: s, layers: layers, curved: true, parabola: law, epsCu: law.EpsCu2}
+	p := problem{section: s, layers: layers, curved: true, parabola: law, epsCu: law.EpsCu2, Conditions: c}
 	return p.solve(deepest * s.height)
 }

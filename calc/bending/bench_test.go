@@ -72,8 +72,20 @@ func TestSolversDoNotAllocate(t *testing.T) {
 			if _, err := s.Fibres(parabola20, layers); err != nil {
 				t.Fatal(err)
 			}
+			if _, err := s.GradedAxis(Graded{block20, parabola20}, layers); err != nil {
+				t.Fatal(err)
+			}
 		}); n != 0 {
 			t.Errorf("rising %v: %v allocations", rising, n)
 		}
+	}
+	ring := NewSection(set(t, section.RoundBeam{Diameter: 600, Bore: 400}).Shape)
+	c := Conditions{Axial: ring.AtCentroid(500e3)}
+	if n := testing.AllocsPerRun(50, func() {
+		if _, err := ring.FibresUnder(c, parabola20, nil); err != nil {
+			t.Fatal(err)
+		}
+	}); n != 0 {
+		t.Errorf("ring: %v allocations", n)
 	}
 }

@@ -240,3 +240,17 @@ func TestSectionFromTheTop(t *testing.T) {
 		t.Error("taper above a wider foot not seen where it is")
 	}
 }
+
+// The bilinear law of 3.1.7(2), ε_c3 = 1.75 ‰ and ε_cu3 = 3.5 ‰: full stress over half of x, then falling in a
+// straight line; the mean is 3/4, the resultant at 7/18 of x.
+func TestBilinearLaw(t *testing.T) {
+	const b, h, d = 300.0, 600.0, 550.0
+	s := rectangle(t, b, h)
+	law := Parabola{N: 1, EpsC2: 1.75e-3, EpsCu2: 3.5e-3, Fcd: 20}
+	for _, area := range []float64{100, 800, 2000} {
+		a := ok[Axis](t)(s.Fibres(law, []Layer{{Area: area, Depth: d, Cap: inf, Law: horizontal(t, 200e3, fyd)}}))
+		x := area * fyd / (0.75 * 20 * b)
+		within(t, "x", a.X, x, 1e-12)
+		within(t, "M", a.Moment, area*fyd*(d-7.0/18*x), 1e-12)
+	}
+}

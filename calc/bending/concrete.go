@@ -15,6 +15,34 @@ type BlockLaw struct{ Lambda, EtaFcd, EpsCu float64 }
 // Fcd·(1 − (1 − ε/EpsC2)^N), Fcd (MPa) from EpsC2 on, up to EpsCu2 (ε_c2, ε_cu2).
 type Parabola struct{ N, EpsC2, EpsCu2, Fcd float64 }
 
+// check refuses a block that is none.
+func (l BlockLaw) check() error {
+	switch {
+	case !(l.Lambda > 0 && l.Lambda <= 1):
+		return &Refusal{BadConcrete, -1, l.Lambda, 1}
+	case !(l.EtaFcd > 0) || math.IsInf(l.EtaFcd, 0):
+		return &Refusal{BadConcrete, -1, l.EtaFcd, math.Inf(1)}
+	case !(l.EpsCu > 0) || math.IsInf(l.EpsCu, 0):
+		return &Refusal{BadConcrete, -1, l.EpsCu, math.Inf(1)}
+	}
+	return nil
+}
+
+// check refuses a parabola that is none.
+func (p Parabola) check() error {
+	switch {
+	case !(p.N >= 1) || math.IsInf(p.N, 0):
+		return &Refusal{BadConcrete, -1, p.N, math.Inf(1)}
+	case !(p.EpsCu2 > 0) || math.IsInf(p.EpsCu2, 0):
+		return &Refusal{BadConcrete, -1, p.EpsCu2, math.Inf(1)}
+	case !(p.EpsC2 > 0 && p.EpsC2 <= p.EpsCu2):
+		return &Refusal{BadConcrete, -1, p.EpsC2, p.EpsCu2}
+	case !(p.Fcd > 0) || math.IsInf(p.Fcd, 0):
+		return &Refusal{BadConcrete, -1, p.Fcd, math.Inf(1)}
+	}
+	return nil
+}
+
 // Stress is the stress in MPa at a strain, compression positive in both; 0 at strains below 0.
 func (p Parabola) Stress(strain float64) float64 {
 	w := strain / p.EpsC2
@@ -44,7 +72,8 @@ func (s *Section) Block(law BlockLaw, x float64) (force, moment float64) {
 
 // Compression gives the force, N, and its moment about the top fibre, N·mm, of concrete by the
 // parabola–rectangle law, with the neutral axis at depth x, mm, and the curvature κ, 1/mm, both above 0: the
-// strain at depth z is κ·(x − z). The integrals are exact but for rounding, slab by slab.
+// strain at depth z is κ·(x − z). The integrals are exact but for rounding, slab by slab; those of round parts
+// where the stress varies are by quadrature, to 1e-10 of each part for n up to 2.
 func (s *Section) Compression(law Parabola, x, curvature float64) (force, moment float64) {
 	l := law.EpsC2 / curvature // depth over which the strain falls by ε_c2
 	z0 := x - l                // where the strain is ε_c2
@@ -64,6 +93,14 @@ func (s *Section) Compression(law Parabola, x, curvature float64) (force, moment
 		}
 		area += a
 		first += f
+	}
+	for i := range s.rounds {
+		c := &s.rounds[i]
+		if from, to := math.Max(start, c.top), math.Min(end, c.foot); from < to {
+			a, f := c.compressed(law, x, l, from, to)
+			area += a
+			first += f
+		}
 	}
 	return law.Fcd * area, law.Fcd * first
 }

@@ -9,7 +9,7 @@ import (
 // least is the part of the depth at which the search begins: neutral axes above it are taken for none.
 const least = 1e-9
 
-// balanced is the residual allowed, as part of the concrete's force.
+// balanced is the residual allowed, as part of the concrete's force or the axial one, whichever is greater.
 const balanced = 1e-6
 
 // deepest is the depth at which the search by fibres ends, in section depths.
@@ -22,10 +22,12 @@ const scan = 16
 type problem struct {
 	section  *Section
 	layers   []Layer
-	curved   bool // by the parabola, else by the block
+	curved   bool // by the parabola
+	graded   bool // by the block that follows the parabola, else by the block
 	block    BlockLaw
 	parabola Parabola
 	epsCu    float64
+	Conditions
 }
 
 // curvature gives κ at x and what governs it.
@@ -33,6 +35,9 @@ func (p *problem) curvature(x float64) (k float64, pivot Pivot, layer int) {
 	k = p.epsCu / x
 	if h := p.section.height; p.curved && x > h {
 		k, pivot = p.parabola.EpsC2/(x-(1-p.parabola.EpsC2/p.epsCu)*h), PivotCore
+	}
+	if kf := p.Flange.curvature(x); kf < k {
+		k, pivot = kf, PivotFlange
 	}
 	if ks, i := Curvature(x, p.layers); ks < k {
 		return ks, PivotSteel, i
@@ -44,6 +49,9 @@ func (p *problem) curvature(x float64) (k float64, pivot Pivot, layer int) {
 func (p *problem) concrete(x, k float64) (force, moment float64) {
 	if p.curved {
 		return p.section.Compression(p.parabola, x, k)
+	}
+	if p.graded {
+		return p.section.Block(Graded{p.block, p.parabola}.At(k*x), x)
 	}
 	return p.section.Block(p.block, x)
 }
@@ -65,16 +73,19 @@ func (l *Layer) stress(x, k float64) float64 {
 	return math.Max(-l.Cap, math.Min(l.Cap, f))
 }
 
-// balance is the force of the concrete less that of the steel, N.
+// balance is the force of the concrete less that of the steel and the axial one, N.
 func (p *problem) balance(x float64) float64 {
 	k, _, _ := p.curvature(x)
 	c, _ := p.concrete(x, k)
 	t, _ := p.steel(x, k)
-	return c - t
+	return c - t - p.Axial.Force
 }
 
 // solve seeks the neutral axis in (0, hi].
 func (p *problem) solve(hi float64) (Axis, error) {
+	if err := p.Conditions.check(p.section.height); err != nil {
+		return Axis{}, err
+	}
 	for i := range p.layers {
 		if err := p.layers[i].check(i, p.section.height); err != nil {
 			return Axis{}, err
@@ -84,7 +95,7 @@ func (p *problem) solve(hi float64) (Axis, error) {
 	if p.balance(lo) >= 0 {
 		k, _, _ := p.curvature(lo)
 		t, _ := p.steel(lo, k)
-		return Axis{}, &Refusal{NoTension, -1, t, 0}
+		return Axis{}, p.Axial.untied(t)
 	}
 	if reach := math.Min(p.several(), p.section.height); reach > lo {
 		return p.first(lo, reach, hi)
@@ -98,7 +109,7 @@ func (p *problem) solve(hi float64) (Axis, error) {
 // for at 15 places.
 func (p *problem) single(lo, hi float64) (Axis, error) {
 	h := p.section.height
-	if p.curved && p.balance(h) >= 0 {
+	if (p.curved || p.graded) && p.balance(h) >= 0 {
 		return p.within(lo, h)
 	}
 	if p.balance(hi) >= 0 {
@@ -118,7 +129,7 @@ func (p *problem) compressed(hi float64) error {
 	k, _, _ := p.curvature(hi)
 	c, _ := p.concrete(hi, k)
 	t, _ := p.steel(hi, k)
-	return &Refusal{WhollyCompressed, -1, t, c}
+	return &Refusal{WhollyCompressed, -1, t + p.Axial.Force, c}
 }
 
 // within finds the state that balances in a bracket with a change of sign.
@@ -133,9 +144,10 @@ func (p *problem) within(lo, hi float64) (Axis, error) {
 	c, first := p.concrete(x, a.Curvature)
 	t, moment := p.steel(x, a.Curvature)
 	a.Concrete, a.ConcreteDepth = c, first/c
-	a.Steel, a.Moment, a.Residual = t, moment-first, c-t
-	if !(math.Abs(a.Residual) <= balanced*c) {
-		return Axis{}, &Refusal{Unbalanced, -1, a.Residual, balanced * c}
+	a.Steel, a.Axial, a.Residual = t, p.Axial.Force, c-t-p.Axial.Force
+	a.Moment = moment - first + p.Axial.moment()
+	if most := balanced * math.Max(c, math.Abs(a.Axial)); !(math.Abs(a.Residual) <= most) {
+		return Axis{}, &Refusal{Unbalanced, -1, a.Residual, most}
 	}
 	return a, nil
 }

@@ -1,10 +1,6 @@
 package bending
 
-import (
-	"math"
-
-	"soffit/calc/solve"
-)
+import "math"
 
 // Graded is a rectangular block whose factors follow the strain of the top fibre: where it stays below ε_cu, since
 // steel reaches its limit first, λ and η shrink with the depth and the size of the resultant of the
@@ -26,54 +22,45 @@ func (g Graded) At(topStrain float64) BlockLaw {
 // its resultant, as part of that depth, for a top strain of r·ε_c2.
 func (g Graded) resultant(r float64) (mean, depth float64) {
 	n := g.N
+	if r < slight {
+		return g.slightly(r)
+	}
 	q := math.Pow(math.Max(0, 1-r), n+1)
 	mean = 1 - (1-q)/((n+1)*r)
 	depth = 1 - (0.5-(1-q*(1+(n+1)*r))/((n+1)*(n+2)*r*r))/mean
 	return mean, depth
 }
 
-// GradedAxis finds the neutral axis with a graded block. It is sought in (0, h]; all else as NeutralAxis, but for a
-// single state: the first change of sign of the bracketed balance is taken.
+// slight is the part of ε_c2 below which resultant sums its series, where the closed form takes differences of
+// what is nearly alike.
+const slight = 1e-2
+
+// slightly is resultant by the series of 1 − (1 − w)^n: of the stress over the depth, and of its moment about the
+// neutral axis.
+func (g Graded) slightly(r float64) (mean, depth float64) {
+	moment, term := 0.0, -1.0
+	for k := 1.0; k <= 8; k++ {
+		term *= -(g.N - k + 1) / k * r
+		mean += term / (k + 1)
+		moment += term / (k + 2)
+	}
+	return mean, 1 - moment/mean
+}
+
+// GradedAxis finds the neutral axis with a graded block. It is sought in (0, h], and if the concrete does not
+// balance the steel there, down to h/λ; all else as NeutralAxis.
 func (s *Section) GradedAxis(g Graded, layers []Layer) (Axis, error) {
-	for i := range layers {
-		if err := layers[i].check(i, s.height); err != nil {
-			return Axis{}, err
-		}
-	}
-	state := func(x float64) (Axis, float64) {
-		a := Axis{X: x, Layer: -1, Curvature: g.EpsCu / x}
-		if k, layer := Curvature(x, layers); k < a.Curvature {
-			a.Curvature, a.Pivot, a.Layer = k, PivotSteel, layer
-		}
-		a.TopStrain = a.Curvature * x
-		var first float64
-		a.Concrete, first = s.Block(g.At(a.TopStrain), x)
-		a.ConcreteDepth = first / a.Concrete
-		a.Moment = -first
-		for i := range layers {
-			f := layers[i].At(x, a.Curvature)
-			a.Steel += f.Force
-			a.Moment += f.Force * layers[i].Depth
-		}
-		a.Residual = a.Concrete - a.Steel
-		return a, a.Residual
-	}
-	lo, hi := s.height*least, s.height
-	if _, r := state(lo); r >= 0 {
-		a, _ := state(lo)
-		return Axis{}, &Refusal{Reason: NoTension, Layer: -1, Have: a.Steel}
-	}
-	if a, r := state(hi); r < 0 {
-		return Axis{}, &Refusal{Reason: WhollyCompressed, Layer: -1, Have: a.Steel, Limit: a.Concrete}
-	}
-	x, evals, err := solve.Bracket(func(x float64) float64 { _, r := state(x); return r }, lo, hi, 0)
-	if err != nil {
+	return s.GradedAxisUnder(Conditions{}, g, layers)
+}
+
+// GradedAxisUnder is GradedAxis under conditions.
+func (s *Section) GradedAxisUnder(c Conditions, g Graded, layers []Layer) (Axis, error) {
+	if err := g.BlockLaw.check(); err != nil {
 		return Axis{}, err
 	}
-	a, _ := state(x)
-	a.Lo, a.Hi, a.Evals = lo, hi, evals
-	if math.Abs(a.Residual) > balanced*a.Concrete {
-		return Axis{}, &Refusal{Reason: Unbalanced, Layer: -1, Have: a.Residual, Limit: balanced * a.Concrete}
+	if err := g.Parabola.check(); err != nil {
+		return Axis{}, err
 	}
-	return a, nil
+	p := problem{section: s, layers: layers, graded: true, block: g.BlockLaw, parabola: g.Parabola, epsCu: g.EpsCu, Conditions: c}
+	return p.solve(s.height / g.Lambda)
 }

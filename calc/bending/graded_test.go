@@ -12,9 +12,9 @@ import (
 // recalled).
 func TestGradedBlockCoefficients(t *testing.T) {
 	g := Graded{BlockLaw{0.8, 30, 0.0035}, Parabola{2, 0.002, 0.0035, 30}}
-	for _, r := range []float64{0.05, 0.3, 0.5, 1} {
+	for _, r := range []float64{1e-12, 1e-6, 1e-3, 0.00999, 0.01001, 0.05, 0.3, 0.5, 1} {
 		mean, depth := g.resultant(r)
-		if math.Abs(mean-(r-r*r/3)) > 1e-12 || math.Abs(depth-(4-r)/(12-4*r)) > 1e-10 {
+		if math.Abs(mean-(r-r*r/3)) > 1e-12*r+1e-15 || math.Abs(depth-(4-r)/(12-4*r)) > 1e-10 {
 			t.Errorf("r = %g: %g, %g", r, mean, depth)
 		}
 	}

@@ -9,8 +9,8 @@ const (
 	// NoTension: with the neutral axis at the very top no steel pulls, or not measurably: nothing balances
 	// the concrete. Have is the sum of the steel forces there, N, tension positive.
 	NoTension Reason = iota + 1
-	// WhollyCompressed: with the section wholly compressed the concrete still does not balance the steel.
-	// Have is the tension, N, Limit the concrete's force, N.
+	// WhollyCompressed: with the section wholly compressed the concrete still does not balance the steel and
+	// the axial force. Have is the tension with that force, N, Limit the concrete's force, N.
 	WhollyCompressed
 	// LimitSpent: the prestrain of a layer is not below its strain limit. Have is the prestrain, Limit ε_ud.
 	LimitSpent
@@ -22,6 +22,12 @@ const (
 	// Unbalanced: a place was found where the forces change sign, but they do not balance there. Have is the
 	// difference, N, Limit the greatest allowed; Have is NaN if the forces were no numbers somewhere.
 	Unbalanced
+	// NotHeld: with the neutral axis at the very top the steel does not hold the axial tension. Have is the sum
+	// of the steel forces there, N, Limit the tension.
+	NotHeld
+	// BadConditions: the conditions are none: a force or depth that is no number, a flange deeper than the
+	// section or with a strain not above 0. Have is the offending value.
+	BadConditions
 )
 
 func (r Reason) Error() string {
@@ -29,7 +35,7 @@ func (r Reason) Error() string {
 	case NoTension:
 		return "no layer of steel pulls"
 	case WhollyCompressed:
-		return "the wholly compressed section cannot balance the steel"
+		return "the wholly compressed section cannot balance the forces"
 	case LimitSpent:
 		return "the prestrain leaves nothing below the strain limit"
 	case BadLayer:
@@ -38,6 +44,10 @@ func (r Reason) Error() string {
 		return "not a law of concrete"
 	case Unbalanced:
 		return "the forces do not balance"
+	case NotHeld:
+		return "the steel does not hold the axial tension"
+	case BadConditions:
+		return "not an axial force or a flange"
 	}
 	return fmt.Sprintf("reason %d", int(r))
 }

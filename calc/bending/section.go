@@ -9,17 +9,20 @@ package bending
 
 import "soffit/calc/section"
 
-// Section is a shape seen from the top, prepared for bending; NewSection makes one.
+// Section is a shape seen from the top, prepared for bending; NewSection makes one. A hogging moment is a
+// sagging one on the shape upside down: NewSection(shape.Flipped()) with layers after Hogging.
 type Section struct {
-	height float64
-	slabs  []slab
+	height   float64
+	centroid float64 // depth
+	slabs    []slab
+	rounds   []round
 }
 
 // slab is one trapezoid seen from the top.
 type slab struct {
 	top, foot    float64 // depths
 	width, slope float64 // width at its top, gain of width per mm downward
-	area, moment float64 // of all above its top: mm², and about the top fibre, mm³
+	area, moment float64 // of all slabs above its top: mm², and about the top fibre, mm³
 }
 
 // NewSection prepares a shape. It allocates; a section serves any number of solutions, also at once.
@@ -38,45 +41,49 @@ func NewSection(shape section.Shape) *Section {
 		s.height = b.foot
 		s.slabs = append(s.slabs, b)
 	}
+	s.centroid = shape.Height() - shape.Centroid()
+	for _, c := range shape.Flipped().Curves() { // their levels are depths now
+		s.rounds = append(s.rounds, newRound(c))
+	}
 	return s
+}
+
+// Hogging gives the layers as a section of the given height sees them when it is turned upside down.
+func Hogging(layers []Layer, height float64) []Layer {
+	turned := make([]Layer, len(layers))
+	for i, l := range layers {
+		l.Depth = height - l.Depth
+		turned[i] = l
+	}
+	return turned
 }
 
 // Height is the overall depth, mm.
 func (s *Section) Height() float64 { return s.height }
 
-// Above gives the area above the depth z, mm², and its first moment about the top fibre, mm³. z is taken
-// into [0, Height].
+// Above gives the area above the depth z, mm², net of holes and voids, and its first moment about the top
+// fibre, mm³. z is taken into [0, Height].
 func (s *Section) Above(z float64) (area, moment float64) {
 	if !(z > 0) {
 		return 0, 0
 	}
+	last := &s.slabs[len(s.slabs)-1]
+	area, moment = last.upTo(s.height)
 	for i := range s.slabs {
 		if b := &s.slabs[i]; z <= b.foot {
-			return b.upTo(z)
-		}
-	}
-	return s.slabs[len(s.slabs)-1].upTo(s.height)
-}
-
-// Narrows reports whether the section is somewhere narrower than farther down, within the depth z: whether
-// the zone above z narrows toward the compressed fibre, so that η·f_cd is to be cut by 10 %
-// (EN 1992-1-1, 3.1.7(3), note).
-func (s *Section) Narrows(z float64) bool {
-	least := 0.0
-	for i := range s.slabs {
-		b := &s.slabs[i]
-		if b.top >= z {
+			area, moment = b.upTo(z)
 			break
 		}
-		if i > 0 && b.width > least || b.slope > 0 {
-			return true
-		}
-		least = b.width + b.slope*(b.foot-b.top)
 	}
-	return false
+	for i := range s.rounds {
+		a, m := s.rounds[i].above(z)
+		area += a
+		moment += m
+	}
+	return area, moment
 }
 
-// upTo gives area and moment of all above the depth z, which lies within the slab.
+// upTo gives area and moment of all slabs above the depth z, which lies within the slab.
 func (b *slab) upTo(z float64) (area, moment float64) {
 	t := z - b.top
 	return b.area + t*(b.width+b.slope*t/2),

@@ -4,8 +4,13 @@ import "math"
 
 // several gives the depth above which more than one state may balance: there a layer with a strain limit can
 // govern and another lies below it, which stretches the more the deeper the neutral axis. It is 0 if no layer
-// is so. Below that depth, and everywhere if there is none, the balance rises with x.
+// is so. Below that depth, and everywhere if there is none, the balance rises with x; but where the flange's
+// strain governs, bars above its middle and a graded block may let go as the neutral axis goes down, and more
+// than one state may balance at any depth.
 func (p *problem) several() (reach float64) {
+	if p.Flange.lets(p.layers) || p.graded && p.Flange.Depth > 0 {
+		return p.section.height
+	}
 	lowest := 0.0
 	for i := range p.layers {
 		if l := &p.layers[i]; !l.idle() {
@@ -53,6 +58,7 @@ func (p *problem) first(lo, reach, hi float64) (Axis, error) {
 			if peak, n := p.climb(x[i-1], x[i+1]); p.balance(peak) >= 0 {
 				evals += n
 				take(p.within(x[i-1], peak))
+				take(p.within(peak, x[i+1]))
 			}
 		}
 	}

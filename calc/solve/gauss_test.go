@@ -31,3 +31,23 @@ func TestGaussAgainstAnotherQuadrature(t *testing.T) {
 		t.Errorf("turned range: %v, want %v", back, -got)
 	}
 }
+
+func TestSixteenPoints(t *testing.T) {
+	place, weight := make([]float64, 16), make([]float64, 16)
+	quad.Legendre{}.FixedLocations(place, weight, -1, 1)
+	for i, p := range Legendre16 {
+		if math.Abs(p.Place-place[15-i]) > 1e-15 || math.Abs(p.Weight-weight[i]) > 1e-15 {
+			t.Errorf("point %d: %v, want %v, %v", i, p, place[15-i], weight[i])
+		}
+	}
+	for n := 0; n <= 32; n += 2 {
+		sum := 0.0
+		for _, p := range Legendre16 {
+			sum += p.Weight * math.Pow(p.Place, float64(n))
+		}
+		off := math.Abs(sum*float64(n+1)/2 - 1)
+		if n <= 30 && off > 1e-13 || n == 32 && off < 1e-11 {
+			t.Errorf("degree %d: off by %g", n, off)
+		}
+	}
+}
