@@ -13,10 +13,10 @@ var BottomStress = clause.Define(&clause.Formula{
 
 // CrackedAtUltimate asks where the section cracks in bending at the ultimate limit state.
 var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
-	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage for bending cracks"}
+	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage"}
 
 // Resists asks whether any resistance is counted at the station.
-var Resists = &clause.Condition{ID: "resists", Name: "Resistance at the station", Text: "M_Rd > 0·[kN·m]", Yes: "a resistance is counted here", No: "no resistance is counted here: bending fails already"}
+var Resists = &clause.Condition{ID: "resists", Name: "Resistance at the station", Text: "M_Rd > 0·[kN·m]", Yes: "counted", No: "no resistance is counted here: bending fails already"}
 
 // LargestShear is the largest shear force at a station, either side and sign.
 var LargestShear = clause.Define(&clause.Formula{

@@ -35,7 +35,7 @@ var TensionDepthWithBars, TensionDepth = steelSums(
 // TensionSteelThere asks whether any steel below the centroid is bonded at the station.
 var TensionSteelThere = &clause.Condition{
 	ID: "tension-steel-there", Name: "Steel in the tension zone", Ref: en(compatible, ""), Text: "F_t > 0·[kN]",
-	Yes: "steel below the centroid is bonded here", No: "no steel below the centroid is bonded here",
+	Yes: "steel is bonded there", No: "no steel is bonded there",
 }
 
 // DepthWithoutTensionSteel is d where no steel is bonded in the tension zone: the whole depth, which asks the most.
@@ -73,19 +73,19 @@ var OutermostStrain = clause.Define(&clause.Formula{
 // EveryRowAnchored asks whether anchorage or strength limits the rows.
 var EveryRowAnchored = &clause.Condition{
 	ID: "every-row-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "r_a ≥ 1",
-	Yes: "every row that counts can be anchored up to its design strength",
-	No:  "anchorage limits a row: its bond fails before it yields",
+	Yes: "every row is anchored",
+	No:  "anchorage limits a row: it slips before it yields",
 }
 
 // OutermostYields asks whether the outermost row yields before the section fails.
 var OutermostYields = &clause.Condition{
 	ID: "outermost-yields", Name: "Kind of failure: strength", Ref: en("5.10.1(5)P", ""), Text: "r_y ≥ 1",
-	Yes: "the outermost row yields before the section fails",
+	Yes: "the outermost row yields first",
 	No:  "over-reinforced: the concrete crushes before the outermost row yields",
 }
 
 // ConcreteCrushes asks which strain ends the resistance.
 var ConcreteCrushes = &clause.Condition{
 	ID: "concrete-crushes", Name: "Strain that ends the resistance", Ref: en("6.1(3)P Figure 6.1", ""), Text: "ε_c ≥ 0.9999·ε_cu3",
-	Yes: "the top fibre reaches its ultimate strain", No: "a row of steel reaches its strain limit, the top fibre is below its ultimate strain",
+	Yes: "the concrete crushes", No: "steel reaches its strain limit first",
 }

@@ -33,7 +33,7 @@ var NoResistance = clause.Define(&clause.Formula{
 // PartlyCompressed asks whether the neutral axis lies in the section.
 var PartlyCompressed = &clause.Condition{
 	ID: "partly-compressed", Name: "Neutral axis", Ref: en("6.1(5), (6)", ""), Text: "x ≤ h",
-	Yes: "the neutral axis lies in the section", No: "the section is wholly compressed: too much steel, no resistance is counted",
+	Yes: "within the section", No: "the section is wholly compressed: too much steel, no resistance is counted",
 }
 
 // NoResistanceCompressed is the resistance where the section is wholly compressed, which is not covered.

@@ -116,7 +116,7 @@ func (b *Block) decide(c *clause.Condition) (*Choice, error) {
 			err = fr.miss
 		}
 		if err != nil {
-			return fmt.Errorf("%s: %w", at(axes, i), err)
+			return fmt.Errorf("%w%s", err, at(axes, i))
 		}
 		e.Outcomes[i] = No
 		if ok {

@@ -65,7 +65,7 @@ func (b *Block) step(f *clause.Formula) error {
 				err = fr.miss
 			}
 			if err != nil {
-				return fmt.Errorf("%s: %w", at(axes, i), err)
+				return fmt.Errorf("%w%s", err, at(axes, i))
 			}
 			if fr.shadow {
 				e.Shadow[i] = v

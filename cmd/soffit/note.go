@@ -148,7 +148,19 @@ func compose(m *member.Member) (made, error) {
 	}
 	pdf, err := sheet.Render(n, sheet.Options{})
 	if err != nil {
-		return made{}, fmt.Errorf("%s: %w", m.File, err)
+		return made{}, placed(m, err)
 	}
 	return made{n, record, pdf}, nil
+}
+
+// placed gives what the sheet says of a narrative its line in the member file.
+func placed(m *member.Member, err error) error {
+	for _, p := range m.Narrative {
+		if _, fault, found := strings.Cut(err.Error(), "text "+p.Slot+"."); found {
+			if _, fault, found = strings.Cut(fault, "/narrative: "); found {
+				return fmt.Errorf("%s:%d:%d: narrative, %s: %s", m.File, p.Pos.Line, p.Pos.Col, p.Slot, fault)
+			}
+		}
+	}
+	return fmt.Errorf("%s: %w", m.File, err)
 }
