@@ -65,6 +65,8 @@ func TestFindings(t *testing.T) {
 		"; text that begins with ! goes in quotes", "bring keys of one group to one column", "put the text in quotes"
 	for _, c := range []struct{ src, want, root string }{
 		{"a: b: c\nd: 1", "1:5: a second colon in the line|" + sign, "1:1{1:1+1a: 1:1broken, 2:1+1d: 2:4+11}"},
+		{"a:\n  b:1\n  c: 2\n", "2:4: no blank after the colon of b|write b: 1", ""},
+		{"a:\n  b c:40 MPa # one\n  d: 2\n", "2:6: no blank after the colon of b c|write b c: 40 MPa", ""},
 		{"a:\n  b: 1\n   c: 2\n", "3:4: a line further in than the one above|" + column, ""},
 		{"a:\n  b: 1\n c: 2\n", "3:2: a line that does not fit the ones above|" + column, ""},
 		{"a:\n  b\n  c: 1\n", "2:3: a key without a colon|write key: value", ""},

@@ -97,6 +97,9 @@ func secondColon(line string) int {
 	return utf8.RuneCountInString(line[:at+i])
 }
 
+// tightColon is a line that is a key, a colon and a value without a blank between: to YAML it is text.
+var tightColon = regexp.MustCompile(`^\s*(?:- )?([\pL_][\pL\pN_ ]*):[^\s/]`)
+
 var anchorName = regexp.MustCompile(`unknown anchor '(.*)' referenced`)
 
 // syntax finds why a section cannot be read: tabs at the beginning of lines if there are any, else what the
@@ -115,6 +118,18 @@ func (w *walker) syntax(bad *syntax, lines []string, skip int) {
 		}
 	}
 	at := diag.Pos{Line: w.brokenLine(bad, lines, skip)}
+	for _, n := range []int{at.Line, at.Line - 1} { // the decoder stumbles over the line after it
+		if n <= skip {
+			continue
+		}
+		if m := tightColon.FindStringSubmatchIndex(w.file.line(n)); m != nil {
+			line := w.file.line(n)
+			key := clip(line[m[2]:m[3]])
+			value, _, _ := strings.Cut(line[m[3]+1:], " #")
+			w.find(diag.Pos{Line: n, Col: utf8.RuneCountInString(line[:m[3]]) + 1}, 1, "no blank after the colon of "+key, "write "+key+": "+clip(strings.TrimSpace(value)))
+			return
+		}
+	}
 	line := w.file.line(at.Line)
 	r := remedyFor(bad.msg, line)
 	if above := w.file.line(at.Line - 1); r.msg == furtherIn && at.Line > skip+1 && !strings.Contains(above, ":") && margin(above) < len(above) {
