@@ -53,7 +53,7 @@ func FindProduct(name string) (Product, bool) {
 // ProofStrength is f_p0,1k, F_p0,1/A.
 var ProofStrength = clause.Define(&clause.Formula{
 	ID: "proof-strength", Name: "Characteristic 0.1 % proof strength, from the declared force", Ref: en("3.3.3(1)P", ""),
-	Text: "f_{p0,1k,i} = F_{p0,1,i}/A_{p1,i}", Unit: "MPa", Digits: 4,
+	Text: "f_{p0,1k,i} = F_{p0,1,i}/A_{p1,i}", Unit: "MPa",
 	Examples: []clause.Example{
 		by(catalogue+"; f_p0,1k of 139 mm²", clause.Opened, "1640 MPa", "F_{p0,1,i} = 228 kN", "A_{p1,i} = 139 mm²"),
 		by(catalogue+"; f_p0,1k of 93 mm²", clause.Opened, "1634 MPa", "F_{p0,1,i} = 152 kN", "A_{p1,i} = 93 mm²"),

@@ -61,15 +61,14 @@ type source struct {
 }
 
 type builder struct {
-	note     *Note
-	path     string
-	number   int
-	symbols  map[string][]*Line
-	sources  []source
-	mask     []bool // active rows of the implicit axis; one row where there is none
-	all      bool
-	figures  *int
-	numbered int
+	note    *Note
+	path    string
+	number  int
+	symbols map[string][]*Line
+	sources []source
+	mask    []bool // active rows of the implicit axis; one row where there is none
+	all     bool
+	worst   *rank // of the checks so far: that of the worst decides which row is worked in full
 }
 
 // Block opens the next block of the chapter. over is its implicit axis, nil for single values.

@@ -281,45 +281,44 @@ func names(axes []*Axis) []string {
 // compactColumns puts arrays of plain values on one line each, so that a column reads as one.
 func compactColumns(data []byte) []byte {
 	out := make([]byte, 0, len(data))
-	for i := 0; i < len(data); i++ {
-		if data[i] == '"' { // copy a string whole
-			k := i + 1
-			for data[k] != '"' {
-				if data[k] == '\\' {
-					k++
-				}
-				k++
-			}
-			out = append(out, data[i:k+1]...)
-			i = k
+	for i := 0; i < len(data); {
+		if data[i] == '"' {
+			end := stringEnd(data, i)
+			out = append(out, data[i:end]...)
+			i = end
 			continue
 		}
 		out = append(out, data[i])
-		if data[i] != '[' {
+		i++
+		if data[i-1] != '[' {
 			continue
 		}
-		if end, flat := flatArray(data, i+1); flat {
-			for k := i + 1; k < end; k++ {
-				switch c := data[k]; c {
-				case '"':
-					m := k + 1
-					for data[m] != '"' {
-						if data[m] == '\\' {
-							m++
-						}
-						m++
-					}
-					out = append(out, data[k:m+1]...)
-					k = m
-				case '\n', ' ':
-				default:
-					out = append(out, c)
-				}
+		end, flat := flatArray(data, i)
+		for flat && i < end {
+			switch c := data[i]; c {
+			case '"':
+				to := stringEnd(data, i)
+				out = append(out, data[i:to]...)
+				i = to
+				continue
+			case '\n', ' ':
+			default:
+				out = append(out, c)
 			}
-			i = end - 1
+			i++
 		}
 	}
 	return out
+}
+
+// stringEnd is the position behind the JSON string that begins at i.
+func stringEnd(data []byte, i int) int {
+	for i++; data[i] != '"'; i++ {
+		if data[i] == '\\' {
+			i++
+		}
+	}
+	return i + 1
 }
 
 // flatArray finds the closing bracket of an array that holds no array or object.
@@ -327,11 +326,7 @@ func flatArray(data []byte, from int) (int, bool) {
 	for k := from; k < len(data); k++ {
 		switch data[k] {
 		case '"':
-			for k++; data[k] != '"'; k++ {
-				if data[k] == '\\' {
-					k++
-				}
-			}
+			k = stringEnd(data, k) - 1
 		case '[', '{':
 			return 0, false
 		case ']':

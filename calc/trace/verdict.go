@@ -12,7 +12,7 @@ import (
 
 // Check compares demand with limit on every active row. It fails where demand > limit in the carried or in the
 // unrounded chain. The ratio is rounded up; where the limit is not positive the margin is recorded instead.
-// The worst row becomes the row the sheet works in full.
+// The worst row of the worst check of a block becomes the row the sheet works in full.
 func (b *Block) Check(c *clause.Check) {
 	if b.stopped() {
 		return
@@ -75,8 +75,8 @@ func (b *Block) Check(c *clause.Check) {
 		b.fail("%s: %w", c.ID, err)
 		return
 	}
-	if len(axes) > 0 && axes[0] == b.Over {
-		b.Row = PlaceAt(axes, e.Worst).Of(b.Over)
+	if r := e.rank(); len(axes) > 0 && axes[0] == b.Over && (b.build.worst == nil || r.above(*b.build.worst)) {
+		b.Row, b.build.worst = PlaceAt(axes, e.Worst).Of(b.Over), &r
 	}
 	b.record(e)
 }
