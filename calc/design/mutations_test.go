@@ -81,8 +81,8 @@ func TestMutatedMembers(t *testing.T) {
 					}
 				}
 			})
-			// A mutated load may be a thousand times too large: what rounding moves is then held against the ratio.
-			if effect, check := n.Rounding(); !(effect < 0.002*max(1, check.Value[check.Worst])) {
+			// A mutated load may be a thousand times too large: beyond a ratio of 10 what rounding moves may grow with it.
+			if effect, check := n.Rounding(); !(effect < 0.002*max(1, check.Value[check.Worst]/10)) {
 				t.Errorf("rounding moves %s by %.5f of %.3f", check.Name, effect, check.Value[check.Worst])
 			}
 			if _, differences := trace.Closure(n); len(differences) > 0 {
