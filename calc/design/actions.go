@@ -67,8 +67,9 @@ func (j *job) stationList() []station {
 			x    float64
 		}{{"start", debonded}, {"l_pt2", debonded + j.base("prestress.transmission/upper-transmission-length", row)},
 			{"l_bpd", debonded + j.base("prestress.transmission/anchorage-length", row)}} {
-			round(p.name+" "+r+" A", p.x)
-			round(p.name+" "+r+" B", length-p.x)
+			x := math.Ceil(p.x) // never on the short side
+			add(p.name+" "+r+" A", x)
+			add(p.name+" "+r+" B", length-x)
 		}
 	}
 	slices.SortFunc(all, func(s, t station) int { return cmp.Compare(s.x, t.x) })

@@ -45,9 +45,10 @@ func (j *job) trial(b *trace.Block) trace.Rows {
 		return b.Active()
 	}
 	b.Step(ec2.FlangeTrial)
-	inFlange, below := b.Choose(ec2.BlockInFlange)
+	rectangle := j.m.Shape.Kind.Text == "rectangle"
+	inFlange, below := b.Choose(pick(rectangle, ec2.BlockInRectangle, ec2.BlockInFlange))
 	rest := j.stands(b, inFlange, ec2.TrialInFlange)
-	if j.m.Shape.Kind.Text == "rectangle" {
+	if rectangle {
 		return rest.Or(below)
 	}
 	inWeb := below
@@ -145,11 +146,11 @@ func (j *job) kindOfFailure(b *trace.Block, there trace.Rows) {
 		b.On(anchored, func() {
 			b.Steps(ec2.OutermostBonded, ec2.OutermostStrain)
 			b.Decide(ec2.OutermostYields)
+			if j.limited() {
+				b.Decide(ec2.ConcreteCrushes)
+			}
 		})
 	})
-	if j.limited() {
-		b.Decide(ec2.ConcreteCrushes)
-	}
 }
 
 // pick is a where yes, else b.

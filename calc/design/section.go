@@ -25,7 +25,7 @@ func (j *job) sectionChapter(c *trace.Chapter) {
 		b.Step(mechanics.BarDepth)
 	}
 
-	b = c.Block("flange", "Span and effective flange", nil, trace.Take(j.section, j.span)...)
+	b = c.Block("flange", pick(j.m.Shape.Kind.Text == "rectangle", "Span", "Span and effective flange"), nil, trace.Take(j.section, j.span)...)
 	j.spanLength = b
 	b.Step(mechanics.Span)
 	if j.m.Shape.Kind.Text != "rectangle" {

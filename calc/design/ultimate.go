@@ -36,9 +36,6 @@ func (j *job) largest(key string) string {
 	return j.stations.Rows[best]
 }
 
-// linkAngle is the flattest strut that 6.2.3(2) allows, cot θ = 2.5: it adds the most tension.
-const linkAngle = "21.8"
-
 // cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
 // tension that shear adds (8.10.2.3(1), 6.2.3(7)), and failure must announce itself when the load grows (5.10.1(5)P).
 func (j *job) cracked(c *trace.Chapter) {
@@ -46,11 +43,10 @@ func (j *job) cracked(c *trace.Chapter) {
 	most := c.Block("largest-moment", "Largest moment of the span, "+at, nil, trace.At(j.ultimate, at))
 	most.Step(ec2.LargestMoment)
 
-	takes := trace.Take(j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.along, j.resistance, most)
+	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.along, j.resistance, most)
 	b := c.Block("cracked", "Where the section cracks at the ultimate limit state", j.stations, takes...)
 	b.Row = j.resistance.Row
 	b.Text("cracked", templates.Text("cracked"))
-	b.Given(def("strut-angle", "θ", "Angle of the struts: the flattest allowed, shear not being justified here", "°", ref(ec2.Code, "6.2.3(2)")), plain(linkAngle, "°"), "assumption on the safe side")
 	b.Require(ec2.NoLargerMoment)
 	b.Step(ec2.BottomStress)
 	cracked, _ := b.Choose(ec2.CrackedAtUltimate)

@@ -44,30 +44,41 @@ func (j *job) remarks() string {
 		if !ok {
 			continue
 		}
-		var at []string
-		yes := false
-		for i, o := range c.Outcomes {
+		at, yes := 0, false
+		for _, o := range c.Outcomes {
 			yes = yes || o == trace.Yes
 			if o == trace.No {
-				at = append(at, trace.RowName(c.Axes, i))
+				at++
 			}
 		}
 		switch {
 		case r.words == "" && !yes:
 			out = append(out, fmt.Sprintf("No station cracks in bending at the ultimate limit state ([%s](#%s)): the checks with the tension added by shear and of cracking before failure are not needed.", c.Number, c.Key))
-		case r.words != "" && len(at) > 0:
-			out = append(out, fmt.Sprintf("%s ([%s](#%s)), at %d of %d stations: %s.", r.words, c.Number, c.Key, len(at), len(c.Outcomes), some(at)))
+		case r.words != "" && at > 0:
+			out = append(out, fmt.Sprintf("%s ([%s](#%s)), at %d of %d stations: %s.", r.words, c.Number, c.Key, at, len(c.Outcomes), runs(c, trace.No)))
 		}
 	}
 	return strings.Join(out, "\n\n")
 }
 
-// some names the first and the last of a list.
-func some(list []string) string {
-	if len(list) < 4 {
-		return strings.Join(list, ", ")
+// runs names the stretches of stations that have an outcome, "bearing A … 0.15 l, 0.85 l … bearing B".
+func runs(c *trace.Choice, want trace.Outcome) string {
+	var out []string
+	for i := 0; i < len(c.Outcomes); i++ {
+		if c.Outcomes[i] != want {
+			continue
+		}
+		first := i
+		for i+1 < len(c.Outcomes) && c.Outcomes[i+1] == want {
+			i++
+		}
+		name := trace.RowName(c.Axes, first)
+		if i > first {
+			name += " … " + trace.RowName(c.Axes, i)
+		}
+		out = append(out, name)
 	}
-	return list[0] + " … " + list[len(list)-1]
+	return strings.Join(out, ", ")
 }
 
 // mends tries each remedy step by step: it records the first step with which every check passes, or else, for each

@@ -33,8 +33,8 @@ var LeverArm = clause.Define(&clause.Formula{
 // AddedMoment is the moment equivalent of the tension that shear adds, ΔF_td·z.
 var AddedMoment = clause.Define(&clause.Formula{
 	ID: "added-moment", Name: "Moment equal to the tension that shear adds, vertical links", Ref: en("6.2.3(7)", "6.18"),
-	Text: "ΔM = 0.5·V_max·cot(θ)·z", Unit: "kN·m",
-	Examples: hand("113.61 kN·m", "V_max = 100 kN", "θ = 21.8014 °", "z = 908.86 mm"),
+	Text: "ΔM = 0.5·V_max·c_θ·z", Unit: "kN·m",
+	Examples: hand("113.61 kN·m", "V_max = 100 kN", "c_θ = 2.5", "z = 908.86 mm"),
 })
 
 // MomentWithShear is the moment to be resisted with the tension added by shear, at most the largest of the span.

@@ -56,30 +56,31 @@ var OutermostBonded = clause.Define(&clause.Formula{
 	Examples: hand("1090 mm", "d_{p,i} = 1140 mm, 1090 mm", "s_i = 0 m, 2 m"),
 })
 
-// LeastAnchorage is the least part of its design strength that a row of tendons that counts can anchor.
+// LeastAnchorage is how far the stress that can be anchored stays below the design strength in the row that counts
+// where it stays farthest below.
 var LeastAnchorage = clause.Define(&clause.Formula{
-	ID: "least-anchorage", Name: "Least part of its design strength that a row which counts can anchor here", Ref: en("8.10.2.3(5)", ""),
-	Text: "r_a = min_i(cases(t_{p,i} = 1: σ_{av,i}/f_{pd,i}; otherwise: 1))", Unit: "", Digits: 4,
-	Examples: hand("0.5", "t_{p,i} = 1, 1, 0", "σ_{av,i} = 1400 MPa, 700 MPa, 0 MPa", "f_{pd,i} = 1400 MPa, 1400 MPa, 1400 MPa"),
+	ID: "least-anchorage", Name: "Stress anchored less design strength, the least of the rows that count", Ref: en("8.10.2.3(5)", ""),
+	Text: "Δσ_a = min_i(cases(t_{p,i} = 1: σ_{av,i} − f_{pd,i}; otherwise: 0·[MPa]))", Unit: "MPa",
+	Examples: hand("-700 MPa", "t_{p,i} = 1, 1, 0", "σ_{av,i} = 1400 MPa, 700 MPa, 0 MPa", "f_{pd,i} = 1400 MPa, 1400 MPa, 1400 MPa"),
 })
 
 // OutermostStrain is the strain of the outermost bonded row over its yield strain.
 var OutermostStrain = clause.Define(&clause.Formula{
-	ID: "outermost-strain", Name: "Strain of this row over that at its design strength", Ref: en("5.10.1(5)P", ""),
+	ID: "outermost-strain", Name: "Strain of this row over that at its design strength", Ref: en(compatible, ""),
 	Text: "r_y = max_i(cases(d_{p,i} = d_o: ε_{p,i}/ε_{py,i}; otherwise: 0))", Unit: "", Digits: 4,
 	Examples: hand("3.5", "d_{p,i} = 1140 mm, 1090 mm", "d_o = 1140 mm", "ε_{p,i} = 24.5 ‰, 20 ‰", "ε_{py,i} = 7 ‰, 7 ‰"),
 })
 
 // EveryRowAnchored asks whether anchorage or strength limits the rows.
 var EveryRowAnchored = &clause.Condition{
-	ID: "every-row-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "r_a ≥ 1",
+	ID: "every-row-anchored", Name: "Kind of failure: anchorage", Ref: en("8.10.2.3", ""), Text: "Δσ_a ≥ 0·[MPa]",
 	Yes: "every row is anchored",
 	No:  "anchorage limits a row: it slips before it yields",
 }
 
 // OutermostYields asks whether the outermost row yields before the section fails.
 var OutermostYields = &clause.Condition{
-	ID: "outermost-yields", Name: "Kind of failure: strength", Ref: en("5.10.1(5)P", ""), Text: "r_y ≥ 1",
+	ID: "outermost-yields", Name: "Kind of failure: strength (own criterion)", Ref: en(compatible, ""), Text: "r_y ≥ 1",
 	Yes: "the outermost row yields first",
 	No:  "over-reinforced: the concrete crushes before the outermost row yields",
 }

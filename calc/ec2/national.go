@@ -39,6 +39,7 @@ var Parameters = []Parameter{
 	number("jacking-limit-proof", "k_2", "k_2", "Limit of the stress at jacking, part of f_p0,1k", "0.9", 0.5, 0.95, en("5.10.2.1(1)P", "")),
 	number("release-limit-tensile", "k_7", "k_7", "Limit of the stress after release, part of f_pk", "0.75", 0.5, 0.95, en("5.10.3(2)", "")),
 	number("release-limit-proof", "k_8", "k_8", "Limit of the stress after release, part of f_p0,1k", "0.85", 0.5, 0.95, en("5.10.3(2)", "")),
+	number("strut-limit", "c_θ", "c_theta", "Largest cot θ of the struts allowed, which adds the most tension", "2.5", 1, 4, en("6.2.3(2)", "6.7N")),
 	number("permanent-upper", "γ_{G,sup}", "gamma_G,sup", "Partial factor for permanent actions, unfavourable", "1.35", 1, 2, en1990("Table A1.2(B)", "")),
 	number("permanent-lower", "γ_{G,inf}", "gamma_G,inf", "Partial factor for permanent actions, favourable", "1.0", 0.5, 1, en1990("Table A1.2(B)", "")),
 	number("variable-upper", "γ_Q", "gamma_Q", "Partial factor for variable actions, unfavourable (favourable: 0)", "1.5", 1, 2, en1990("Table A1.2(B)", "")),

@@ -55,6 +55,12 @@ var BlockInFlange = &clause.Condition{
 	Yes: "block in the flange", No: "block below the flange",
 }
 
+// BlockInRectangle is BlockInFlange for a section without a flange.
+var BlockInRectangle = &clause.Condition{
+	ID: "block-in-section", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_f ≤ h_f",
+	Yes: "block within the section", No: "block deeper than the section",
+}
+
 // HaunchRest is the area of the block below the flange.
 var HaunchRest = clause.Define(&clause.Formula{
 	ID: "block-rest", Name: "Area that the block needs below the flange", Ref: en("3.1.7(3) Figure 3.5", ""),

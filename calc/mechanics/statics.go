@@ -17,7 +17,7 @@ var Span = clause.Define(&clause.Formula{
 
 // Load is the load per length of each load, the self-weight among them.
 var Load = clause.Define(&clause.Formula{
-	ID: "load", Name: "Load per length of each load", Text: "q_i = q_{0,i} + w_i·g_0", Unit: "kN/m", Digits: 4,
+	ID: "load", Name: "Load per length of each load", Text: "q_i = q_{0,i} + w_i·g_0", Unit: "kN/m",
 	Examples: hand("10.5 kN/m", "q_{0,i} = 0 kN/m", "w_i = 1", "g_0 = 10.5 kN/m"),
 })
 
