@@ -185,15 +185,12 @@ func TestSlots(t *testing.T) {
 			t.Fatalf("slots %v, want %v", got, want)
 		}
 	}
-	n, _ := ParseExpr("Σ_i(A_i·b/x_j) + y_n + max_j(d_j)")
-	if free := FreeIndices(n); len(free) != 1 || free[0] != "j" {
+	n, _ := ParseCond("Σ_i(A_i·b/x_j) + y_n + max_j(d_j) > 0")
+	if free := FreeCondIndices(n); len(free) != 1 || free[0] != "j" {
 		t.Errorf("free indices %v, want j", free)
 	}
 	c, _ := ParseCond("d_i < x_{k,n} and Σ_i(d_i) > 0")
 	if free := FreeCondIndices(c); len(free) != 2 || free[0] != "i" || free[1] != "n" {
 		t.Errorf("free indices %v, want i and n", free)
-	}
-	if s := CondSymbols(c); len(s) != 2 {
-		t.Errorf("symbols %v, want two", s)
 	}
 }

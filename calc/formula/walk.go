@@ -2,29 +2,7 @@ package formula
 
 import "slices"
 
-// Symbols lists the symbols of an expression that need a value, distinct by name, in order of first use.
-func Symbols(n Node) []*Symbol {
-	var l lister
-	l.node(n)
-	return l.symbols
-}
-
-// CondSymbols is Symbols for a condition.
-func CondSymbols(c Cond) []*Symbol {
-	var l lister
-	l.cond(c)
-	return l.symbols
-}
-
-// FreeIndices lists the indices of an expression that no Σ, min or max over rows binds, in order of first
-// use. A formula with a free index makes a column.
-func FreeIndices(n Node) []string {
-	var l lister
-	l.node(n)
-	return l.free
-}
-
-// FreeCondIndices is FreeIndices for a condition.
+// FreeCondIndices lists the indices of a condition that no Σ, min or max over rows binds, in order of first use.
 func FreeCondIndices(c Cond) []string {
 	var l lister
 	l.cond(c)

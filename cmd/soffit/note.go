@@ -136,11 +136,14 @@ type made struct {
 	record, pdf []byte
 }
 
-// compose designs a member and sets its note.
+// compose designs a member, recomputes its record from the printed values, and sets the note.
 func compose(m *member.Member) (made, error) {
 	n, err := design.Run(m)
 	if err != nil {
 		return made{}, err
+	}
+	if _, differences := trace.Closure(n); len(differences) > 0 {
+		return made{}, fmt.Errorf("%s: a printed value does not follow from its printed operands, so there is no note; a fault of soffit, not of the file: %w", m.File, differences[0])
 	}
 	record, err := n.JSON()
 	if err != nil {

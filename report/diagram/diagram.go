@@ -75,26 +75,3 @@ func Lay(n *trace.Note, f *trace.Figure, width draw.Pt) (*Figure, error) {
 func (f *Figure) Draw(c draw.Canvas, x, y draw.Pt) {
 	f.tape.replay(c, x-f.tape.ink.X0, y-f.tape.ink.Y0)
 }
-
-// Height is the height a figure takes at a width.
-func Height(n *trace.Note, f *trace.Figure, width draw.Pt) (draw.Pt, error) {
-	fig, err := Lay(n, f, width)
-	if err != nil {
-		return 0, err
-	}
-	return fig.Height, nil
-}
-
-// Draw draws a figure in the middle of the upper edge of an area. It is an error if the area is too low.
-func Draw(c draw.Canvas, area draw.Box, n *trace.Note, f *trace.Figure) error {
-	fig, err := Lay(n, f, area.Width())
-	if err != nil {
-		return err
-	}
-	if fig.Height > area.Height()+0.01 {
-		return fmt.Errorf("figure %s: needs %.0f mm of height, has %.0f mm", f.Key, float64(fig.Height/draw.Mm),
-			float64(area.Height()/draw.Mm))
-	}
-	fig.Draw(c, area.X0+(area.Width()-fig.Width)/2, area.Y0)
-	return nil
-}

@@ -201,9 +201,6 @@ func TestErrors(t *testing.T) {
 			t.Errorf("error is %v, want %q", err, c.want)
 		}
 	}
-	if err := Draw(&draw.Recorder{}, draw.BoxAt(0, 0, 400, 20), n, figs["fig-section"]); err == nil || !strings.Contains(err.Error(), "of height, has 7 mm") {
-		t.Errorf("area too low: error is %v", err)
-	}
 }
 
 // TestBranches: of two entries in one role the one computed at the place is drawn.

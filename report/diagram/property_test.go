@@ -124,9 +124,7 @@ func TestFiguresAreClean(t *testing.T) {
 			}
 			var r draw.Recorder
 			area := draw.BoxAt(40, 60, width, fig.Height)
-			if err := Draw(&r, area, n, f); err != nil {
-				rt.Fatal(err)
-			}
+			fig.Draw(&r, area.X0+(area.Width()-fig.Width)/2, area.Y0)
 			for _, fault := range append(r.Faults(), r.Outside(area, nil)...) {
 				rt.Errorf("%s at %.0f pt: %s", id, float64(width), fault)
 			}

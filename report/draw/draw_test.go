@@ -1,7 +1,6 @@
 package draw
 
 import (
-	"math"
 	"strings"
 	"testing"
 )
@@ -94,31 +93,6 @@ func TestOutside(t *testing.T) {
 	r.Line(0, 50, 100, 50, 3) // ends on the edges, without caps
 	if f := r.Outside(column, nil); len(f) != 1 {
 		t.Errorf("a line along the column is outside: %v", f)
-	}
-}
-
-func TestTurned(t *testing.T) {
-	var r Recorder
-	c := Turned{On: &r, X: 100, Y: 200}
-	c.Line(0, 0, 30, 0, 1)
-	c.Text(0, -2, Serif, 10, "H")
-	c.Rect(0, 5, 30, 10, Style{Stroke: 0.001})
-	c.Anchor("a", 10, 0)
-	c.Link(0, 0, 30, 10, "a")
-	if b := r.Ink[0].Box; b != (Box{99.5, 170, 100.5, 200}) {
-		t.Errorf("line to the right goes up: %+v", b)
-	}
-	if b := r.Ink[1].Box; b.X1 > 98.01 || b.X0 < 91 || b.Y1 > 200 {
-		t.Errorf("text above the line stands to its left: %+v", b)
-	}
-	if b := r.Ink[2].Box; math.Abs(float64(b.X0-105)) > 0.01 || math.Abs(float64(b.Y0-170)) > 0.01 || math.Abs(float64(b.Width()-10)) > 0.01 {
-		t.Errorf("rectangle below the line stands to its right: %+v", b)
-	}
-	if a := r.Anchors[0].At; a != (Point{100, 190}) {
-		t.Errorf("anchor at %v", a)
-	}
-	if l := r.Links[0].Box; l != (Box{100, 170, 110, 200}) {
-		t.Errorf("link at %v", l)
 	}
 }
 

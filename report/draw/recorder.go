@@ -65,7 +65,6 @@ type Recorder struct {
 }
 
 var _ Canvas = (*Recorder)(nil)
-var _ Canvas = Turned{}
 
 // Owner labels the following ink.
 func (r *Recorder) Owner(label string) { r.owner = label }
