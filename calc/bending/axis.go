@@ -13,6 +13,8 @@ const (
 	PivotCore
 	// PivotFlange: the mean strain of the compression flange is at its limit (EN 1992-1-1, 6.1(5)).
 	PivotFlange
+	// PivotEdge: the upper edge of a concrete within the section is at its ε_cu; with Limits alone.
+	PivotEdge
 )
 
 func (p Pivot) String() string {
@@ -25,17 +27,22 @@ func (p Pivot) String() string {
 		return "core"
 	case PivotFlange:
 		return "flange"
+	case PivotEdge:
+		return "inner edge"
 	}
 	return "none"
 }
 
 // Axis is a state of strain in which the forces balance, at the limit of a strain.
 type Axis struct {
-	X         float64 // mm, depth of the neutral axis below the top fibre
+	X         float64 // mm, depth of the neutral axis below the top fibre; with strain locked in that of the plane, maybe above it
 	Curvature float64 // κ, 1/mm
 	TopStrain float64 // κ·x, compression positive
 	Pivot     Pivot
 	Layer     int // index of the layer at its limit with PivotSteel, else −1
+	Edge      int // index of the edge at its limit with PivotTop (0 for a section alone) and PivotEdge, else −1
+	// Reduced: the zone narrows toward the compressed edge, and the stress of the block was cut by Narrowing.
+	Reduced bool
 
 	Concrete      float64 // N, force of the concrete, compression positive
 	ConcreteDepth float64 // mm, depth of that force below the top fibre
@@ -60,7 +67,8 @@ type Axis struct {
 // in a flange, the state of smallest curvature is returned, for it is reached first; such states are told apart
 // in 16 steps over the depth in which that limit can govern, and at the peaks between them.
 //
-// Residual is below 1e-6 of the force of the concrete, or of the axial one if that is greater. Domain: λ in
+// Residual is below 1e-6 of the force of the concrete, or of the axial one if that is greater; but for rounding
+// where pulling and pushing steel nearly outweigh each other. Domain: λ in
 // (0, 1], η·f_cd > 0, ε_cu > 0. Errors are *Refusal with every Reason. Nothing is allocated unless it fails.
 func (s *Section) NeutralAxis(law BlockLaw, layers []Layer) (Axis, error) {
 	return s.NeutralAxisUnder(Conditions{}, law, layers)
@@ -72,7 +80,7 @@ func (s *Section) NeutralAxisUnder(c Conditions, law BlockLaw, layers []Layer) (
 		return Axis{}, err
 	}
 	p := problem{section: s, layers: layers, block: law, epsCu: law.EpsCu, Conditions: c}
-	return p.solve(s.height / law.Lambda)
+	return p.narrowing(s.height / law.Lambda)
 }
 
 // Fibres finds the neutral axis and M_Rd a second way, with the parabola–rectangle law of the concrete,

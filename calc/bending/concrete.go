@@ -57,7 +57,10 @@ func (p Parabola) Stress(strain float64) float64 {
 
 // rise is 1 − (1 − w)^n for w in [0, 1), true also for small w.
 func rise(n, w float64) float64 {
-	if n == 2 {
+	switch n {
+	case 1:
+		return w
+	case 2:
 		return w * (2 - w)
 	}
 	return -math.Expm1(n * math.Log1p(-w))
@@ -143,7 +146,10 @@ func (b *slab) byPoints(law Parabola, x, l, from, to float64) (area, first float
 
 // power is v^n for v ≥ 0.
 func power(v, n float64) float64 {
-	if n == 2 {
+	switch n {
+	case 1:
+		return v
+	case 2:
 		return v * v
 	}
 	return math.Exp(n * math.Log(v)) // a third of the time of math.Pow

@@ -13,7 +13,9 @@ func (s *Section) AtCentroid(force float64) Axial { return Axial{force, s.centro
 
 // CompressionFlange is a flange at the top whose mean strain is limited: where it is wholly compressed the
 // strain in the middle of its depth is at most Strain, ε_c2, or ε_c3 with the bilinear law
-// (EN 1992-1-1, 6.1(5)). Depth 0 is none.
+// (EN 1992-1-1, 6.1(5)). Depth 0 is none. The strain is the plane's: of what is locked into the flange the mean
+// is to be taken off Strain. Where 2·Strain is less than the plane may have at the edge, ε_cu, the curvature jumps as
+// the flange comes to be wholly compressed, and forces that would balance in the jump alone are Unbalanced.
 type CompressionFlange struct {
 	Depth  float64 // mm
 	Strain float64
@@ -23,6 +25,10 @@ type CompressionFlange struct {
 type Conditions struct {
 	Axial  Axial
 	Flange CompressionFlange
+	// Narrowing is the factor on η·f_cd of a block, also a graded one, where the compressed zone narrows toward the
+	// compressed edge: 0.9 by EN 1992-1-1, 3.1.7(3), note; 0 for none. The zone is the one without the factor; it
+	// narrows where its neutral axis lies deeper than FirstGrowth. Laws of stress and strain take no notice.
+	Narrowing float64
 }
 
 // check refuses conditions that are none, for a section of depth h.
@@ -35,6 +41,8 @@ func (c *Conditions) check(h float64) error {
 		return bad(c.Axial.Depth)
 	case !(c.Flange.Depth >= 0 && c.Flange.Depth <= h):
 		return bad(c.Flange.Depth)
+	case !(c.Narrowing >= 0 && c.Narrowing <= 1):
+		return bad(c.Narrowing)
 	case c.Flange.Depth > 0 && (!(c.Flange.Strain > 0) || math.IsInf(c.Flange.Strain, 0)):
 		return bad(c.Flange.Strain)
 	}

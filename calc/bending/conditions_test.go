@@ -195,10 +195,10 @@ func anyConditions(t *rapid.T, s *Section, strength float64, epsC float64) Condi
 
 // Any form with any layers under any conditions, by block, graded block and fibres: a root in its bracket whose
 // residual, summed anew from corners and rounds, is below 1e-6 of the force, at the limit of a strain; or a
-// reason that is true. Run with -rapid.checks=10000 for as many sections.
+// reason that is true. 10,000 sections.
 func TestAnyOutlineBalances(t *testing.T) {
 	counts, kinds := map[string]int{}, map[string]int{}
-	rapid.Check(t, func(t *rapid.T) {
+	often(t, func(t *rapid.T) {
 		o, kind := anyOutline(t)
 		layers := anyLayers(t, o.Shape)
 		block, parabola := anyConcrete(t)

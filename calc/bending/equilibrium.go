@@ -12,11 +12,23 @@ const least = 1e-9
 // balanced is the residual allowed, as part of the concrete's force or the axial one, whichever is greater.
 const balanced = 1e-6
 
-// deepest is the depth at which the search by fibres ends, in section depths.
-const deepest = 10
+// unseen is the part of the concrete's force, with the neutral axis at the foot of the section, below which a
+// difference is rounding: steel that pulls next to nothing is not measurable.
+const unseen = 1e-15
 
-// scan is the number of steps in which first and single look for changes of sign.
-const scan = 16
+// sliver is more of that force than the concrete above least can have by the plane of strain alone.
+const sliver = 1e-7
+
+// rounding is the part of the forces of the layers, one by one, that is allowed besides: where pulling and pushing
+// steel nearly outweigh each other the concrete's own force may be next to none.
+const rounding = 1e-13
+
+// deepest is the depth at which the search by fibres ends, in section depths; highest how far above the section it
+// goes where strain locked in compresses concrete although the plane does not.
+const deepest, highest = 10, 10
+
+// scan is the number of steps in which first looks for changes of sign; deeper is that of single below the section.
+const scan, deeper = 16, 64
 
 // problem is one solution under way.
 type problem struct {
@@ -28,29 +40,59 @@ type problem struct {
 	parabola Parabola
 	epsCu    float64
 	Conditions
+
+	// Fibres or bodies instead of a section.
+	fibres *FibreModel
+	parts  []part
+	limits *Limits
+	depth  float64
+	locked bool // strain is locked in
+	uneven bool // the concretes differ, or bear more above the strain that the flange is limited to
 }
 
-// curvature gives κ at x and what governs it.
-func (p *problem) curvature(x float64) (k float64, pivot Pivot, layer int) {
-	k = p.epsCu / x
-	if h := p.section.height; p.curved && x > h {
-		k, pivot = p.parabola.EpsC2/(x-(1-p.parabola.EpsC2/p.epsCu)*h), PivotCore
+// height is the depth of the whole section.
+func (p *problem) height() float64 {
+	if p.section != nil {
+		return p.section.height
+	}
+	return p.depth
+}
+
+// curvature gives κ at x and what governs it, with the index of the edge or the layer, −1 where there is none.
+func (p *problem) curvature(x float64) (k float64, pivot Pivot, at int) {
+	h := p.height()
+	switch {
+	case p.limits != nil:
+		k, pivot, at = p.limits.curvature(x, h)
+	case p.curved && x > h:
+		k, pivot, at = p.parabola.EpsC2/(x-(1-p.parabola.EpsC2/p.epsCu)*h), PivotCore, -1
+	default:
+		k = p.epsCu / x
 	}
 	if kf := p.Flange.curvature(x); kf < k {
-		k, pivot = kf, PivotFlange
+		k, pivot, at = kf, PivotFlange, -1
 	}
 	if ks, i := Curvature(x, p.layers); ks < k {
 		return ks, PivotSteel, i
 	}
-	return k, pivot, -1
+	return k, pivot, at
 }
 
 // concrete gives force and moment about the top fibre.
 func (p *problem) concrete(x, k float64) (force, moment float64) {
-	if p.curved {
+	switch {
+	case p.fibres != nil:
+		return p.fibres.Concrete(x, k)
+	case p.parts != nil:
+		for i := range p.parts {
+			f, m := p.parts[i].compression(x, k)
+			force += f
+			moment += m
+		}
+		return force, moment
+	case p.curved:
 		return p.section.Compression(p.parabola, x, k)
-	}
-	if p.graded {
+	case p.graded:
 		return p.section.Block(Graded{p.block, p.parabola}.At(k*x), x)
 	}
 	return p.section.Block(p.block, x)
@@ -65,6 +107,23 @@ func (p *problem) steel(x, k float64) (force, moment float64) {
 		moment += f * l.Depth
 	}
 	return force, moment
+}
+
+// whole is the force of the concrete with the neutral axis at the foot of the section.
+func (p *problem) whole() float64 {
+	h := p.height()
+	k, _, _ := p.curvature(h)
+	force, _ := p.concrete(h, k)
+	return force
+}
+
+// gross is the sum of the forces of the layers, none against another.
+func (p *problem) gross(x, k float64) (force float64) {
+	for i := range p.layers {
+		l := &p.layers[i]
+		force += l.Area * math.Abs(l.stress(x, k))
+	}
+	return force
 }
 
 // stress is At's, without the rest.
@@ -83,21 +142,29 @@ func (p *problem) balance(x float64) float64 {
 
 // solve seeks the neutral axis in (0, hi].
 func (p *problem) solve(hi float64) (Axis, error) {
-	if err := p.Conditions.check(p.section.height); err != nil {
+	h := p.height()
+	if err := p.Conditions.check(h); err != nil {
 		return Axis{}, err
 	}
 	for i := range p.layers {
-		if err := p.layers[i].check(i, p.section.height); err != nil {
+		if err := p.layers[i].check(i, h); err != nil {
 			return Axis{}, err
 		}
 	}
-	lo := least * p.section.height
+	lo := least * h
 	if p.balance(lo) >= 0 {
 		k, _, _ := p.curvature(lo)
 		t, _ := p.steel(lo, k)
-		return Axis{}, p.Axial.untied(t)
+		c, _ := p.concrete(lo, k)
+		if !(p.locked && t+p.Axial.Force > 0 && c > sliver*p.whole()) {
+			return Axis{}, p.Axial.untied(t)
+		}
+		if k, _ := Curvature(-highest*h, p.layers); k > 0 && !math.IsInf(k, 1) && p.balance(-highest*h) < 0 {
+			return p.within(-highest*h, lo)
+		}
+		return Axis{}, &Refusal{LockedIn, -1, c, t + p.Axial.Force}
 	}
-	if reach := math.Min(p.several(), p.section.height); reach > lo {
+	if reach := math.Min(p.several(), h); reach > lo {
 		return p.first(lo, reach, hi)
 	}
 	return p.single(lo, hi)
@@ -106,19 +173,30 @@ func (p *problem) solve(hi float64) (Axis, error) {
 // single finds the state that balances between lo, where the steel prevails, and hi; up to the depth h of the
 // section the balance must rise. A neutral axis within the section is preferred to one below it, where bars
 // near the top, let go as the strain evens out, can make the concrete prevail in between only: that is looked
-// for at 15 places.
+// for in 64 steps, and at the peaks between them.
 func (p *problem) single(lo, hi float64) (Axis, error) {
-	h := p.section.height
+	h := p.height()
 	if (p.curved || p.graded) && p.balance(h) >= 0 {
 		return p.within(lo, h)
 	}
 	if p.balance(hi) >= 0 {
 		return p.within(lo, hi)
 	}
-	for i := 1; p.curved && i < scan; i++ {
-		part := float64(i) / scan
-		if x := h + (hi-h)*part*part; p.balance(x) >= 0 {
-			return p.within(lo, x)
+	if !p.curved && !p.graded {
+		return Axis{}, p.compressed(hi)
+	}
+	var x, f [3]float64
+	for i := range deeper + 1 {
+		share := float64(i) / deeper
+		x = [3]float64{x[1], x[2], h + (hi-h)*share*share}
+		f = [3]float64{f[1], f[2], p.balance(x[2])}
+		if f[2] >= 0 {
+			return p.within(lo, x[2])
+		}
+		if i >= 2 && f[1] >= f[0] && f[1] > f[2] {
+			if peak, _ := p.climb(x[0], x[2]); p.balance(peak) >= 0 {
+				return p.within(lo, peak)
+			}
 		}
 	}
 	return Axis{}, p.compressed(hi)
@@ -139,14 +217,24 @@ func (p *problem) within(lo, hi float64) (Axis, error) {
 		return Axis{}, &Refusal{Unbalanced, -1, math.NaN(), 0}
 	}
 	a := Axis{X: x, Lo: lo, Hi: hi, Evals: evals}
-	a.Curvature, a.Pivot, a.Layer = p.curvature(x)
+	at := 0
+	a.Curvature, a.Pivot, at = p.curvature(x)
+	a.Layer, a.Edge = -1, at
+	if a.Pivot == PivotSteel {
+		a.Layer, a.Edge = at, -1
+	}
 	a.TopStrain = a.Curvature * x
 	c, first := p.concrete(x, a.Curvature)
 	t, moment := p.steel(x, a.Curvature)
-	a.Concrete, a.ConcreteDepth = c, first/c
+	if a.Concrete = c; c != 0 {
+		a.ConcreteDepth = first / c
+	}
 	a.Steel, a.Axial, a.Residual = t, p.Axial.Force, c-t-p.Axial.Force
 	a.Moment = moment - first + p.Axial.moment()
-	if most := balanced * math.Max(c, math.Abs(a.Axial)); !(math.Abs(a.Residual) <= most) {
+	if most := balanced*math.Max(c, math.Abs(a.Axial)) + rounding*p.gross(x, a.Curvature); !(math.Abs(a.Residual) <= most) {
+		if math.Abs(a.Residual) <= unseen*p.whole() {
+			return Axis{}, &Refusal{NoTension, -1, t, 0}
+		}
 		return Axis{}, &Refusal{Unbalanced, -1, a.Residual, most}
 	}
 	return a, nil

@@ -62,5 +62,5 @@ func (s *Section) GradedAxisUnder(c Conditions, g Graded, layers []Layer) (Axis,
 		return Axis{}, err
 	}
 	p := problem{section: s, layers: layers, graded: true, block: g.BlockLaw, parabola: g.Parabola, epsCu: g.EpsCu, Conditions: c}
-	return p.solve(s.height / g.Lambda)
+	return p.narrowing(s.height / g.Lambda)
 }

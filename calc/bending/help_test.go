@@ -3,9 +3,12 @@ package bending
 import (
 	"errors"
 	"flag"
+	"fmt"
 	"math"
 	"os"
 	"testing"
+
+	"pgregory.net/rapid"
 
 	"soffit/calc/section"
 )
@@ -21,6 +24,13 @@ func TestMain(m *testing.M) {
 		}
 	}
 	os.Exit(m.Run())
+}
+
+// often checks four times as many random sections as rapid.Check: 10,000 by TestMain's number.
+func often(t *testing.T, check func(*rapid.T)) {
+	for i := range 4 {
+		t.Run(fmt.Sprintf("part %d", i+1), func(t *testing.T) { rapid.Check(t, check) })
+	}
 }
 
 var inf = math.Inf(1)

@@ -14,6 +14,7 @@ import "soffit/calc/section"
 type Section struct {
 	height   float64
 	centroid float64 // depth
+	growth   float64 // depth where the width first grows
 	slabs    []slab
 	rounds   []round
 }
@@ -45,6 +46,7 @@ func NewSection(shape section.Shape) *Section {
 	for _, c := range shape.Flipped().Curves() { // their levels are depths now
 		s.rounds = append(s.rounds, newRound(c))
 	}
+	s.growth = s.firstGrowth()
 	return s
 }
 

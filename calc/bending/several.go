@@ -5,11 +5,19 @@ import "math"
 // several gives the depth above which more than one state may balance: there a layer with a strain limit can
 // govern and another lies below it, which stretches the more the deeper the neutral axis. It is 0 if no layer
 // is so. Below that depth, and everywhere if there is none, the balance rises with x; but where the flange's
-// strain governs, bars above its middle and a graded block may let go as the neutral axis goes down, and more
-// than one state may balance at any depth.
+// strain governs, bars above its middle, a graded block and concrete short of its strength may let go as the
+// neutral axis goes down, and so may all above an edge within the section: more than one state may balance at any
+// depth.
 func (p *problem) several() (reach float64) {
-	if p.Flange.lets(p.layers) || p.graded && p.Flange.Depth > 0 {
-		return p.section.height
+	if f := p.Flange; f.lets(p.layers) || f.Depth > 0 && (p.graded || p.locked || p.uneven || f.Strain < p.parabola.EpsC2) {
+		return p.height()
+	}
+	if p.limits != nil && p.limits.inner() {
+		return p.height()
+	}
+	epsCu := p.epsCu
+	if p.limits != nil { // all edges at the top
+		epsCu = p.limits.most()
 	}
 	lowest := 0.0
 	for i := range p.layers {
@@ -23,7 +31,7 @@ func (p *problem) several() (reach float64) {
 			continue
 		}
 		// ε_cu/x = (ε_ud − ε_p0)/(d − x)
-		reach = math.Max(reach, l.Depth*p.epsCu/(p.epsCu+l.Law.limit-l.Prestrain))
+		reach = math.Max(reach, l.Depth*epsCu/(epsCu+l.Law.limit-l.Prestrain))
 	}
 	return reach
 }

@@ -219,6 +219,19 @@ func (c *compiler) call(n *Call) code {
 			}
 			return math.Log(v)
 		}
+	case "arcsin", "arccos":
+		outside := c.trouble(n, "argument outside −1 to 1", n)
+		inverse := math.Asin
+		if n.Fn == "arccos" {
+			inverse = math.Acos
+		}
+		return func(m *machine) float64 {
+			v := x(m)
+			if !(v >= -1 && v <= 1) {
+				return m.fail(outside)
+			}
+			return inverse(v)
+		}
 	case "cot":
 		zero := c.trouble(n, "division by zero", n)
 		return func(m *machine) float64 {

@@ -54,7 +54,7 @@ func TestEval(t *testing.T) {
 	for src, want := range map[string]float64{
 		"a + b·c": 28, "a − b − c": -7, "a/b/c": 0.12, "a/(b·c)": 0.12, "−a^2": -9, "(−a)^2": 9, "(−a)^3": -27, "a^−2": 1. / 9, "2^a": 8,
 		"a^0.5": math.Sqrt(3), "a^(1/3)": math.Cbrt(3), "(−a)^(−1)": -1. / 3, "z^0": 1, "(−a)^b": -243,
-		"sqrt(a·3)": 3, "exp(ln(a))": 3, "abs(a − b)": 2, "sin(a)^2 + cos(a)^2": 1, "tan(a)·cot(a)": 1, "min(a; b; −c)": -5, "max(a; b; z)": 5,
+		"sqrt(a·3)": 3, "exp(ln(a))": 3, "abs(a − b)": 2, "sin(a)^2 + cos(a)^2": 1, "tan(a)·cot(a)": 1, "arccos(−1)": math.Pi, "arcsin(1/2)": math.Pi / 6, "cos(arccos(a/10))": 0.3, "Σ_m(q_{k,m})": 0, "min(a; b; −c)": -5, "max(a; b; z)": 5,
 		"2·[kN]": 2000, "[MPa]": 1, "0.30·(f_ck/[MPa])^(2/3)·[MPa]": 0.3 * math.Pow(40, 2./3), "2·π": 2 * math.Pi,
 		"Σ_i(A_i)": 6, "Σ_i(A_i·d_i)": 140, "min_i(d_i − A_i)": 9, "max_i(d_i/A_i)": 10, "Σ_i(Σ_j(m_{i,j}))": 21, "Σ_j(max_i(m_{i,j}))": 11, "Σ_i(a)": 9,
 		"Σ_n(x_{k,n})": 0, "Σ_i(A_i)/Σ_i(d_i)": 0.1,
@@ -92,6 +92,7 @@ func TestEvalErrors(t *testing.T) {
 		"1 + sqrt(a − b)":                 "column 5: root of a negative number in sqrt(a − b) (a = 3, b = 5 in base units)",
 		"ln(z)":                           "column 1: logarithm of a number not above zero in ln(z) (z = 0 in base units)",
 		"ln(−a)":                          "column 1: logarithm of a number not above zero in ln(−a) (a = 3 in base units)",
+		"arccos(a)":                       "column 1: argument outside −1 to 1 in arccos(a) (a = 3 in base units)",
 		"cot(z)":                          "column 1: division by zero in cot(z) (z = 0 in base units)",
 		"exp(1000·a)":                     "column 1: result out of range in exp(1000·a) (a = 3 in base units)",
 		"big·big":                         "column 4: result out of range in big·big (big = 1e+200 in base units)",

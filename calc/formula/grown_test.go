@@ -33,7 +33,7 @@ func (g grower) node(depth int, bound string) Node {
 	case 4:
 		return &Power{Base: next(), Exp: next()}
 	case 5:
-		return &Call{Fn: g.pick("sqrt", "exp", "ln", "abs", "sin", "cos", "tan", "cot"), Args: []Node{next()}}
+		return &Call{Fn: g.pick("sqrt", "exp", "ln", "abs", "sin", "cos", "tan", "cot", "arcsin", "arccos"), Args: []Node{next()}}
 	case 6:
 		args := []Node{next(), next()}
 		for g.Intn(2) == 0 {

@@ -130,7 +130,7 @@ func TestSymbols(t *testing.T) {
 		{"f_{p0,1k}", "f_{p0,1k}", "f", "p0,1k", 0, "", nil},
 		{"A_{p, i}", "A_{p,i}", "A", "p,i", 0, "", []string{"i"}},
 		{"γ_{G,j,n}", "γ_{G,j,n}", "γ", "G,j,n", 0, "", []string{"j", "n"}},
-		{"d_i", "d_i", "d", "i", 0, "", []string{"i"}}, {"d_j", "d_j", "d", "j", 0, "", []string{"j"}}, {"d_n", "d_n", "d", "n", 0, "", nil},
+		{"d_i", "d_i", "d", "i", 0, "", []string{"i"}}, {"d_j", "d_j", "d", "j", 0, "", []string{"j"}}, {"d_n", "d_n", "d", "n", 0, "", nil}, {"x_m", "x_m", "x", "m", 0, "", nil}, {"r_{v,m}", "r_{v,m}", "r", "v,m", 0, "", []string{"m"}},
 		{"d_{i,j}", "d_{i,j}", "d", "i,j", 0, "", []string{"i", "j"}}, {"d_{n,i}", "d_{n,i}", "d", "n,i", 0, "", []string{"i"}},
 		{"d_{i,x}", "d_{i,x}", "d", "i,x", 0, "", nil}, {"d_{x,n}", "d_{x,n}", "d", "x,n", 0, "", []string{"n"}}, {"d_ij", "d_ij", "d", "ij", 0, "", nil},
 		{"d_{p,i}''(t, t_0)", "d_{p,i}''(t,t_0)", "d", "p,i", 2, "t,t_0", []string{"i"}},

@@ -10,13 +10,14 @@ import (
 var functions = map[string][2]int{
 	"sqrt": {1, 1}, "exp": {1, 1}, "ln": {1, 1}, "abs": {1, 1},
 	"sin": {1, 1}, "cos": {1, 1}, "tan": {1, 1}, "cot": {1, 1},
+	"arcsin": {1, 1}, "arccos": {1, 1},
 	"min": {2, 100}, "max": {2, 100},
 }
 
 // words are the other names that no symbol can have.
 var words = map[string]bool{"and": true, "or": true, "cases": true, "otherwise": true}
 
-func isIndex(s string) bool { return s == "i" || s == "j" || s == "n" }
+func isIndex(s string) bool { return s == "i" || s == "j" || s == "n" || s == "m" }
 
 // Constant gives the value of a symbol that needs none from outside; the only one is π.
 func (s *Symbol) Constant() (float64, bool) { return math.Pi, s.Name == "π" }
@@ -47,12 +48,12 @@ func (s *Symbol) spelling() string {
 	return b.String()
 }
 
-// indices finds the row indices in a subscript: its trailing parts i, j, n. The first part is one only as i
+// indices finds the row indices in a subscript: its trailing parts i, j, n, m. The first part is one only as i
 // or j: A_i runs over rows, γ_n does not.
 func indices(sub string) []string {
 	parts := strings.Split(sub, ",")
 	first := len(parts)
-	for first > 0 && isIndex(parts[first-1]) && (first > 1 || parts[0] != "n") {
+	for first > 0 && isIndex(parts[first-1]) && (first > 1 || parts[0] == "i" || parts[0] == "j") {
 		first--
 	}
 	if first == len(parts) {

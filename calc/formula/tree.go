@@ -32,7 +32,7 @@ type Symbol struct {
 	Sub    string // whole subscript without braces, "" if none
 	Primes int
 	Arg    string   // text between the brackets of f_cm(t), "" if none
-	Index  []string // row indices in the order written, out of "i", "j", "n"
+	Index  []string // row indices in the order written, out of "i", "j", "n", "m"
 }
 
 // Negate is −x.
@@ -54,7 +54,7 @@ type Power struct {
 	Base, Exp Node
 }
 
-// Call is a function of its arguments: sqrt, min, max, exp, ln, abs, sin, cos, tan, cot.
+// Call is a function of its arguments: sqrt, min, max, exp, ln, abs, sin, cos, tan, cot, arcsin, arccos.
 type Call struct {
 	Pos  Pos
 	Fn   string

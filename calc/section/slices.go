@@ -39,13 +39,25 @@ type Chord struct{ From, To float64 }
 // Chords lists the concrete that a level line at height y above the soffit meets, from left to right: what
 // the webs beside the voids are wide. At the level of a ledge it is what lies just above.
 func (o Outline) Chords(y float64) []Chord {
-	var cuts []float64
+	var out []Chord
+	cuts := o.cuts(y, nil)
+	for i := 1; i < len(cuts); i += 2 {
+		out = append(out, Chord{cuts[i-1], cuts[i]})
+	}
+	return out
+}
+
+// cuts lists where a level line enters and leaves the concrete, in the room of the list given.
+func (o Outline) cuts(y float64, cuts []float64) []float64 {
+	cuts = cuts[:0]
 	for _, rings := range [2][]Ring{o.contour.Outer, o.contour.Holes} {
 		for _, r := range rings {
-			for _, e := range r.edges() {
-				if (e.a.Y > y) != (e.b.Y > y) {
-					cuts = append(cuts, e.a.X+(y-e.a.Y)/(e.b.Y-e.a.Y)*(e.b.X-e.a.X))
+			a := r[len(r)-1]
+			for _, b := range r {
+				if (a.Y > y) != (b.Y > y) {
+					cuts = append(cuts, a.X+(y-a.Y)/(b.Y-a.Y)*(b.X-a.X))
 				}
+				a = b
 			}
 		}
 	}
@@ -56,12 +68,7 @@ func (o Outline) Chords(y float64) []Chord {
 			}
 		}
 	}
-	cuts = sorted(cuts)
-	var out []Chord
-	for i := 1; i < len(cuts); i += 2 {
-		out = append(out, Chord{cuts[i-1], cuts[i]})
-	}
-	return out
+	return sorted(cuts)
 }
 
 // BySlices finds the properties a third way: every strip is cut into n level slices, each is taken as the
@@ -74,12 +81,14 @@ func (o Outline) BySlices(n int) Properties {
 		panic("section.BySlices: n < 1")
 	}
 	var a, ax, ay, axx, ayy, axy float64
+	var cuts []float64
 	for i := 1; i < len(o.levels); i++ {
 		dy := (o.levels[i] - o.levels[i-1]) / float64(n)
 		for k := range n {
 			y := o.levels[i-1] + (float64(k)+0.5)*dy
-			for _, c := range o.Chords(y) {
-				b, x := c.To-c.From, (c.From+c.To)/2
+			cuts = o.cuts(y, cuts)
+			for i := 1; i < len(cuts); i += 2 {
+				b, x := cuts[i]-cuts[i-1], (cuts[i-1]+cuts[i])/2
 				da := b * dy
 				a += da
 				ax += da * x

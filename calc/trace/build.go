@@ -18,7 +18,7 @@ func New(doc Document) *Note {
 // Err is the first error met while recording; nothing is recorded after it.
 func (n *Note) Err() error { return n.err }
 
-// Axis declares a named run of rows. Index is empty for an implicit axis, or the letter i, j or n.
+// Axis declares a named run of rows. Index is empty for an implicit axis, or the letter i, j, n or m.
 func (n *Note) Axis(name, title, index string, rows []string) *Axis {
 	a := &Axis{Name: name, Title: title, Index: index, Rows: rows}
 	for i, r := range rows {

@@ -8,12 +8,13 @@ import (
 	"soffit/calc/quantity"
 )
 
-// An axis takes one of four places in a frame: the implicit one and one per index letter.
+// An axis takes one of five places in a frame: the implicit one and one per index letter.
 const (
 	implicit = iota
 	letterI
 	letterJ
 	letterN
+	letterM
 	places
 )
 
@@ -25,6 +26,8 @@ func letter(index string) int {
 		return letterJ
 	case "n":
 		return letterN
+	case "m":
+		return letterM
 	}
 	return implicit
 }
@@ -72,24 +75,32 @@ func (f *frame) add(slot int, l *Line, path string, picked int) error {
 
 // Value is the operand in a slot at the current rows, in base units.
 func (f *frame) Value(slot int) float64 {
+	l, i := f.taken(slot)
+	switch {
+	case l == nil:
+		if f.miss == nil {
+			f.miss = fmt.Errorf("%s was not computed on this branch", f.slots[slot][0].line.Symbol.Name)
+		}
+		return 0
+	case f.shadow:
+		return l.Shadow[i]
+	}
+	return l.Values[i]
+}
+
+// taken is the line that gives the operand in a slot at the current rows, and the position in it; nil for none.
+func (f *frame) taken(slot int) (*Line, int) {
 	for k := range f.slots[slot] {
 		s := &f.slots[slot][k]
 		i := s.offset
 		for p := range f.at {
 			i += f.at[p] * s.stride[p]
 		}
-		if s.line.Shown[i] == "" {
-			continue
+		if s.line.Shown[i] != "" {
+			return s.line, i
 		}
-		if f.shadow {
-			return s.line.Shadow[i]
-		}
-		return s.line.Values[i]
 	}
-	if f.miss == nil {
-		f.miss = fmt.Errorf("%s was not computed on this branch", f.slots[slot][0].line.Symbol.Name)
-	}
-	return 0
+	return nil, 0
 }
 
 // Len is the number of rows of an index.

@@ -38,7 +38,7 @@ func (r *Row) Column(symbol string) []float64 {
 		return nil
 	}
 	index := ""
-	for _, l := range []string{"i", "j", "n"} {
+	for _, l := range []string{"i", "j", "n", "m"} {
 		if f.slots[0][0].stride[letter(l)] != 0 {
 			index = l
 		}

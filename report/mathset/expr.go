@@ -59,10 +59,16 @@ func (m *setter) class(c ctx, n formula.Node) class {
 		if n.Op != "Σ" {
 			return called
 		}
-		if m.written(n) && m.Len(n.Index) > 1 {
-			return summed
+		if !m.written(n) {
+			return over
 		}
-		return over
+		switch m.Len(n.Index) {
+		case 0:
+			return atomic
+		case 1:
+			return m.class(at(c, n.Index, 0), n.X)
+		}
+		return summed
 	case *formula.Cases:
 		if arm := m.taken(c, n); arm != nil {
 			return m.class(c, arm)

@@ -18,7 +18,7 @@ func (m *setter) call(c ctx, n *formula.Call) []atom {
 	name := text(draw.Serif, c.size, n.Fn)
 	if len(n.Args) == 1 && m.class(c, n.Args[0]) == atomic {
 		switch n.Fn {
-		case "sin", "cos", "tan", "cot", "ln":
+		case "sin", "cos", "tan", "cot", "ln", "arcsin", "arccos":
 			name.space(thin * c.size)
 			name.add(joined(m.expr(c, n.Args[0])))
 			return one(name)
@@ -84,18 +84,28 @@ func (m *setter) rows(c ctx, n *formula.Rows) []atom {
 	return glued(b, m.bracketed(in, n.X, true))
 }
 
+// at is the place of a term of a reduction.
+func at(c ctx, index string, row int) ctx {
+	rows := make(map[string]int, len(c.at)+1)
+	for k, v := range c.at {
+		rows[k] = v
+	}
+	rows[index] = row
+	c.at = rows
+	return c
+}
+
+// terms sets a reduction term by term. A sum of one row is its term, as class tells those around it.
 func (m *setter) terms(c ctx, n *formula.Rows) []atom {
 	count := m.Len(n.Index)
 	if count == 0 {
 		return one(number(draw.Serif, c.size, "0"))
 	}
-	at := func(row int) ctx {
-		in := c
-		in.at = map[string]int{}
-		for k, v := range c.at {
-			in.at[k] = v
-		}
-		in.at[n.Index] = row
+	if count == 1 && n.Op == "Σ" {
+		return m.expr(at(c, n.Index, 0), n.X) // what stands around it has put brackets where the term needs them
+	}
+	term := func(row int) ctx {
+		in := at(c, n.Index, row)
 		in.lead = true
 		return in
 	}
@@ -107,26 +117,26 @@ func (m *setter) terms(c ctx, n *formula.Rows) []atom {
 	} else {
 		show = append(show, 0, -1, count-1)
 	}
-	term := func(i int) []atom {
+	set := func(i int) []atom {
 		if show[i] < 0 {
 			return one(text(draw.Serif, c.size, "…"))
 		}
-		return m.expr(at(show[i]), n.X)
+		return m.expr(term(show[i]), n.X)
 	}
 	if n.Op != "Σ" {
-		return glued(text(draw.Serif, c.size, n.Op), m.list(c, len(show), term))
+		return glued(text(draw.Serif, c.size, n.Op), m.list(c, len(show), set))
 	}
 	var all []atom
 	for i := range show {
 		if show[i] < 0 {
-			all = append(all, prefixed(c, "+", medium, term(i), medium, atSign)...)
+			all = append(all, prefixed(c, "+", medium, set(i), medium, atSign)...)
 			all[len(all)-1].dots = true
 			continue
 		}
-		in := at(show[i])
+		in := term(show[i])
 		in.lead = i == 0 && c.lead
 		k := m.class(in, n.X)
-		atoms := m.bracketed(in, n.X, k == summed && len(show) > 1 || k == armed || m.minus(in, n.X))
+		atoms := m.bracketed(in, n.X, k == summed || k == armed || m.minus(in, n.X))
 		if i > 0 {
 			atoms = prefixed(c, "+", medium, atoms, medium, atSign)
 		}

@@ -5,22 +5,31 @@ import "strings"
 // alike is how many rows at least stand for each other as one.
 const alike = 3
 
+// least is how many rows of the table make one line: of a table along the member a few; of one whose rows are
+// counted out so many that the table gets shorter though the names of the runs take more room than numbers.
+func (t *table) least() int {
+	if t.counted {
+		return max(10, len(t.rows)/4)
+	}
+	return alike
+}
+
 // spanOf is a run of rows of a table drawn as one line, from the first to the last; both are the same for a row
 // of its own.
 type spanOf struct{ first, last int }
 
-// lines are the lines a table is drawn in: of a table along the member, rows that say the same but for where they
-// are make one line if they are three or more. The row worked in full keeps a line of its own.
+// lines are the lines a table is drawn in: rows along the member, or counted out, that say the same but for
+// where they are make one line if they are many enough. The row worked in full keeps a line of its own.
 func (t *table) lines() []spanOf {
 	out := make([]spanOf, 0, len(t.rows))
 	for i := 0; i < len(t.rows); {
 		end := i
-		if t.along && i != t.mark {
+		if (t.along || t.counted) && i != t.mark {
 			for end+1 < len(t.rows) && end+1 != t.mark && t.sameCells(i, end+1) {
 				end++
 			}
 		}
-		if end-i+1 < alike {
+		if end-i+1 < t.least() {
 			end = i
 		}
 		out = append(out, spanOf{i, end})

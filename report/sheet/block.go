@@ -12,11 +12,12 @@ import (
 func (c *composer) chapter(ch *trace.Chapter) {
 	c.heading(ch.Number, ch.Title, ch.Slug, "")
 	c.elements[len(c.elements)-1].ruled = len(ch.Blocks) > 0 && !plain(ch.Blocks[0]) && ch.Slug != "verdict"
-	if ch.Slug == "verdict" || ch.Slug == "basis" {
-		c.elements[len(c.elements)-1].fresh = true
-	}
-	if ch.Slug == "verdict" {
+	switch head := c.elements[len(c.elements)-1]; ch.Slug {
+	case "verdict":
+		head.fresh = true
 		c.verdict()
+	case "basis": // below no more than the last lines of the verdict
+		head.least = 0.6 * body
 	}
 	for _, b := range ch.Blocks {
 		c.blockHeading(b)

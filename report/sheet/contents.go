@@ -44,7 +44,7 @@ func (c *composer) contents() {
 	cells := make([]cell, len(list))
 	total := draw.Pt(0)
 	for i, h := range list {
-		cells[i] = c.contentsLine(h, width)
+		cells[i] = c.contentsLine(h, width, textSize)
 		total += cells[i].h
 	}
 	if total <= room {
@@ -60,7 +60,7 @@ func (c *composer) contents() {
 		}
 	} else {
 		for i, h := range list {
-			cells[i] = c.contentsLine(h, twinWidth)
+			cells[i] = c.contentsLine(h, twinWidth, tableSize)
 		}
 		c.add(twin("contents", cells, 8))
 	}
@@ -68,29 +68,29 @@ func (c *composer) contents() {
 	c.add(keepTogether(textElements(lines, fullColumn, "reading", 3, false, spanFull))...)
 }
 
-// contentsLine is one line of the contents, dots leading to the sheet's number.
-func (c *composer) contentsLine(h heading, w draw.Pt) cell {
-	const lead draw.Pt = 12.2
-	face, above, in := draw.Serif, draw.Pt(0), draw.Pt(26)
+// contentsLine is one line of the contents at a size, dots leading to the sheet's number.
+func (c *composer) contentsLine(h heading, w, size draw.Pt) cell {
+	lead := 1.22 * size
+	face, above, in := draw.Serif, draw.Pt(0), 2.6*size
 	if h.level == 0 {
 		face, above, in = draw.Bold, 4, 0
 	}
-	at := in + 26 + in/8
+	at := in + 2.6*size + in/8
 	if h.number == "" {
 		at = in
 	}
-	lines := text.Words(face, h.title).Lines(w-34-at, text.Style{Size: textSize, Leading: lead})
+	lines := text.Words(face, h.title).Lines(w-30-at, text.Style{Size: size, Leading: lead})
 	last := len(lines) - 1
 	return cell{lead*draw.Pt(len(lines)) + above, above, func(cv draw.Canvas, x, y draw.Pt) {
-		first := y + above + textSize*ascent
+		first := y + above + size*ascent
 		base := first + draw.Pt(last)*lead
 		sheet := strconv.Itoa(c.sheetOf[h.anchor])
-		end := x + w - draw.Width(face, textSize, sheet)
-		cv.Text(x+in, first, face, textSize, h.number)
+		end := x + w - draw.Width(face, size, sheet)
+		cv.Text(x+in, first, face, size, h.number)
 		for i, l := range lines {
 			l.Draw(cv, x+at, first+draw.Pt(i)*lead)
 		}
-		cv.Text(end, base, face, textSize, sheet)
+		cv.Text(end, base, face, size, sheet)
 		// The dots of all lines stand under each other.
 		if from := x + at + lines[last].Width + 5; from < x+w-24 {
 			cv.Line(x+w-20, base-0.5, from, base-0.5, 0.5, 0.5, 3.5)

@@ -132,3 +132,24 @@ func TestListingInTwoColumns(t *testing.T) {
 		t.Errorf("long lines: %d lists in two columns and %d lines, want 40 lines", a, b)
 	}
 }
+
+// TestListingSetCloser: the member file is set closer where that saves a sheet, and only there.
+func TestListingSetCloser(t *testing.T) {
+	const lines = 120
+	c := newComposer(trace.New(trace.Document{Input: strings.Repeat("depth: 900 mm\n", lines)}))
+	c.listing()
+	for _, x := range []struct {
+		room  draw.Pt
+		rest  bool
+		first draw.Pt
+	}{
+		{lines / 2 * listingLead, false, lines / 2 * listingLead},
+		{lines / 2 * closeLead, false, lines / 2 * closeLead},
+		{lines/2*closeLead - 1, true, lines/2*closeLead - 1},
+	} {
+		first, rest := c.elements[0].split(x.room + 0.01)
+		if (rest != nil) != x.rest || first == nil || first.height < x.first-0.02 || first.height > x.first+0.02 {
+			t.Errorf("in %.1f points: %.1f high, a rest %v", float64(x.room), float64(first.height), rest != nil)
+		}
+	}
+}

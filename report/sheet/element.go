@@ -25,6 +25,8 @@ type element struct {
 	// split divides the element where it does not fit into the room left; rest is nil where all of it does,
 	// first is nil where nothing does. An element without split is never divided.
 	split func(room draw.Pt) (first, rest *element)
+	// begins is the room below what is kept with it in which an element with split is begun; 0 for leastSplit.
+	begins draw.Pt
 	// paint draws the element, y being its upper edge.
 	paint func(c draw.Canvas, y draw.Pt)
 	// running is what the head of the sheet calls the chapter from this element on; "" for no change.

@@ -161,7 +161,7 @@ func (f *flow) put(es, after []*element) error {
 	}
 	last := es[len(es)-1]
 	if last.split != nil {
-		if lead := es[:len(es)-1]; len(lead) == 0 || f.page().y+f.need(lead)+leastSplit <= bodyBottom {
+		if lead := es[:len(es)-1]; len(lead) == 0 || f.page().y+f.need(lead)+cmp.Or(last.begins, leastSplit) <= bodyBottom {
 			f.all(lead)
 			return f.divide(last)
 		}
@@ -178,6 +178,12 @@ func (f *flow) put(es, after []*element) error {
 	}
 	// The run is taller than a sheet: it breaks where it must.
 	for _, e := range es {
+		if e.split != nil {
+			if err := f.divide(e); err != nil {
+				return err
+			}
+			continue
+		}
 		if !f.fits([]*element{e}) {
 			if len(f.page().placed) == 0 {
 				return fmt.Errorf("%s is taller than a sheet", e.owner)

@@ -21,7 +21,8 @@ func lineAnchor(n int) string { return "input:" + strconv.Itoa(n) }
 const (
 	listingSize  draw.Pt = 7.2
 	listingLead  draw.Pt = 9
-	listingStart draw.Pt = 22 // of the text, right of the line numbers
+	closeLead    draw.Pt = 8.3 // where that saves a sheet
+	listingStart draw.Pt = 22  // of the text, right of the line numbers
 )
 
 // listing sets the member file as given, with its line numbers: in two columns where nearly all of its lines are short
@@ -35,27 +36,30 @@ func (c *composer) listing() {
 		}
 	}
 	if len(lines) > 1 && long*mostLong <= len(lines) {
-		cells := make([]cell, len(lines))
+		cells, tight := make([]cell, len(lines)), make([]cell, len(lines))
 		for i, s := range lines {
 			l := numbered(s, i+1, twinWidth)
-			cells[i] = cell{l.height(), 0, func(cv draw.Canvas, x, y draw.Pt) {
-				cv.Anchor(lineAnchor(i+1), left, y-8)
-				l.paint(cv, x, y)
-			}}
+			set := func(lead draw.Pt) cell {
+				return cell{l.height(lead), 0, func(cv draw.Canvas, x, y draw.Pt) {
+					cv.Anchor(lineAnchor(i+1), left, y-8)
+					l.paint(cv, x, y, lead)
+				}}
+			}
+			cells[i], tight[i] = set(listingLead), set(closeLead)
 		}
-		c.add(twin("member file", cells, 8))
+		c.add(closer("member file", cells, tight, 8))
 		return
 	}
 	var out []*element
 	for i, s := range lines {
 		l := numbered(s, i+1, fullColumn.w)
-		e := &element{owner: "member file", height: l.height(), anchors: []string{lineAnchor(i + 1)}}
+		e := &element{owner: "member file", height: l.height(listingLead), anchors: []string{lineAnchor(i + 1)}}
 		if i == 0 {
 			e.above = 8
 		}
 		e.paint = func(cv draw.Canvas, y draw.Pt) {
 			cv.Owner("full member file")
-			l.paint(cv, left, y)
+			l.paint(cv, left, y, listingLead)
 		}
 		out = append(out, e)
 	}
@@ -75,13 +79,13 @@ func numbered(s string, n int, w draw.Pt) inputSet {
 	return inputSet{strconv.Itoa(n), text.Listing([]string{printable(s)}, w-listingStart, text.Style{Size: listingSize, Leading: listingLead})}
 }
 
-func (l inputSet) height() draw.Pt { return listingLead * draw.Pt(len(l.set)) }
+func (l inputSet) height(lead draw.Pt) draw.Pt { return lead * draw.Pt(len(l.set)) }
 
-func (l inputSet) paint(cv draw.Canvas, x, y draw.Pt) {
+func (l inputSet) paint(cv draw.Canvas, x, y, lead draw.Pt) {
 	base := y + listingSize
 	draw.TextRight(cv, x+listingStart-8, base, draw.Serif, listingSize, l.number)
 	for k, line := range l.set {
-		line.Draw(cv, x+listingStart, base+draw.Pt(k)*listingLead)
+		line.Draw(cv, x+listingStart, base+draw.Pt(k)*lead)
 	}
 }
 

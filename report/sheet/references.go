@@ -2,6 +2,7 @@ package sheet
 
 import (
 	"slices"
+	"strconv"
 	"strings"
 
 	"soffit/calc/trace"
@@ -76,6 +77,43 @@ func digits(s string) int {
 	return n
 }
 
+// runs lists numbers of entries after a word, those that follow each other by the first and the last.
+func runs(word string, ms []mention) []bit {
+	var kept []mention
+	var through []bool // from the one before
+	for i := 0; i < len(ms); {
+		end := i
+		for end+1 < len(ms) && follows(ms[end].number, ms[end+1].number) {
+			end++
+		}
+		kept, through = append(kept, ms[i]), append(through, false)
+		if end-i >= 2 {
+			kept, through = append(kept, ms[end]), append(through, true)
+			i = end
+		}
+		i++
+	}
+	bits := listed(word, kept, false)
+	for i, t := range through {
+		if t {
+			bits[i].resize(strings.TrimSuffix(bits[i].text, ","))
+			bits[i+1].resize("… " + bits[i+1].text)
+		}
+	}
+	return bits
+}
+
+// follows tells whether an entry's number is the next one of the same block.
+func follows(a, b string) bool {
+	i, k := strings.LastIndexByte(a, '.'), strings.LastIndexByte(b, '.')
+	if i < 0 || k < 0 || a[:i] != b[:k] {
+		return false
+	}
+	x, err1 := strconv.Atoi(a[i+1:])
+	y, err2 := strconv.Atoi(b[k+1:])
+	return err1 == nil && err2 == nil && y == x+1
+}
+
 // referenceList sets the rules followed, under the documents they stand in.
 func (c *composer) referenceList() {
 	const ruleWidth = 92
@@ -100,7 +138,7 @@ func (c *composer) referenceList() {
 		rule := stack{w: ruleWidth - 4}
 		rule.words(draw.Serif, noteSize, noteLead-0.4, 0, r.rule)
 		by := stack{w: twinWidth - ruleWidth}
-		by.mentions("in", r.by, 0)
+		by.bits(runs("in", r.by), 0, false)
 		cells = append(cells, cell{max(rule.bottom, by.bottom) + 3, 0, func(cv draw.Canvas, x, y draw.Pt) {
 			rule.paint(cv, x, y)
 			by.paint(cv, x+ruleWidth, y+(noteSize-tinySize)*ascent)

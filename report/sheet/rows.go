@@ -11,8 +11,8 @@ import (
 	"soffit/report/mathset"
 )
 
-// run sets entries from the first on that run over the same index axes and are worked for one row, then one table
-// of all their rows. It returns how many entries it took.
+// run sets entries from the first on that run over the same index axes and are worked for one row, with the few that
+// stand between them, then one table of all their rows. It returns how many entries it took.
 func (c *composer) run(b *trace.Block, entries []trace.Entry) int {
 	axes := indexAxes(entries[0])
 	if len(axes) == 0 {
@@ -20,10 +20,14 @@ func (c *composer) run(b *trace.Block, entries []trace.Entry) int {
 	}
 	n, start := 0, len(c.elements)
 	var lines []*trace.Line
-	for n < len(entries) && slices.Equal(indexAxes(entries[n]), axes) && kind(entries[n]) == kind(entries[0]) {
-		c.single(b, entries[n], n == 0)
-		lines = append(lines, trace.LineOf(entries[n]))
-		n++
+	listed := false // as in entries
+	for k := 0; k >= 0; k = between(entries[n:], entries[0], axes) {
+		for _, e := range entries[n : n+k+1] {
+			c.single(b, e, !listed)
+			_, listed = e.(*trace.Given)
+		}
+		n += k + 1
+		lines = append(lines, trace.LineOf(entries[n-1]))
 	}
 	switch {
 	case len(c.elements) == start:
@@ -45,14 +49,53 @@ func (c *composer) run(b *trace.Block, entries []trace.Entry) int {
 	return n
 }
 
+// mostBetween is how many entries that are no narrative may stand between two columns of one table.
+const mostBetween = 2
+
+// between is how many entries stand before the next one that goes on with a run over axes which began with first; −1
+// where the run ends. Single values, narrative and what is asked of the same rows may stand between, but nothing that
+// runs over other rows, and no figure or table.
+func between(entries []trace.Entry, first trace.Entry, axes []*trace.Axis) int {
+	others := 0
+	for i, e := range entries {
+		own := indexAxes(e)
+		if slices.Equal(own, axes) && kind(e) == kind(first) {
+			return i
+		}
+		switch e := e.(type) {
+		case *trace.Text:
+			continue
+		case *trace.Choice:
+			own = indexed(e.Axes)
+		case *trace.Check:
+			own = indexed(e.Axes)
+		case *trace.Given, *trace.Step, *trace.Root:
+			if len(own) > 0 {
+				return -1
+			}
+		default:
+			return -1
+		}
+		if others++; others > mostBetween || len(own) > 0 && !slices.Equal(own, axes) {
+			return -1
+		}
+	}
+	return -1
+}
+
 // indexAxes are the axes with an index letter of an entry that carries values.
 func indexAxes(e trace.Entry) []*trace.Axis {
 	l := trace.LineOf(e)
 	if l == nil {
 		return nil
 	}
+	return indexed(l.Axes)
+}
+
+// indexed are those of some axes with an index letter.
+func indexed(axes []*trace.Axis) []*trace.Axis {
 	var out []*trace.Axis
-	for _, a := range l.Axes {
+	for _, a := range axes {
 		if a.Index != "" {
 			out = append(out, a)
 		}
@@ -80,10 +123,7 @@ func (c *composer) rowsTable(b *trace.Block, axes []*trace.Axis, lines []*trace.
 		down, across = axes[:1], axes[1:]
 		c.legend(axes[1])
 	}
-	t := &table{owner: lines[0].Number, mark: -1, heads: rowHeads(down)}
-	for i := range size(down) {
-		t.rows = append(t.rows, rowLabels(down, i))
-	}
+	t := rowsOf(lines[0].Number, down)
 	for _, l := range lines {
 		w, _ := workedLine(b, l)
 		for k := range size(across) {
@@ -135,28 +175,46 @@ func (c *composer) legend(a *trace.Axis) {
 	}})
 }
 
-// rowHeads and rowLabels are the columns at the left of a table that name its rows: the number that stands in the
-// symbols, and the name.
-func rowHeads(axes []*trace.Axis) []string {
-	var out []string
-	for _, a := range axes {
-		if a.Index != "" {
-			out = append(out, a.Index)
+// rowsOf is a table without columns over the rows of axes. At its left stand the number that is printed in symbols and
+// the name of each row; a name that says no more than the number is left out.
+func rowsOf(owner string, axes []*trace.Axis) *table {
+	t := &table{owner: owner, mark: -1}
+	bare := make([]bool, len(axes))
+	for k, a := range axes {
+		bare[k] = a.Index != "" && countedOut(a)
+		switch {
+		case bare[k]:
+			t.heads, t.words = append(t.heads, a.Index), append(t.words, a.Name)
+			t.counted = len(axes) == 1
+			continue
+		case a.Index != "":
+			t.heads, t.words = append(t.heads, a.Index), append(t.words, "")
 		}
-		out = append(out, "")
+		t.heads, t.words = append(t.heads, ""), append(t.words, "")
 	}
-	return out
+	for i := range size(axes) {
+		var labels []string
+		for k, q := range trace.PlaceAt(axes, i) {
+			if q.Axis.Index != "" {
+				labels = append(labels, strconv.Itoa(q.Row+1))
+			}
+			if !bare[k] {
+				labels = append(labels, q.Axis.Rows[q.Row])
+			}
+		}
+		t.rows = append(t.rows, labels)
+	}
+	return t
 }
 
-func rowLabels(axes []*trace.Axis, i int) []string {
-	var out []string
-	for _, q := range trace.PlaceAt(axes, i) {
-		if q.Axis.Index != "" {
-			out = append(out, strconv.Itoa(q.Row+1))
+// countedOut tells whether every row of an axis is called by the word of the axis and its number.
+func countedOut(a *trace.Axis) bool {
+	for i, r := range a.Rows {
+		if r != a.Name+" "+strconv.Itoa(i+1) {
+			return false
 		}
-		out = append(out, q.Axis.Rows[q.Row])
 	}
-	return out
+	return true
 }
 
 // tableColumn is a column of a table without its cells.

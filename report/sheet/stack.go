@@ -209,10 +209,12 @@ func listed(word string, ms []mention, more bool) []bit {
 		bits = append(bits, bit{text: "…"})
 	}
 	for i := range bits {
-		bits[i].w = draw.Width(draw.Serif, tinySize, bits[i].text)
+		bits[i].resize(bits[i].text)
 	}
 	return bits
 }
+
+func (b *bit) resize(text string) { b.text, b.w = text, draw.Width(draw.Serif, tinySize, text) }
 
 func (s *stack) bits(bits []bit, gap draw.Pt, flushRight bool) {
 	for start := 0; start < len(bits); {

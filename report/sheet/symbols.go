@@ -10,32 +10,38 @@ import (
 	"soffit/report/draw"
 )
 
-// meaning is a symbol, what it stands for, and where that is said first.
+// meaning is a symbol, what it stands for, and where that is said.
 type meaning struct {
 	symbol *formula.Symbol
 	name   string
 	unit   string
-	number string
-	key    string
+	at     []mention
 }
 
 // meanings lists every symbol of a note with each of its meanings, sorted: Latin letters, then Greek.
 func meanings(n *trace.Note) []meaning {
 	var out []meaning
-	seen := map[[2]string]bool{}
+	seen := map[[2]string]int{}
 	n.Each(func(_ *trace.Chapter, _ *trace.Block, e trace.Entry) {
 		l := trace.LineOf(e)
-		if l == nil || seen[[2]string{l.Symbol.Name, l.Name}] {
+		if l == nil {
 			return
 		}
-		seen[[2]string{l.Symbol.Name, l.Name}] = true
-		out = append(out, meaning{l.Symbol, l.Name, l.Unit.String(), l.Number, l.Key})
+		k := [2]string{l.Symbol.Name, l.Name}
+		i, ok := seen[k]
+		if !ok {
+			i = len(out)
+			seen[k] = i
+			out = append(out, meaning{symbol: l.Symbol, name: l.Name, unit: l.Unit.String()})
+		}
+		out[i].at = append(out[i].at, mention{l.Number, l.Key})
 	})
 	slices.SortStableFunc(out, func(a, b meaning) int { return strings.Compare(symbolOrder(a.symbol), symbolOrder(b.symbol)) })
 	return out
 }
 
-// symbolOrder sorts symbols by script, letter regardless of case, capital first, then subscript.
+// symbolOrder sorts symbols by script, letter regardless of case, capital first, then subscript: that without an index
+// before those with one.
 func symbolOrder(s *formula.Symbol) string {
 	var b strings.Builder
 	first := []rune(s.Base)[0]
@@ -53,41 +59,55 @@ func symbolOrder(s *formula.Symbol) string {
 	} else {
 		b.WriteByte('1')
 	}
-	b.WriteString(strings.ToLower(strings.TrimPrefix(s.Name, "Δ")))
+	b.WriteString(bare.Replace(strings.ToLower(strings.TrimPrefix(s.Name, "Δ"))))
 	if strings.HasPrefix(s.Name, "Δ") {
 		b.WriteByte(1)
 	}
 	return b.String()
 }
 
-// symbolList sets the register of symbols in two columns.
+// bare takes the signs of the notation out of a symbol's name.
+var bare = strings.NewReplacer("{", "", "}", "", "_", " ")
+
+// symbolList sets the register of symbols in two columns, the numbers of the entries at the right of each.
 func (c *composer) symbolList() {
-	const symbolWidth, numberWidth = 56, 34
+	const symbolWidth = 46
 	var cells []cell
 	for _, m := range meanings(c.note) {
-		box := c.symbol(m.symbol, tableSize+0.5, nil)
-		at := draw.Pt(symbolWidth)
-		text := stack{w: twinWidth - symbolWidth - numberWidth - 6}
-		wide := box.Width > symbolWidth-4
-		if wide {
-			at = box.Width + 6
-			text.w = twinWidth - at - numberWidth - 6
-		}
+		box := c.symbol(m.symbol, tableSize, nil)
+		at := max(draw.Pt(symbolWidth), box.Width+6)
+		text := stack{w: twinWidth - at}
 		words := capital(m.name)
 		if m.unit != "" {
 			words += ", " + strings.ReplaceAll(m.unit, " ", "\u2009")
 		}
-		text.words(draw.Serif, noteSize, noteLead-0.4, 0, words)
+		text.words(draw.Serif, smallSize, smallLead, 0, words)
+		text.numbers(m.at)
 		shift := max(0, box.Height-tableSize*ascent)
-		cells = append(cells, cell{max(text.bottom+shift, tableSize*ascent+shift+box.Depth) + 3, 0, func(cv draw.Canvas, x, y draw.Pt) {
+		cells = append(cells, cell{max(text.bottom+shift, tableSize*ascent+shift+box.Depth) + 2.4, 0, func(cv draw.Canvas, x, y draw.Pt) {
 			y += shift
-			base := y + (noteSize)*ascent
-			box.Draw(cv, x, base)
+			box.Draw(cv, x, y+smallSize*ascent)
 			text.paint(cv, x+at, y)
-			w := draw.Width(draw.Serif, smallSize, m.number)
-			cv.Text(x+twinWidth-w, base, draw.Serif, smallSize, m.number)
-			cv.Link(x+twinWidth-w, base-smallSize*ascent, w, smallLead, m.key)
 		}})
 	}
 	c.add(twin("symbols", cells, 6))
+}
+
+// numbers adds numbers of entries flush right: on the last line where they fit, else below it.
+func (s *stack) numbers(ms []mention) {
+	const apart = 8
+	bits := listed("", ms, false)[1:]
+	w := -blank
+	for _, b := range bits {
+		w += blank + b.w
+	}
+	if n := len(s.inks); n == 0 || s.inks[n-1].x+s.inks[n-1].width()+apart+w > s.w {
+		s.bits(bits, 0, true)
+		return
+	}
+	x := s.w - w
+	for _, b := range bits {
+		s.inks = append(s.inks, ink{x: x, y: s.baseline, face: draw.Serif, size: tinySize, text: b.text, link: b.link})
+		x += b.w + blank
+	}
 }

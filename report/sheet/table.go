@@ -12,11 +12,13 @@ import (
 type table struct {
 	owner   string
 	heads   []string   // over the labels of the rows
+	words   []string   // over those heads, nil for none
 	rows    [][]string // labels of each row
 	labels  [][]stack  // those labels, set
 	columns []tableColumn
 	mark    int  // the row worked in full, −1 for none
 	along   bool // its rows are places along the member
+	counted bool // its rows have numbers and no names
 	placed  bool // its first column says where they are
 }
 
@@ -108,6 +110,9 @@ func (t *table) setLabels() []draw.Pt {
 	for i, h := range t.heads {
 		w[i] = draw.Width(draw.Italic, tableSize, h)
 	}
+	for i, h := range t.words {
+		w[i] = max(w[i], draw.Width(draw.Serif, smallSize, h))
+	}
 	for _, r := range t.rows {
 		set := make([]stack, len(r))
 		for i, s := range r {
@@ -137,7 +142,7 @@ func (t *table) elements(above draw.Pt) []*element {
 			if i > 0 {
 				above = 9
 			}
-			es := p.folded().fitted(above, n >= len(t.columns))
+			es := p.folded().set(above, n >= len(t.columns))
 			if es == nil {
 				out = nil
 				break
@@ -167,13 +172,17 @@ func (t *table) divided(n int) []*table {
 	return out
 }
 
-// fitted measures the table in the narrowest place that holds it; nil where none does, unless it must be set.
-func (t *table) fitted(above draw.Pt, must bool) []*element {
+// set measures the table: folded where it is long and narrow, else in the narrowest place that holds it; nil where
+// none does, unless it must be set.
+func (t *table) set(above draw.Pt, must bool) []*element {
 	t.labels = nil
 	for i := range t.columns {
 		t.columns[i].measure()
 	}
 	labels := t.setLabels()
+	if p, ok := t.panelled(labels); ok {
+		return []*element{p.element(0, above)}
+	}
 	for _, s := range []span{spanNone, spanWide, spanFull} {
 		for _, gap := range []draw.Pt{11, 8.5, 6.5} {
 			if w := t.width(labels, gap, len(t.columns)); w <= s.column().w {
@@ -208,45 +217,25 @@ const markWidth draw.Pt = 8
 func (t *table) measured(labels []draw.Pt, gap, w draw.Pt, s span, above draw.Pt) []*element {
 	x0 := s.column().x
 	owner := s.column().name + " " + t.owner
-	units := false
-	for i := range t.columns {
-		units = units || t.columns[i].unit.Width > 0
-	}
-	height := 2*headLead + 5.5
-	if units {
-		height += headLead
-	}
-	head := &element{owner: t.owner, above: above, height: height, keep: true, ruled: true, spans: s}
+	head := &element{owner: t.owner, above: above, height: t.headHeight(), keep: true, ruled: true, spans: s}
 	head.head = head
 	head.paint = func(c draw.Canvas, y draw.Pt) {
 		c.Owner(owner)
-		c.Line(x0, y, x0+w, y, strongRule)
-		c.Line(x0, y+height-2, x0+w, y+height-2, tableRule)
-		x := x0 + cellPad + markWidth
-		for i, h := range t.heads {
-			c.Text(x, y+2*headLead-1, draw.Italic, tableSize, h)
-			x += labels[i] + labelGap
-		}
-		x -= labelGap
-		for i := range t.columns {
-			k := &t.columns[i]
-			x += gap + k.w
-			nw := draw.Width(draw.Serif, tinySize, k.number)
-			c.Text(x-nw, y+headLead-1.5, draw.Serif, tinySize, k.number)
-			c.Link(x-nw, y+1, nw, headLead, k.key)
-			k.symbol.Draw(c, x-k.symbol.Width, y+2*headLead-1)
-			k.unit.Draw(c, x-k.unit.Width, y+3*headLead-0.5)
-		}
+		t.paintHead(c, x0, y, w, gap, labels)
 	}
 	out := []*element{head}
 	for i := range t.rows {
 		e := &element{owner: t.owner, height: rowLead, ruled: true, spans: s, head: head, grouped: len(t.rows) > groupOf+2}
-		if i == len(t.rows)-1 {
-			e.height += 3
+		last := i == len(t.rows)-1
+		if last {
+			e.height += tableBottom
 		}
 		e.paint = func(c draw.Canvas, y draw.Pt) {
 			c.Owner(owner)
 			t.paintRow(c, i, x0, y, w, gap, labels)
+			if last {
+				c.Line(x0, y+rowLead+1, x0+w, y+rowLead+1, strongRule)
+			}
 		}
 		out = append(out, e)
 	}
@@ -257,8 +246,41 @@ func (t *table) measured(labels []draw.Pt, gap, w draw.Pt, s span, above draw.Pt
 	return out
 }
 
+// headHeight is the height of the head: numbers, symbols and, where there are any, units.
+func (t *table) headHeight() draw.Pt {
+	for i := range t.columns {
+		if t.columns[i].unit.Width > 0 {
+			return 3*headLead + 5.5
+		}
+	}
+	return 2*headLead + 5.5
+}
+
+func (t *table) paintHead(c draw.Canvas, x0, y, w, gap draw.Pt, labels []draw.Pt) {
+	height := t.headHeight()
+	c.Line(x0, y, x0+w, y, strongRule)
+	c.Line(x0, y+height-2, x0+w, y+height-2, tableRule)
+	x := x0 + cellPad + markWidth
+	for i, h := range t.heads {
+		c.Text(x, y+2*headLead-1, draw.Italic, tableSize, h)
+		if i < len(t.words) {
+			c.Text(x, y+headLead-1.5, draw.Serif, smallSize, t.words[i])
+		}
+		x += labels[i] + labelGap
+	}
+	x -= labelGap
+	for i := range t.columns {
+		k := &t.columns[i]
+		x += gap + k.w
+		nw := draw.Width(draw.Serif, tinySize, k.number)
+		c.Text(x-nw, y+headLead-1.5, draw.Serif, tinySize, k.number)
+		c.Link(x-nw, y+1, nw, headLead, k.key)
+		k.symbol.Draw(c, x-k.symbol.Width, y+2*headLead-1)
+		k.unit.Draw(c, x-k.unit.Width, y+3*headLead-0.5)
+	}
+}
+
 func (t *table) paintRow(c draw.Canvas, i int, x0, y, w, gap draw.Pt, labels []draw.Pt) {
-	last := i == len(t.rows)-1
 	if i == t.mark {
 		c.Rect(x0, y+0.4, w, rowLead-0.6, draw.Style{Fill: draw.Grey(0.92)})
 	}
@@ -283,8 +305,5 @@ func (t *table) paintRow(c draw.Canvas, i int, x0, y, w, gap draw.Pt, labels []d
 			at = x - (col.w+draw.Width(face, tableSize, s))/2
 		}
 		c.Text(at, base, face, tableSize, s)
-	}
-	if last {
-		c.Line(x0, y+rowLead+1, x0+w, y+rowLead+1, strongRule)
 	}
 }

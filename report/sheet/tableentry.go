@@ -13,10 +13,7 @@ func (c *composer) tableEntry(b *trace.Block, t *trace.Table) {
 	title := e.element(false)
 	title.keep = true
 
-	out := &table{owner: t.Number, mark: -1, heads: rowHeads([]*trace.Axis{t.Axis})}
-	for i := range t.Axis.Rows {
-		out.rows = append(out.rows, rowLabels([]*trace.Axis{t.Axis}, i))
-	}
+	out := rowsOf(t.Number, []*trace.Axis{t.Axis})
 	if t.Axis == b.Over {
 		out.mark = b.Row
 	}

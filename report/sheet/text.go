@@ -49,7 +49,7 @@ func (c *composer) narrative(b *trace.Block, t *trace.Text, w draw.Pt, style tex
 		at.place = at.place.With(b.Over, b.Row)
 	}
 	o := &operands{note: c.note, uses: t.Uses, w: at}
-	first := map[string]int{"i": 0, "j": 0, "n": 0}
+	first := map[string]int{"i": 0, "j": 0, "n": 0, "m": 0}
 	n, troubles := text.Read(t.Markdown, func(key string) (mathset.Operand, error) {
 		l, i, ok := o.find(key, first)
 		if !ok {

@@ -16,12 +16,22 @@ const (
 
 // twin sets cells in two columns of equal height, read down the left one first on each sheet.
 func twin(owner string, cells []cell, above draw.Pt) *element {
+	return closer(owner, cells, nil, above)
+}
+
+// closer is twin, but the same cells set closer are taken where those then need no further sheet; nil for none.
+func closer(owner string, cells, tight []cell, above draw.Pt) *element {
 	e := &element{owner: owner, above: above}
 	left1, h := halves(cells)
 	e.height = h
 	e.paint = twinPaint(owner, cells, left1)
 	e.split = func(room draw.Pt) (first, rest *element) {
 		n, l := fitting(cells, room)
+		if n < len(cells) && tight != nil {
+			if _, h := halves(tight); h <= room {
+				return twin(owner, tight, above).whole(), nil
+			}
+		}
 		if n == 0 {
 			return nil, nil
 		}
@@ -29,7 +39,11 @@ func twin(owner string, cells []cell, above draw.Pt) *element {
 			return twin(owner, cells, above).whole(), nil
 		}
 		head := &element{owner: owner, above: above, height: room, paint: twinPaint(owner, cells[:n], l)}
-		return head, twin(owner, cells[n:], 0)
+		others := tight
+		if others != nil {
+			others = others[n:]
+		}
+		return head, closer(owner, cells[n:], others, 0)
 	}
 	return e
 }

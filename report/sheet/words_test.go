@@ -66,7 +66,7 @@ func TestWrap(t *testing.T) {
 }
 
 func TestSymbolOrder(t *testing.T) {
-	order := []string{"A_c", "A_p", "a", "ΔF", "F_c", "f_cd", "f_ck", "x", "α_cc", "σ_c", "Δσ_p"}
+	order := []string{"A_c", "A_{c,n}", "A_co", "A_p", "A_{p,i}", "a", "ΔF", "F_c", "f_cd", "f_ck", "x", "α_cc", "σ_c", "Δσ_p"}
 	for i := 1; i < len(order); i++ {
 		a, err := formula.ParseSymbol(order[i-1])
 		if err != nil {
@@ -78,6 +78,47 @@ func TestSymbolOrder(t *testing.T) {
 		}
 		if symbolOrder(a) >= symbolOrder(b) {
 			t.Errorf("%s does not come before %s", order[i-1], order[i])
+		}
+	}
+}
+
+// TestOneLineForAMeaning: a symbol defined at several places in the same words has one line with all of them.
+func TestOneLineForAMeaning(t *testing.T) {
+	var repeated int
+	for _, m := range meanings(fixture(t, 3)) {
+		if m.symbol.Name == "f_cd" {
+			repeated++
+			if len(m.at) != 3 {
+				t.Errorf("f_cd is said to stand at %v, want three places", m.at)
+			}
+		}
+	}
+	if repeated != 1 {
+		t.Errorf("f_cd has %d lines, want 1", repeated)
+	}
+}
+
+func TestRunsOfNumbers(t *testing.T) {
+	for in, want := range map[string]string{
+		"1.2.3":                               "in 1.2.3",
+		"1.2.3 1.2.4":                         "in 1.2.3, 1.2.4",
+		"1.2.9 1.2.10 1.2.11 1.3.1":           "in 1.2.9 … 1.2.11, 1.3.1",
+		"1.2.1 1.2.2 1.2.3 1.2.4 1.3.5":       "in 1.2.1 … 1.2.4, 1.3.5",
+		"1.1.1 1.2.2 1.2.3 1.2.4":             "in 1.1.1, 1.2.2 … 1.2.4",
+		"1.1.1 1.2.2 1.3.3":                   "in 1.1.1, 1.2.2, 1.3.3",
+		"1.1.1 1.1.2 1.1.3 1.1.5 1.1.6":       "in 1.1.1 … 1.1.3, 1.1.5, 1.1.6",
+		"1.1.1 1.1.2 1.1.3 1.2.1 1.2.2 1.2.3": "in 1.1.1 … 1.1.3, 1.2.1 … 1.2.3",
+	} {
+		var ms []mention
+		for _, s := range strings.Fields(in) {
+			ms = append(ms, mention{s, "to " + s})
+		}
+		var got []string
+		for _, b := range runs("in", ms) {
+			got = append(got, b.text)
+		}
+		if s := strings.Join(got, " "); s != want {
+			t.Errorf("%s is listed %q, want %q", in, s, want)
 		}
 	}
 }
