@@ -2,6 +2,7 @@ package templates
 
 import (
 	"embed"
+	"slices"
 	"strings"
 )
 
@@ -16,13 +17,18 @@ func Drafts() []string {
 	}
 	var kinds []string
 	for _, e := range entries {
-		kinds = append(kinds, strings.TrimSuffix(e.Name(), ".yaml"))
+		kinds = append(kinds, strings.ReplaceAll(strings.TrimSuffix(e.Name(), ".yaml"), "-", " "))
 	}
+	slices.Sort(kinds)
 	return kinds
 }
 
-// Draft is the member file to start from for a kind of cross-section; ok is false where there is none.
+// DraftFile is the name of the file for a kind: "double T" in double-T.yaml.
+func DraftFile(kind string) string { return strings.ReplaceAll(kind, " ", "-") + ".yaml" }
+
+// Draft is the member file to start from for a kind of cross-section, "double T" or "double-T"; ok is false where there is
+// none.
 func Draft(kind string) (text []byte, ok bool) {
-	text, err := drafts.ReadFile("drafts/" + kind + ".yaml")
+	text, err := drafts.ReadFile("drafts/" + DraftFile(kind))
 	return text, err == nil
 }

@@ -21,7 +21,12 @@ func TestDraftOfEachKind(t *testing.T) {
 	if got := templates.Drafts(); !slices.Equal(got, kinds) {
 		t.Errorf("drafts of %q, kinds %q", got, kinds)
 	}
-	for _, no := range []string{"", "t", "../T", "T.yaml", "rectangle/"} {
+	for _, kind := range []string{"double T", "double-T"} {
+		if text, ok := templates.Draft(kind); !ok || !strings.Contains(string(text), "kind: double T") || templates.DraftFile(kind) != "double-T.yaml" {
+			t.Errorf("no draft of %q", kind)
+		}
+	}
+	for _, no := range []string{"", "t", "double t", "../T", "T.yaml", "rectangle/"} {
 		if _, ok := templates.Draft(no); ok {
 			t.Errorf("a draft of %q", no)
 		}

@@ -49,6 +49,7 @@ func (f *Formula) Try(e Example) ([]float64, error) {
 			return nil, err
 		}
 	}
+	o.second()
 	dim, err := formula.Check(tree.Expr, func(s *formula.Symbol) (quantity.Dim, error) {
 		d, ok := o.dims[s.Name]
 		if !ok {
@@ -118,10 +119,22 @@ func (o *operands) read(text string) error {
 		o.values[s.Name] = append(o.values[s.Name], l.Quantity().Value)
 		o.dims[s.Name] = l.Unit.Dim()
 	}
-	if len(s.Index) == 1 {
+	switch {
+	case len(s.Index) == 1:
 		o.rows[s.Index[0]] = len(ls)
+	case len(s.Index) == 2 && o.rows[s.Index[0]] > 0 && o.rows[s.Index[1]] == 0: // its rows are those of a column before it
+		o.rows[s.Index[1]] = len(ls) / o.rows[s.Index[0]]
 	}
 	return nil
+}
+
+// second gives the second of two indices its rows where no column runs over it alone.
+func (o *operands) second() {
+	for _, s := range o.program.Symbols {
+		if len(s.Index) == 2 && o.rows[s.Index[1]] == 0 {
+			o.rows[s.Index[1]] = len(o.values[s.Name]) / max(o.rows[s.Index[0]], 1)
+		}
+	}
 }
 
 func literals(list string) ([]quantity.Literal, error) {

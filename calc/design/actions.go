@@ -1,80 +1,17 @@
 package design
 
 import (
-	"cmp"
-	"fmt"
 	"math"
-	"slices"
+	"strings"
 
+	"soffit/calc/clause"
 	"soffit/calc/ec2"
 	"soffit/calc/mechanics"
+	"soffit/calc/member"
 	"soffit/calc/quantity"
 	"soffit/calc/trace"
 	"soffit/templates"
 )
-
-// spanParts is in how many equal parts the span is cut for stations.
-const spanParts = 40
-
-// station is a place along the member at which everything is worked.
-type station struct {
-	name string
-	x    float64 // mm from end A
-}
-
-// stationList is the fortieths of the span, each load, and where the force of a row of tendons starts, has been handed
-// over and can be anchored in full. Bearings and loads stand where they are, to the last digit, for the shear force
-// jumps there; the others are rounded to 1 mm. One place has one station.
-func (j *job) stationList() []station {
-	length := j.m.Span.Length.Base()
-	a, b := j.m.Span.BearingA.FromEnd.Base(), length-j.m.Span.BearingB.FromEnd.Base()
-	var all []station
-	add := func(name string, x float64) {
-		if x < a || x > b {
-			return
-		}
-		for _, s := range all {
-			if s.x == x {
-				return
-			}
-		}
-		for slices.ContainsFunc(all, func(s station) bool { return s.name == name }) {
-			name += "′"
-		}
-		all = append(all, station{name, x})
-	}
-	round := func(name string, x float64) { add(name, math.Round(x)) }
-	add("bearing A", a)
-	add("bearing B", b)
-	for _, l := range j.loadRows()[1:] {
-		from, to := l.from.Quantity().Value, l.to.Quantity().Value
-		if from == to {
-			add("load "+l.name, from)
-			continue
-		}
-		add("load "+l.name+" from", from)
-		add("load "+l.name+" to", to)
-	}
-	round("mid-span", (a+b)/2)
-	for k := 1; k < spanParts; k++ {
-		round(fmt.Sprintf("%g l", float64(k)/spanParts), a+(b-a)*float64(k)/spanParts)
-	}
-	for i, r := range j.rows.Rows {
-		row := trace.Place{{Axis: j.rows, Row: i}}
-		debonded := j.base("given.tendons/debonded-length", row)
-		for _, p := range []struct {
-			name string
-			x    float64
-		}{{"start", debonded}, {"l_pt2", debonded + j.base("prestress.transmission/upper-transmission-length", row)},
-			{"l_bpd", debonded + j.base("prestress.transmission/anchorage-length", row)}} {
-			x := math.Ceil(p.x) // never on the short side
-			add(p.name+" "+r+" A", x)
-			add(p.name+" "+r+" B", length-x)
-		}
-	}
-	slices.SortFunc(all, func(s, t station) int { return cmp.Compare(s.x, t.x) })
-	return all
-}
 
 // base reads a recorded value, in base units; 0 where the record has stopped on an error.
 func (j *job) base(key string, at trace.Place) float64 {
@@ -89,6 +26,13 @@ func (j *job) base(key string, at trace.Place) float64 {
 	return l.Values[i]
 }
 
+// hogs says that the loads may bend the member upward by more than its short ends do: an overhang, or a load that acts
+// upward.
+func (j *job) hogs() bool {
+	a, b := j.overhangs()
+	return a || b || j.anyLoad(func(_ *member.Action, l *member.Load) bool { return l.Uniform.Base() < 0 || l.Point.Base() < 0 })
+}
+
 // actionsChapter gives moments and shear forces of each load at each station, and their combinations.
 func (j *job) actionsChapter(c *trace.Chapter) {
 	list := j.stationList()
@@ -98,25 +42,87 @@ func (j *job) actionsChapter(c *trace.Chapter) {
 	}
 	j.stations = j.n.Axis("station", "station along the member", "", names)
 
-	b := c.Block("loads", "Loads and reactions", nil, trace.Take(j.gross, j.span, j.spanLength, j.actionData)...)
+	b := c.Block("loads", "Loads and reactions", nil, append(j.toppingTake(), trace.Take(j.gross, j.span, j.spanLength, j.actionData)...)...)
 	j.reactions = b
-	b.Text("loads", templates.Text("loads"))
-	b.Steps(mechanics.Load, mechanics.ReactionB, mechanics.ReactionA)
+	b.Text("loads", j.loadsText())
+	if j.hasTopping() {
+		b.Steps(mechanics.ToppingWeight, mechanics.LoadWithTopping)
+	} else {
+		b.Step(mechanics.Load)
+	}
+	b.Steps(mechanics.ReactionB, mechanics.ReactionA)
 
 	b = c.Block("effects", "Effects of each load along the member", j.stations, trace.Take(j.span, j.actionData, j.reactions)...)
 	j.effects = b
-	b.GivenRows(def("position", "x_m", "Distance of the station from end A", "m"), j.stations, x, fmt.Sprintf("the span in %d parts, loads, ends of debonding, of l_pt2 and of l_bpd", spanParts))
+	b.GivenRows(def("position", "x_m", "Distance of the station from end A", "m"), j.stations, x, j.stationSource())
 	b.Row = j.midSpan()
-	b.Steps(mechanics.LoadMoment, mechanics.ShearLeft, mechanics.ShearRight)
+	before := b.Active()
+	if _, overB := j.overhangs(); overB || j.ducted() {
+		var beyond trace.Rows
+		beyond, before = b.Choose(mechanics.BeyondB)
+		b.On(beyond, func() { b.Steps(mechanics.LoadMomentBeyond, mechanics.ShearLeftBeyond, mechanics.ShearRightBeyond) })
+	}
+	b.On(before, func() { b.Steps(mechanics.LoadMoment, mechanics.ShearLeft, mechanics.ShearRight) })
+	if j.hasTopping() {
+		b.Step(mechanics.BareMoment)
+	}
 
 	j.ultimate = j.ultimateCombinations(c)
-	j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CharacteristicFactor, ec2.CharacteristicMoment, ec2.CharacteristicEnvelope)
-	j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, ec2.FrequentMoment, ec2.FrequentEnvelope)
+	j.characteristic = j.combination(c, "characteristic", "Characteristic combination", leading, ec2.CharacteristicFactor, j.both(ec2.CharacteristicMoment, ec2.CharacteristicEnvelope, ec2.CharacteristicMomentMin, ec2.CharacteristicEnvelopeMin)...)
+	j.combination(c, "frequent", "Frequent combination", leading, ec2.FrequentFactor, j.both(ec2.FrequentMoment, ec2.FrequentEnvelope, ec2.FrequentMomentMin, ec2.FrequentEnvelopeMin)...)
 	b = c.Block("quasi-permanent", "Quasi-permanent combination", j.stations, trace.Take(j.actionData, j.effects)...)
 	b.Row = j.midSpan()
 	b.Step(ec2.QuasiPermanentMoment)
-	b.Table("service", "Largest moments in service along the member", j.stations, "actions.effects/position", "actions.characteristic/characteristic", "actions.frequent/frequent", "quasi-permanent")
-	j.effectsFigure()
+	columns := []string{"actions.effects/position", "actions.characteristic/characteristic", "actions.frequent/frequent", "quasi-permanent"}
+	if j.hogs() {
+		b.Step(ec2.QuasiPermanentMomentMin)
+		columns = append(columns, "actions.characteristic/characteristic-least", "actions.frequent/frequent-least", "quasi-permanent-least")
+	}
+	b.Table("service", pick(j.hogs(), "Largest and least moments in service along the member", "Largest moments in service along the member"), j.stations, columns...)
+	j.effectsFigure(j.ultimate, "Moments and shear forces at the ultimate limit state.", "")
+	if j.building() {
+		j.constructionCombinations(c)
+	}
+	j.bearings(c)
+}
+
+// both are the formulas of the largest moments, and of a member that hogs those of the least.
+func (j *job) both(moment, largest, momentLeast, least *clause.Formula) []*clause.Formula {
+	if j.hogs() {
+		return []*clause.Formula{moment, largest, momentLeast, least}
+	}
+	return []*clause.Formula{moment, largest}
+}
+
+// toppingTake is what the load of the topping follows from.
+func (j *job) toppingTake() []trace.Source {
+	if !j.hasTopping() {
+		return nil
+	}
+	return trace.Take(j.topping)
+}
+
+// loadKey is the entry that gives the loads per length.
+func (j *job) loadKey() string {
+	return "actions.loads/" + pick(j.hasTopping(), mechanics.LoadWithTopping, mechanics.Load).ID
+}
+
+// loadsText says how the loads are taken, as far as it concerns this member.
+func (j *job) loadsText() string {
+	out := []string{templates.Text("loads")}
+	if a, b := j.overhangs(); a || b {
+		out = append(out, templates.Text("overhangs"))
+	}
+	if j.hasAxial() {
+		out = append(out, templates.Text("axial"))
+	}
+	switch {
+	case j.propped():
+		out = append(out, templates.Text("propped"))
+	case j.hasTopping():
+		out = append(out, templates.Text("unpropped"))
+	}
+	return strings.Join(out, "\n\n")
 }
 
 // midSpan is the station nearest to the middle of the span: a load may stand there and give it its name.

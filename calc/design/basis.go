@@ -134,9 +134,33 @@ func (j *job) assumptions() string {
 	var b strings.Builder
 	add := func(format string, args ...any) { fmt.Fprintf(&b, "- "+format+"\n", args...) }
 	add("Losses of prestress are those stated in the member file, row by row, and leave out what permanent loads add to the tendon stress. They decide the prestrain, and through it the resistance where tendons do not yield; the transmission length follows the stress after release.")
-	add("Tendons end at the ends of the concrete; their bond starts at the end of the debonded length, which carries nothing.")
+	if j.ducted() {
+		add("Tendons are anchored at the ends of the concrete, are grouted before any load but the self-weight acts, and lie in one vertical plane each: friction counts changes of direction in elevation alone.")
+		add("Losses beside friction are alike over the whole length of a tendon, draw-in among them.")
+	} else {
+		add("Tendons end at the ends of the concrete; their bond starts at the end of the debonded length, which carries nothing.")
+	}
+	if j.hasTopping() {
+		add("Topping and member act together without slip once the topping is hard; creep and shrinkage of one against the other are left out, and the strain that the member has by then is elastic. The fresh topping takes γ_Q while it is cast, as a construction load.")
+	}
+	switch j.law() {
+	case "block":
+		add("The concrete in compression acts as the rectangular block of 3.1.7(3).")
+	default:
+		bare := pick(j.hasTopping(), "; the bare member while it is built the rectangular block of 3.1.7(3)", "")
+		add("The concrete in compression follows the %s diagram, 3.1.7, in fibres%s.", j.law(), bare)
+	}
+	if j.hasAxial() {
+		add("Axial forces act at the centroid of the bare section from end to end; the section is asked beside the least and beside the greatest of them, each with every moment. Second-order effects are left out.")
+	}
+	if j.anyDeflected() {
+		add("Deflected tendons lose nothing by friction where they are held down beyond the losses stated.")
+	}
 	add("Loads act on the whole width; their positions are measured from end A of the concrete. Bearings are knife edges at their middles.")
-	add("The compressed flange is held against lateral buckling.")
+	add("The compressed flange is held against lateral buckling%s.", pick(j.hasTopping(), ", also while the topping is cast", ""))
+	if j.m.Shape.Kind.Text == "hollow unit" {
+		add("The concrete that fills the joints between units is neither in the self-weight nor in the section: write its weight as an action. EN 1168 stands beside EN 1992-1-1 for such units.")
+	}
 	if len(j.m.Bars.Rows) > 0 {
 		add("Bars are straight and end %s from the ends of the concrete; each α of 8.4.4 is taken as 1.", endCover)
 	}
@@ -161,7 +185,7 @@ func (j *job) defaults() []string {
 	say("Design working life", m.Basis.DesignWorkingLife.Origin, m.Basis.DesignWorkingLife.String())
 	say("Cement class", m.Concrete.CementClass.Origin, m.Concrete.CementClass.Text)
 	say("Aggregate", m.Concrete.Aggregate.Origin, m.Concrete.Aggregate.Text)
-	say("Steel diagram of the tendons", m.Strands.SteelDiagram.Origin, m.Strands.SteelDiagram.Text+" upper branch")
+	say("Steel diagram of the tendons", j.steelDiagram().Origin, j.steelDiagram().Text+" upper branch")
 	say("Release", m.Strands.Release.Origin, m.Strands.Release.Text)
 	if len(m.Bars.Rows) > 0 {
 		say("Steel diagram of the bars", m.Bars.SteelDiagram.Origin, m.Bars.SteelDiagram.Text+" upper branch")

@@ -14,6 +14,7 @@ import (
 	"soffit/calc/member"
 	"soffit/calc/quantity"
 	"soffit/calc/section"
+	"soffit/calc/tendon"
 	"soffit/calc/trace"
 )
 
@@ -25,16 +26,29 @@ type job struct {
 	m *member.Member
 	n *trace.Note
 
-	rows, bars, parts, loads, stations *trace.Axis
+	rows, bars, parts, rounds, fibreAxis, loads, stations *trace.Axis
 
-	parameters, constants, concrete, section, span, tendons, barData, actionData *trace.Block
-	strengths, tendonStrengths, barStrengths, gross, positions, spanLength       *trace.Block
-	reactions, effects, ultimate, stress, transmission, barAnchorage, along      *trace.Block
-	resistance                                                                   *trace.Block
+	parameters, constants, concrete, section, span, tendons, barData, actionData     *trace.Block
+	strengths, tendonStrengths, barStrengths, bareBars, gross, positions, spanLength *trace.Block
+	characteristic                                                                   *trace.Block
+	reactions, effects, ultimate, stress, transmission, barAnchorage, along          *trace.Block
+	resistance                                                                       *trace.Block
 
-	steel []trace.Source // what the resistance of a section takes
-	form  form           // the shape as a stack of parts
-	shape section.Shape  // the same for the kernels
+	levels, fromTop, fromBelow, positionsBelow, net, transformed *trace.Block // the section: from below only where it hogs, net only with ducts
+	topping, toppingStrengths, composite, fibres                 *trace.Block // only with a topping; fibres only with a diagram other than the block
+	toppedFromTop, toppedFromBelow, toppedPositions              *trace.Block
+	construction                                                 *trace.Block // combination during construction; nil for none
+	hogging, bareHogging                                         *trace.Block // hogging moments; bare only with a topping that the member carries
+
+	axialForces []axialForce // one without a block where there is none
+	asked       []*asked     // the ways in which the section was asked for its resistance
+
+	form  form          // the shape as the record has it
+	shape section.Shape // the same for the kernels
+
+	profile, heights, friction *trace.Block     // of tendons whose heights change; heights gives y_{p,i}
+	segments, groups           *trace.Axis      // of profiles; of rows of strands
+	profiles                   []tendon.Profile // of the rows, in their order
 
 	findings diag.List // in what only the finished design can judge
 
@@ -46,10 +60,12 @@ func Run(m *member.Member) (*trace.Note, error) { return run(m, false) }
 
 // run designs a member; trying is set while a remedy for a failing check is tried.
 func run(m *member.Member, trying bool) (*trace.Note, error) {
-	j := &job{m: m, n: trace.New(document(m)), form: formOf(&m.Shape), trying: trying}
-	var err error
-	if j.shape, err = j.form.shape(); err != nil {
-		return nil, fmt.Errorf("%s: shape: %w", m.File, err)
+	j, err := newJob(m, trying)
+	if err != nil {
+		return nil, err
+	}
+	if j.profiles, err = profilesOf(m, j.shape.Height()); err != nil {
+		return nil, fmt.Errorf("%s: %w", m.File, err)
 	}
 	j.contents()
 	if err := j.n.Err(); err != nil {
@@ -59,6 +75,16 @@ func run(m *member.Member, trying bool) (*trace.Note, error) {
 		return nil, err
 	}
 	return j.n, nil
+}
+
+// newJob sets the shape out and starts the record.
+func newJob(m *member.Member, trying bool) (*job, error) {
+	f, err := formOf(&m.Shape)
+	if err != nil {
+		return nil, fmt.Errorf("%s: shape: %w", m.File, err)
+	}
+	j := &job{m: m, n: trace.New(document(m)), form: f, shape: f.outline.Shape, trying: trying}
+	return j, nil
 }
 
 func document(m *member.Member) trace.Document {
@@ -139,3 +165,6 @@ func each[T any](rows []T, f func(T) quantity.Literal) []quantity.Literal {
 	}
 	return out
 }
+
+// lowered is a title within a sentence.
+func lowered(s string) string { return strings.ToLower(s[:1]) + s[1:] }

@@ -2,6 +2,7 @@ package design
 
 import (
 	"fmt"
+	"math"
 	"slices"
 
 	"soffit/calc/member"
@@ -20,12 +21,14 @@ var remedies = []remedy{
 	{"more-tendons", 8, moreTendons},
 	{"added-row", 6, addedRow},
 	{"fewer-tendons", 8, fewerTendons},
+	{"more-strands", 8, moreStrands},
+	{"fewer-strands", 8, fewerStrands},
 	{"added-bars", 4, addedBars},
 	{"stronger-concrete", 8, strongerConcrete},
 	{"deeper-section", 12, deeperSection},
 }
 
-// lowest is the lowest row of tendons.
+// lowest is the lowest row of strands; a post-tensioned member has none.
 func lowest(m *member.Member) *member.StrandRow {
 	low := 0
 	for i := range m.Strands.Rows {
@@ -41,15 +44,18 @@ func spaced(r *member.StrandRow) bool { return r.Spacing.Base() >= 30 }
 
 // moreTendons adds to the lowest row while there is room.
 func moreTendons(m *member.Member, step int) string {
+	if len(m.Strands.Rows) == 0 {
+		return ""
+	}
 	r := lowest(m)
 	before := r.Count.N
 	r.Count.N += step
 	if !spaced(r) {
 		return ""
 	}
-	f := formOf(&m.Shape)
+	o, err := m.Shape.Outline()
 	edge := 2 * r.Height.Base() // as far from the sides as from the soffit
-	if float64(r.Count.N-1)*r.Spacing.Base() > f.lower[0].Quantity().Value-edge {
+	if err != nil || float64(r.Count.N-1)*r.Spacing.Base() > o.WidthAt(0)-edge {
 		return ""
 	}
 	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
@@ -57,6 +63,9 @@ func moreTendons(m *member.Member, step int) string {
 
 // addedRow puts a further row like the lowest one 50 mm above the rows of the lower half, two tendons a step.
 func addedRow(m *member.Member, step int) string {
+	if len(m.Strands.Rows) == 0 {
+		return ""
+	}
 	rows := m.Strands.Rows
 	low, top := *lowest(m), 0.0
 	for _, r := range rows {
@@ -69,8 +78,7 @@ func addedRow(m *member.Member, step int) string {
 		return slices.ContainsFunc(rows, func(r member.StrandRow) bool { return r.Name.Text == n })
 	}), 2*step
 	low.Height.Literal = number(top+50, "mm", places(top))
-	f := formOf(&m.Shape)
-	shape, err := f.shape()
+	shape, err := m.Shape.Outline()
 	if err != nil || !spaced(&low) || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
 		return ""
 	}
@@ -80,6 +88,9 @@ func addedRow(m *member.Member, step int) string {
 
 // fewerTendons takes out of the lowest row: a member with too much steel fails without warning.
 func fewerTendons(m *member.Member, step int) string {
+	if len(m.Strands.Rows) == 0 {
+		return ""
+	}
 	r := lowest(m)
 	if r.Count.N <= step {
 		return ""
@@ -89,13 +100,50 @@ func fewerTendons(m *member.Member, step int) string {
 	return fmt.Sprintf("row %q with %d tendons instead of %d", r.Name.Text, r.Count.N, before)
 }
 
+// mostFilled is how much of a duct's circle strands may take up here.
+const mostFilled = 0.4
+
+// moreStrands adds to each duct while there is room.
+func moreStrands(m *member.Member, step int) string {
+	for i := range m.Ducts.Rows {
+		r := &m.Ducts.Rows[i]
+		r.Strands.N += step
+		steel := tendonRow{}.of(r.Product.Text, m.Ducts.Products).area.Quantity().Value * float64(r.Strands.N)
+		if d := r.Diameter.Base(); steel > mostFilled*math.Pi/4*d*d {
+			return ""
+		}
+	}
+	return strandsChanged(m, step, "more")
+}
+
+// fewerStrands takes out of each duct.
+func fewerStrands(m *member.Member, step int) string {
+	for i := range m.Ducts.Rows {
+		if r := &m.Ducts.Rows[i]; r.Strands.N > step {
+			r.Strands.N -= step
+		} else {
+			return ""
+		}
+	}
+	return strandsChanged(m, step, "less")
+}
+
+func strandsChanged(m *member.Member, step int, way string) string {
+	if len(m.Ducts.Rows) == 0 {
+		return ""
+	}
+	return fmt.Sprintf("%d strand%s %s in each duct", step, pick(step == 1, "", "s"), way)
+}
+
 // addedBars puts two bars 45 mm above the lowest row, as far from the sides as that row is from the soffit.
 func addedBars(m *member.Member, step int) string {
+	if len(m.Strands.Rows) == 0 {
+		return ""
+	}
 	low := lowest(m)
 	diameter := []string{"12", "16", "20", "25"}[step-1]
 	height := low.Height.Base() + 45
-	f := formOf(&m.Shape)
-	shape, err := f.shape()
+	shape, err := m.Shape.Outline()
 	if err != nil || shape.WidthAt(height) < 2*low.Height.Base()+60 {
 		return ""
 	}

@@ -1,6 +1,7 @@
 package design
 
 import (
+	"soffit/calc/clause"
 	"soffit/calc/ec2"
 	"soffit/calc/trace"
 	"soffit/templates"
@@ -8,17 +9,89 @@ import (
 
 // ultimateChapter justifies the member in bending, 6.1, with what anchorage, shear and failure with warning ask of it.
 func (j *job) ultimateChapter(c *trace.Chapter) {
-	j.steel = trace.Take(j.parameters, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.ultimate, j.along)
-	if j.hasBars() {
-		j.steel = append(j.steel, trace.Take(j.barData, j.barStrengths)...)
+	sags, hogs := j.prestrain(c, false), prestressed{}
+	if j.hogs() {
+		hogs = j.prestrain(c, true)
 	}
-	b := c.Block("bending", "Resistance along the span, sagging", j.stations, j.steel...)
-	j.resistance = b
-	b.Text("bending", templates.Text("bending"))
-	j.bending(b)
-	j.cracked(c)
-	j.steelLimits(c)
-	j.hogging(c)
+	j.axialBlocks(c)
+	j.hoggingMoments(c)
+	for _, q := range j.questions(sags, hogs) {
+		var rows trace.Rows
+		if q.below {
+			if rows = j.rowsWhere(q.hogging.Path() + "/" + ec2.Hogging.ID); !rows.Any() {
+				continue
+			}
+		}
+		j.resist(c, q, rows)
+		j.asked = append(j.asked, q)
+		if !q.bare {
+			j.cracked(c, q)
+		}
+	}
+	j.resistance = j.asked[0].block
+	j.constructionOnMember(c)
+	seen := map[bool]bool{}
+	for _, q := range j.asked {
+		if !q.bare && !seen[q.below] {
+			j.minimumSteel(c, q)
+			seen[q.below] = true
+		}
+	}
+	j.maximumSteel(c)
+}
+
+// questions are the ways in which the section is asked, in the order of the note.
+func (j *job) questions(p, hogs prestressed) []*asked {
+	var out []*asked
+	add := func(q asked) {
+		q.fibred = j.fibred() && q.topped == j.hasTopping() // the fibres are those of the finished section
+		out = append(out, &q)
+	}
+	for _, n := range j.axialForces {
+		with := ""
+		if n.block != nil {
+			with = ", " + n.words
+		}
+		add(asked{slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, text: pick(n.first, pick(j.fibred(), "fibres", "bending"), ""), check: ec2.BendingSufficient,
+			view: pick(j.hasTopping(), j.toppedFromTop, j.fromTop), places: pick(j.hasTopping(), j.toppedPositions, j.positions), prestrain: pick(j.hasTopping(), p.topped, p.bare), force: p.force,
+			demand: trace.Take(j.ultimate), axial: n.block, topped: j.hasTopping()})
+	}
+	if j.hasTopping() && j.construction != nil {
+		add(asked{slug: "bare-bending", title: "Resistance of the bare member during construction, sagging", text: "bare", check: ec2.BareSufficient,
+			view: j.fromTop, places: j.positions, prestrain: p.bare, force: p.force, demand: trace.Take(j.construction), bare: true})
+	}
+	if !j.hogs() {
+		return out
+	}
+	for _, n := range j.axialForces {
+		with := ""
+		if n.block != nil {
+			with = ", " + n.words
+		}
+		add(asked{slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, text: pick(n.first, "hogging", ""), check: ec2.HoggingSufficient,
+			view: pick(j.hasTopping(), j.toppedFromBelow, j.fromBelow), places: j.positionsBelow, prestrain: pick(j.hasTopping(), hogs.topped, hogs.bare), force: hogs.force,
+			demand: trace.Take(j.hogging), axial: n.block, below: true, topped: j.hasTopping(), hogging: j.hogging})
+	}
+	if j.bareHogging != nil {
+		add(asked{slug: "bare-hogging-bending", title: "Resistance of the bare member during construction where the moment hogs", check: ec2.BareHoggingSufficient,
+			view: j.fromBelow, places: j.positionsBelow, prestrain: hogs.bare, force: hogs.force, demand: trace.Take(j.bareHogging), below: true, bare: true, hogging: j.bareHogging})
+	}
+	return out
+}
+
+// axialBlocks give the axial forces beside which the section is asked: the least, which takes most from the resistance where
+// it does not crush the concrete, and the greatest.
+func (j *job) axialBlocks(c *trace.Chapter) {
+	j.axialForces = []axialForce{{first: true}}
+	if !j.hasAxial() {
+		return
+	}
+	axial := func(slug, words string, f *clause.Formula, first bool) axialForce {
+		b := c.Block("axial"+slug, "Axial force, "+words, nil, trace.Take(j.ultimate)...)
+		b.Step(f)
+		return axialForce{slug: slug, words: words, block: b, first: first}
+	}
+	j.axialForces = []axialForce{axial("-least", "least axial force", ec2.LeastAxial, true), axial("-greatest", "greatest axial force", ec2.GreatestAxial, false)}
 }
 
 // largest is the station with the largest value of a recorded column.
@@ -36,63 +109,227 @@ func (j *job) largest(key string) string {
 	return j.stations.Rows[best]
 }
 
-// cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
-// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and failure must announce itself when the load grows (5.10.1(5)P).
-func (j *job) cracked(c *trace.Chapter) {
-	at := j.largest("actions.ultimate/moment")
-	most := c.Block("largest-moment", "Largest moment of the span, "+at, nil, trace.At(j.ultimate, at))
-	most.Step(ec2.LargestMoment)
-
-	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.along, j.resistance, most)
-	b := c.Block("cracked", "Where the section cracks at the ultimate limit state", j.stations, takes...)
-	b.Row = j.resistance.Row
-	b.Text("cracked", templates.Text("cracked"))
-	b.Require(ec2.NoLargerMoment)
-	b.Step(ec2.BottomStress)
-	cracked, _ := b.Choose(ec2.CrackedAtUltimate)
-	b.On(cracked, func() {
-		resisting, _ := b.Choose(ec2.Resists)
-		b.On(resisting, func() { j.withShear(b) })
-	})
-	if !b.Has("failure-with-warning") {
+// hoggingMoments give the hogging moments as positive numbers and say where there are any. A member that hogs by more than its
+// short ends do must carry them with steel; the others are checked as plain concrete there.
+func (j *job) hoggingMoments(c *trace.Chapter) {
+	built := j.construction != nil && !j.hasTopping()
+	takes := trace.Take(j.parameters, j.strengths, j.gross, j.ultimate)
+	if built {
+		takes = append(takes, trace.Take(j.construction)...)
+	}
+	b := c.Block("hogging", "Hogging moments of the loads", j.stations, takes...)
+	j.hogging = b
+	b.Step(pick(built, ec2.HoggingMomentBuilt, ec2.HoggingMoment))
+	yes, _ := b.Choose(ec2.Hogging)
+	if !j.hogs() {
+		b.On(yes, func() {
+			b.Steps(ec2.OverhangStress, ec2.PlainTensileStrength)
+			b.Check(ec2.HoggingResisted)
+		})
 		return
 	}
-	b.Table("along", "Stations along the span: cracks, tension added by shear, warning", j.stations, "actions.effects/position", "bottom-stress", "added-moment", "moment-with-shear", "bending-with-shear", "cracking-moment", "failure-with-warning")
+	if j.construction != nil && j.hasTopping() {
+		j.bareHogging = c.Block("bare-hogging", "Hogging moments on the bare member", j.stations, trace.Take(j.construction)...)
+		j.bareHogging.Step(ec2.BareHoggingMoment)
+		j.bareHogging.Decide(ec2.Hogging)
+	}
 }
 
-// withShear adds the tension of the shear force where the section cracks, and asks for cracks before failure.
-func (j *job) withShear(b *trace.Block) {
+// rowsWhere are the stations at which a recorded condition holds.
+func (j *job) rowsWhere(key string) trace.Rows {
+	out := make(trace.Rows, len(j.stations.Rows))
+	e, ok := j.n.Entry(key).(*trace.Choice)
+	for i := range out {
+		out[i] = ok && i < len(e.Outcomes) && e.Outcomes[i] == trace.Yes
+	}
+	return out
+}
+
+// cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
+// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and failure must announce itself when the load grows (5.10.1(5)P).
+func (j *job) cracked(c *trace.Chapter, q *asked) {
+	suffix := q.block.Slug[len(pick(q.below, "hogging-bending", "bending")):]
+	prefix := pick(q.below, "hogging-", "")
+	largest, key := ec2.LargestMoment, "actions.ultimate/moment"
+	from := j.ultimate
+	if q.below {
+		largest, key, from = ec2.LargestHoggingMoment, j.hogging.Path()+"/"+j.hoggingMomentID(), j.hogging
+	}
+	at := j.largest(key)
+	most := c.Block(prefix+"largest-moment"+suffix, pick(q.below, "Largest hogging moment at the stations, ", "Largest moment at the stations, ")+at, nil, trace.At(from, at))
+	most.Step(largest)
+
+	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.hogging, j.along, j.span, j.effects, q.force, j.transformed, q.block, most)
+	if q.topped {
+		takes = append(takes, trace.Take(j.topping, j.composite, j.toppingStrengths)...)
+	}
+	if q.axial != nil {
+		takes = append(takes, trace.Take(q.axial)...)
+	}
+	b := c.Block(prefix+"cracked"+suffix, pick(q.below, "Where the section cracks at the top at the ultimate limit state", "Where the section cracks at the ultimate limit state"), j.stations, takes...)
+	b.Row = q.block.Row
+	b.Text("cracked", templates.Text(pick(j.ducted(), "cracked-post-tensioned", "cracked")))
+	where := b.Active()
+	if q.below {
+		where = j.rowsOf(q.block.Path() + "/" + j.sums(q).resistance.ID)
+	}
+	b.On(where, func() {
+		b.Require(pick(q.below, ec2.NoLargerHoggingMoment, ec2.NoLargerMoment))
+		b.Step(j.edgeStress(q))
+		cracked, _ := b.Choose(pick(j.ducted(), ec2.CrackedOfPostTensioned, ec2.CrackedAtUltimate))
+		sheared := cracked
+		if j.ducted() { // anchored at its ends: the added tension is there also where nothing cracks
+			sheared, _ = b.Choose(ec2.BetweenBearings)
+		}
+		b.On(sheared.Or(cracked), func() {
+			resisting, _ := b.Choose(ec2.Resists)
+			b.On(resisting, func() {
+				b.On(sheared, func() { j.withShear(b, q) })
+				b.On(cracked, func() { j.withWarning(b, q) })
+			})
+		})
+	})
+	columns := []string{"actions.effects/position", j.edgeStress(q).ID}
+	for _, id := range []string{"added-moment", "moment-with-shear", "hogging-moment-with-shear", "bending-with-shear", "hogging-with-shear", j.crackingMoment(q).ID, "failure-with-warning"} {
+		if b.Has(id) {
+			columns = append(columns, id)
+		}
+	}
+	b.Table("along", "Stations along the member: cracks, tension added by shear, warning", j.stations, columns...)
+}
+
+// hoggingMomentID is the ID of the formula that gives M_Ed,h.
+func (j *job) hoggingMomentID() string {
+	return pick(j.construction != nil && !j.hasTopping(), ec2.HoggingMomentBuilt, ec2.HoggingMoment).ID
+}
+
+// rowsOf are the stations at which an entry was computed.
+func (j *job) rowsOf(key string) trace.Rows {
+	out := make(trace.Rows, len(j.stations.Rows))
+	l := trace.LineOf(j.n.Entry(key))
+	for i := range out {
+		out[i] = l != nil && l.Taken(i)
+	}
+	return out
+}
+
+// edgeStress is the tension at the edge that the moment stretches.
+func (j *job) edgeStress(q *asked) *clause.Formula {
+	switch {
+	case q.topped && q.below:
+		return ec2.ToppedTopStress
+	case q.topped:
+		return pick(q.axial != nil, ec2.AxialToppedBottomStress, ec2.ToppedBottomStress)
+	case q.below:
+		return pick(q.axial != nil, ec2.AxialTopStress, ec2.TopStress)
+	}
+	return pick(q.axial != nil, ec2.AxialBottomStress, ec2.BottomStress)
+}
+
+// crackingMoment is the greatest moment at which that edge cracks.
+func (j *job) crackingMoment(q *asked) *clause.Formula {
+	switch {
+	case q.topped && q.below:
+		return ec2.ToppedHoggingCrackingMoment
+	case q.topped:
+		return pick(q.axial != nil, ec2.AxialToppedCrackingMoment, ec2.ToppedCrackingMoment)
+	case q.below:
+		return pick(q.axial != nil, ec2.AxialHoggingCracking, ec2.HoggingCracking)
+	}
+	return pick(q.axial != nil, ec2.AxialCrackingMoment, ec2.CrackingMoment)
+}
+
+// withShear adds the tension of the shear force.
+func (j *job) withShear(b *trace.Block, q *asked) {
 	b.Step(ec2.LargestShear)
-	b.Steps(ec2.LeverArm, ec2.AddedMoment, ec2.MomentWithShear)
-	b.Check(ec2.BendingWithShear)
-	b.Text("warning", templates.Text("warning"))
-	b.Steps(ec2.InitialForce, ec2.InitialMoment, ec2.CrackingMoment)
+	b.Steps(ec2.LeverArm, ec2.AddedMoment, pick(q.below, ec2.HoggingMomentWithShear, ec2.MomentWithShear))
+	b.Check(pick(q.below, ec2.HoggingWithShear, ec2.BendingWithShear))
+}
+
+// withWarning asks for cracks before failure when the load grows.
+func (j *job) withWarning(b *trace.Block, q *asked) {
+	b.Text("warning", templates.Text(pick(j.ducted(), "warning-post-tensioned", "warning")))
+	if !q.below {
+		b.Steps(ec2.InitialForce, ec2.InitialMoment)
+	}
+	b.Step(j.crackingMoment(q))
 	b.Check(ec2.FailureWithWarning)
 }
 
-// steelLimits checks minimum steel at every station where steel is bonded in the tension zone, and maximum steel.
-func (j *job) steelLimits(c *trace.Chapter) {
-	takes := trace.Take(j.parameters, j.concrete, j.strengths, j.section, j.gross, j.positions, j.tendons, j.tendonStrengths, j.stress, j.along, j.resistance)
+// constructionOnMember holds the moments during construction against the resistance of a member without topping.
+func (j *job) constructionOnMember(c *trace.Chapter) {
+	if j.hasTopping() || j.construction == nil {
+		return
+	}
+	b := c.Block("construction", "Bending during construction", j.stations, trace.Take(j.construction, j.resistance)...)
+	b.Check(ec2.ConstructionSufficient)
+}
+
+// minimumSteel checks minimum steel at every station where steel is bonded in the tension zone.
+func (j *job) minimumSteel(c *trace.Chapter, q *asked) {
+	view := pick(q.below, j.fromBelow, j.fromTop)
+	takes := trace.Take(j.parameters, j.concrete, j.strengths, j.section, j.gross, view, q.places, j.tendons, j.tendonStrengths, j.stress, j.along, j.effects, j.span, q.block)
 	if j.hasBars() {
 		takes = append(takes, trace.Take(j.barData, j.barStrengths)...)
 	}
-	b := c.Block("steel-limits", "Minimum and maximum steel", j.stations, takes...)
-	b.Row = j.resistance.Row
+	if q.topped && q.below {
+		takes = append(takes, trace.Take(j.topping)...)
+	}
+	b := c.Block(pick(q.below, "hogging-", "")+"minimum-steel", pick(q.below, "Minimum steel at the top", "Minimum steel"), j.stations, takes...)
+	b.Row = q.block.Row
 	b.Text("minimum", templates.Text("minimum"))
-	strength, source := plain("500", "MPa"), "no bars: a usual strength to express the minimum in; it cancels but in 0.0013·b_t·d"
+	where := b.Active()
+	if overA, overB := j.overhangs(); q.below {
+		where = j.rowsOf(q.block.Path() + "/" + j.sums(q).resistance.ID)
+	} else if overA || overB || j.ducted() {
+		where, _ = b.Choose(ec2.BetweenBearings)
+	}
+	b.On(where, func() {
+		where, _ = b.Choose(pick(j.hasBars(), ec2.AnchoredInFullWithBars, ec2.AnchoredInFull))
+	})
+	b.On(where, func() {
+		strength, source := plain("500", "MPa"), "no bars: a usual strength to express the minimum in; it cancels but in 0.0013·b_t·d"
+		if j.hasBars() {
+			r := j.m.Bars.Rows[0]
+			strength, source = r.Fyk.Literal, given(r.Fyk)
+		}
+		b.Given(def("reference-strength", "f_yk", "Yield strength that the minimum is expressed in", "MPa"), strength, source)
+		switch {
+		case q.topped && q.below:
+			b.Step(ec2.ToppingTensionWidth)
+		case j.hasVoids():
+			b.Steps(ec2.TensionPartDepth, ec2.TensionPartArea, ec2.TensionVoidReach, ec2.TensionVoidArea, ec2.TensionWidthWithVoids)
+		default:
+			b.Steps(ec2.TensionPartDepth, ec2.TensionPartArea, ec2.TensionWidth)
+		}
+		minimum, _ := j.formula(ec2.MinimumSteel)
+		b.Step(minimum)
+		if minimum != ec2.MinimumSteel {
+			b.Require(ec2.MinimumSteelPositive)
+		}
+		switch {
+		case j.ducted() && j.hasBars():
+			b.Step(ec2.PostTensionSteelWithBars)
+		case j.ducted():
+			b.Step(ec2.PostTensionSteel)
+		default:
+			b.Step(pick(j.hasBars(), ec2.TensionSteelWithBars, ec2.TensionSteel))
+		}
+		b.Check(pick(q.below, ec2.TopSteelProvided, ec2.MinimumSteelProvided))
+		if j.ducted() && j.hasBars() {
+			b.Step(ec2.BarsAlone)
+			b.Decide(ec2.BarsReach)
+		}
+	})
+}
+
+// maximumSteel checks the whole steel of the section.
+func (j *job) maximumSteel(c *trace.Chapter) {
+	takes := trace.Take(j.parameters, j.gross, j.tendonStrengths)
 	if j.hasBars() {
-		r := j.m.Bars.Rows[0]
-		strength, source = r.Fyk.Literal, given(r.Fyk)
+		takes = append(takes, trace.Take(j.barStrengths)...)
 	}
-	b.Given(def("reference-strength", "f_yk", "Yield strength that the minimum is expressed in", "MPa"), strength, source)
-	b.Steps(ec2.TensionPartDepth, ec2.TensionPartArea, ec2.TensionWidth)
-	minimum, _ := j.formula(ec2.MinimumSteel)
-	b.Step(minimum)
-	if minimum != ec2.MinimumSteel {
-		b.Require(ec2.MinimumSteelPositive)
-	}
-	b.Step(pick(j.hasBars(), ec2.TensionSteelWithBars, ec2.TensionSteel))
-	b.Check(ec2.MinimumSteelProvided)
+	b := c.Block("maximum-steel", "Maximum steel", nil, takes...)
 	maximum, _ := j.formula(ec2.MaximumSteel)
 	b.Step(maximum)
 	if maximum != ec2.MaximumSteel {
@@ -102,12 +339,9 @@ func (j *job) steelLimits(c *trace.Chapter) {
 	b.Check(ec2.MaximumSteelKept)
 }
 
-// hogging checks the stations where the least moment is negative: the ends beyond the bearings.
-func (j *job) hogging(c *trace.Chapter) {
-	b := c.Block("hogging", "Hogging moments of the loads", j.stations, trace.Take(j.parameters, j.strengths, j.gross, j.ultimate)...)
-	yes, _ := b.Choose(ec2.Hogging)
-	b.On(yes, func() {
-		b.Steps(ec2.OverhangStress, ec2.PlainTensileStrength)
-		b.Check(ec2.HoggingResisted)
-	})
+// axialForce is an axial force beside which the section is asked for its resistance.
+type axialForce struct {
+	slug, words string
+	block       *trace.Block // gives N_Ed; nil for none
+	first       bool
 }

@@ -34,31 +34,55 @@ func (j *job) verdictChapter(c *trace.Chapter) {
 // remarks are outcomes that no check fails on but that a reader of the verdict must know.
 func (j *job) remarks() string {
 	var out []string
-	for _, r := range []struct{ key, words string }{
-		{"ultimate.bending/outermost-yields", "**Brittle:** the section is over-reinforced, the concrete crushes before the outermost row yields"},
-		{"ultimate.bending/partly-compressed", "**Brittle:** the section is wholly compressed and no resistance is counted"},
-		{"ultimate.bending/every-row-anchored", "A row that counts is not anchored up to its design strength and would slip before it yields"},
-		{"ultimate.cracked/cracked-at-ultimate", ""},
-	} {
-		c, ok := j.n.Entry(r.key).(*trace.Choice)
-		if !ok {
-			continue
-		}
-		at, yes := 0, false
-		for _, o := range c.Outcomes {
-			yes = yes || o == trace.Yes
-			if o == trace.No {
-				at++
+	for _, q := range j.asked {
+		title := lowered(q.title) + ": "
+		for _, r := range []struct{ id, words string }{
+			{"outermost-yields", "**Brittle:** the section is over-reinforced, the concrete crushes before the outermost row yields"},
+			{"partly-compressed", "**Brittle:** the section is wholly compressed and no resistance is counted"},
+			{"above-zero-curvature", "The resistance lies below the moment at which the section is without curvature"},
+			{"every-row-anchored", "A row that counts is not anchored up to its design strength and would slip before it yields"},
+		} {
+			c, ok := j.n.Entry(q.block.Path() + "/" + r.id).(*trace.Choice)
+			if !ok {
+				continue
+			}
+			if at := count(c, trace.No); at > 0 {
+				out = append(out, fmt.Sprintf("%s (%s[%s](#%s)), at %d of %d stations: %s.", r.words, pick(len(j.asked) > 1, title, ""), c.Number, c.Key, at, len(c.Outcomes), runs(c, trace.No)))
 			}
 		}
-		switch {
-		case r.words == "" && !yes:
-			out = append(out, fmt.Sprintf("No station cracks in bending at the ultimate limit state ([%s](#%s)): the checks with the tension added by shear and of cracking before failure are not needed.", c.Number, c.Key))
-		case r.words != "" && at > 0:
-			out = append(out, fmt.Sprintf("%s ([%s](#%s)), at %d of %d stations: %s.", r.words, c.Number, c.Key, at, len(c.Outcomes), runs(c, trace.No)))
+	}
+	cracks := 0
+	var choice *trace.Choice
+	j.n.Each(func(_ *trace.Chapter, _ *trace.Block, e trace.Entry) {
+		if c, ok := e.(*trace.Choice); ok && strings.HasSuffix(c.Key, "/cracked-at-ultimate") {
+			cracks += count(c, trace.Yes)
+			choice = c
 		}
+	})
+	if choice != nil && cracks == 0 {
+		words := "Failure announces itself by method B of 5.10.1(6), pretensioned tendons in bond"
+		if j.ducted() {
+			words = "Cracking before failure is not asked for"
+		}
+		out = append(out, fmt.Sprintf("No station cracks in bending at the ultimate limit state ([%s](#%s)). %s.", choice.Number, choice.Key, words))
+	}
+	if c, ok := j.n.Entry("ultimate.minimum-steel/bars-reach").(*trace.Choice); ok && count(c, trace.No) > 0 {
+		out = append(out, fmt.Sprintf("The bars alone do not reach the minimum steel ([%s](#%s)), at %d stations: another method of 5.10.1(6) must show that the loss of tendons gives warning.", c.Number, c.Key, count(c, trace.No)))
+	} else if j.ducted() && !ok {
+		out = append(out, "There are no bars: another method of 5.10.1(6) than A must show that the loss of tendons gives warning.")
 	}
 	return strings.Join(out, "\n\n")
+}
+
+// count is how many stations have an outcome.
+func count(c *trace.Choice, want trace.Outcome) int {
+	n := 0
+	for _, o := range c.Outcomes {
+		if o == want {
+			n++
+		}
+	}
+	return n
 }
 
 // runs names the stretches of stations that have an outcome, "bearing A … 0.15 l, 0.85 l … bearing B".
@@ -122,8 +146,9 @@ func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 	}
 	for _, k := range failing {
 		if !found[k.Key] {
-			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: more tendons in the lowest row and in a further row as far as they fit, fewer tendons, two bars up to 25 mm, concrete up to 90 MPa, depth up to %d mm more.",
-				k.Name, k.Number, 50*remedies[len(remedies)-1].steps))
+			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: %s, concrete up to 90 MPa, depth up to %d mm more.", k.Name, k.Number,
+				pick(j.ducted(), "up to 8 strands more in each duct as far as they fit, up to 8 strands less", "more tendons in the lowest row and in a further row as far as they fit, fewer tendons, two bars up to 25 mm"),
+				50*remedies[len(remedies)-1].steps))
 		}
 	}
 }
@@ -159,6 +184,7 @@ func keyed(key string) string {
 func (j *job) try(r remedy, step int) (words string, n *trace.Note) {
 	m := *j.m
 	m.Strands.Rows = slices.Clone(m.Strands.Rows)
+	m.Ducts.Rows = slices.Clone(m.Ducts.Rows)
 	m.Bars.Rows = slices.Clone(m.Bars.Rows)
 	if words = r.apply(&m, step); words == "" {
 		return "", nil
@@ -184,12 +210,18 @@ func (j *job) noneNew(n *trace.Note) bool {
 // elevation draws what the member is, in one picture.
 func (j *job) elevation(b *trace.Block) {
 	plots := []trace.Plot{{Role: "length", Key: "given.span/length"}, {Role: "depth", Key: "given.section/depth"},
-		{Role: "height", Key: "given.section/part-height"}, {Role: "lower", Key: "given.section/part-lower"}, {Role: "upper", Key: "given.section/part-upper"},
 		{Role: "span", Key: "section.flange/span"}, {Role: "support-A", Key: "given.span/bearing-a"}, {Role: "support-B", Key: "given.span/bearing-b"},
 		{Role: "bearing-A", Key: "given.span/bearing-a-length"}, {Role: "bearing-B", Key: "given.span/bearing-b-length"},
-		{Role: "level", Key: "given.tendons/level"}, {Role: "debonded", Key: "given.tendons/debonded-length"},
-		{Role: "load-q", Key: "actions.loads/load"}, {Role: "load-F", Key: "given.actions/point"},
+		{Role: "load-q", Key: j.loadKey()}, {Role: "load-F", Key: "given.actions/point"},
 		{Role: "load-from", Key: "given.actions/from"}, {Role: "load-to", Key: "given.actions/to"}}
+	plots = slices.Insert(plots, len(plots)-4, j.tendonElevation()...)
+	plots = append(plots, j.outlinePlots(j.hasTopping())...)
+	if _, b := j.overhangs(); b {
+		plots = append(plots, trace.Plot{Role: "overhang-B", Key: "given.span/overhang-b"})
+	}
+	if j.hasAxial() {
+		plots = append(plots, trace.Plot{Role: "load-N", Key: "given.actions/axial"})
+	}
 	if j.hasBars() {
 		plots = append(plots, trace.Plot{Role: "bar-level", Key: "given.bars/level"})
 	}

@@ -62,6 +62,13 @@ var BarBondConditions = clause.Define(&clause.Formula{
 	Examples: append(hand("0.7", "y_{s,j} = 610 mm", "h = 650 mm", "d_{s,j} = 40 mm"), hand("1.0", "y_{s,j} = 50 mm", "h = 650 mm", "d_{s,j} = 600 mm")...),
 })
 
+// ToppedBarBondConditions is η_1 where bars may lie in a topping, which is poured by itself from the top of the member on.
+var ToppedBarBondConditions = clause.Define(&clause.Formula{
+	ID: "topped-bar-bond-conditions", Name: "Factor of the bond conditions of each row: good, but poor in the upper zone of the pour that it lies in", Ref: en("8.4.2(2) Figure 8.2", ""),
+	Text: "η_{1,j} = cases(k_{t,j} = 1 and y_{s,j} − h ≤ 250·[mm]: 1.0; k_{t,j} = 1: 0.7; y_{s,j} ≤ 250·[mm] or (h > 600·[mm] and d_{s,j} ≥ 300·[mm]): 1.0; otherwise: 0.7)", Unit: "", Digits: 2,
+	Examples: hand("1.0, 0.7, 1.0", "k_{t,j} = 1, 0, 0", "y_{s,j} = 1000 mm, 850 mm, 50 mm", "h = 900 mm", "d_{s,j} = -100 mm, 50 mm, 850 mm"),
+})
+
 // TransmissionBond is f_bpt.
 var TransmissionBond = clause.Define(&clause.Formula{
 	ID: "transmission-bond", Name: "Bond stress at transmission", Ref: en("8.10.2.2(1)", "8.15"),
@@ -92,14 +99,14 @@ var UpperTransmissionLength = clause.Define(&clause.Formula{
 
 // BondStrengthCap is f_ctk,0.05 of C60/75, above which bond is not taken to grow.
 var BondStrengthCap = clause.Define(&clause.Formula{
-	ID: "bond-strength-cap", Name: "Tensile strength of C60/75, above which bond is not taken to grow", Ref: en("8.10.2.3(3)", ""),
+	ID: "bond-strength-cap", Name: "Tensile strength of C60/75, above which bond is not taken to grow", Ref: en("8.4.2(2), 8.10.2.3(3)", ""),
 	Text: "f_ctk60 = 0.7·2.12·ln(1 + (60 + 8)/10)·[MPa]", Unit: "MPa",
 	Examples: []clause.Example{by(table31+", C60/75", clause.Recalled, "3.05 MPa")},
 })
 
 // BondTensileStrength is f_ctd for bond.
 var BondTensileStrength = clause.Define(&clause.Formula{
-	ID: "bond-tensile-strength", Name: "Design tensile strength for bond", Ref: en("8.10.2.3(2), (3)", "3.16"),
+	ID: "bond-tensile-strength", Name: "Design tensile strength for bond", Ref: en("8.4.2(2), 8.10.2.3(2), (3)", "3.16"),
 	Text: "f_ctd = α_ct·min(f_{ctk,0.05}; f_ctk60)/γ_C", Unit: "MPa",
 	Examples: hand("1.9 MPa", "α_ct = 1.0", "f_{ctk,0.05} = 2.85 MPa", "f_ctk60 = 3.0484 MPa", "γ_C = 1.5"),
 })
@@ -157,6 +164,20 @@ var BarBond = clause.Define(&clause.Formula{
 	Text: "f_{bd,j} = 2.25·η_{1,j}·η_{2,j}·f_ctd", Unit: "MPa",
 	Examples: hand("4.275 MPa", "η_{1,j} = 1.0", "η_{2,j} = 1.0", "f_ctd = 1.9 MPa"),
 })
+
+// ToppedBarBond is f_bd where bars may lie in a topping, and ToppingBondTensileStrength is f_ctd for bond there.
+var (
+	ToppingBondTensileStrength = clause.Define(&clause.Formula{
+		ID: "topping-bond-tensile-strength", Name: "Design tensile strength of the topping for bond", Ref: en("8.4.2(2)", "3.16"),
+		Text: "f_{ctd,t} = α_ct·min(f_{ctk,0.05,t}; f_ctk60)/γ_C", Unit: "MPa",
+		Examples: hand("1.3517 MPa", "α_ct = 1.0", "f_{ctk,0.05,t} = 2.0275 MPa", "f_ctk60 = 3.0484 MPa", "γ_C = 1.5"),
+	})
+	ToppedBarBond = clause.Define(&clause.Formula{
+		ID: "topped-bar-bond", Name: "Bond strength of ribbed bars, in the concrete that they lie in", Ref: en("8.4.2(2)", "8.2"),
+		Text: "f_{bd,j} = 2.25·η_{1,j}·η_{2,j}·cases(k_{t,j} = 1: f_{ctd,t}; otherwise: f_ctd)", Unit: "MPa",
+		Examples: hand("3.0411 MPa, 4.275 MPa", "η_{1,j} = 1.0, 1.0", "η_{2,j} = 1.0, 1.0", "k_{t,j} = 1, 0", "f_{ctd,t} = 1.3516 MPa", "f_ctd = 1.9 MPa"),
+	})
+)
 
 // BarBondSize is η_2.
 var BarBondSize = clause.Define(&clause.Formula{

@@ -1,6 +1,10 @@
 package ec2
 
-import "soffit/calc/clause"
+import (
+	"strings"
+
+	"soffit/calc/clause"
+)
 
 // Combinations of actions, EN 1990 6.4.3, 6.5.3 and A1. Load i is permanent (k_{G,i} = 1) or variable (k_{G,i} = 0); each
 // load counts with its upper factor where that is unfavourable and with its lower one where it is favourable,
@@ -136,3 +140,77 @@ var QuasiPermanentMoment = clause.Define(&clause.Formula{
 	Text: "M_qp = Σ_i(max((k_{G,i} + (1 − k_{G,i})·ψ_{2,i})·M_i; k_{G,i}·M_i))", Unit: "kN·m", Digits: 6,
 	Examples: hand("106 kN·m", "k_{G,i} = 1, 0", "ψ_{2,i} = 0, 0.3", "M_i = 100 kN·m, 20 kN·m"),
 })
+
+// The least service moments, of a member that hogs.
+var (
+	CharacteristicMomentMin, CharacteristicEnvelopeMin = serviceLeast("characteristic", "Least moment, characteristic", "char", en1990("6.5.3(2)a", "6.14b"))
+	FrequentMomentMin, FrequentEnvelopeMin             = serviceLeast("frequent", "Least moment, frequent", "freq", en1990("6.5.3(2)b", "6.15b"))
+	QuasiPermanentMomentMin                            = clause.Define(&clause.Formula{
+		ID: "quasi-permanent-least", Name: "Least moment, quasi-permanent", Ref: en1990("6.5.3(2)c", "6.16b"),
+		Text: "M_{qp,min} = Σ_i(min((k_{G,i} + (1 − k_{G,i})·ψ_{2,i})·M_i; k_{G,i}·M_i))", Unit: "kN·m", Digits: 6,
+		Examples: hand("94 kN·m", "k_{G,i} = 1, 0", "ψ_{2,i} = 0, 0.3", "M_i = 100 kN·m, -20 kN·m"),
+	})
+)
+
+func serviceLeast(id, name, sub string, ref clause.Ref) (moment, least *clause.Formula) {
+	moment = clause.Define(&clause.Formula{
+		ID: id + "-moment-least", Name: name + ", each combination", Ref: ref,
+		Text: "M_{" + sub + ",min,n} = Σ_i(min((k_{G,i} + (1 − k_{G,i})·ψ_{i,n})·M_i; k_{G,i}·M_i))", Unit: "kN·m", Digits: 6,
+		Examples: hand("86 kN·m", "k_{G,i} = 1, 0", "ψ_{i,n} = 0, 0.7", "M_i = 100 kN·m, -20 kN·m"),
+	})
+	least = envelope(id+"-least", name, "M_{"+sub+",min}", "min", "M_{"+sub+",min,n}", "kN·m")
+	return moment, least
+}
+
+// Reactions are the reactions at a bearing, upward positive: the largest and the least of each combination, and over the
+// combinations.
+type Reactions struct {
+	Each, EachLeast, Largest, Least *clause.Formula
+}
+
+func ultimateReactions(bearing, name string) Reactions {
+	id, symbol, effect := "-reaction-"+strings.ToLower(bearing), "R_{"+bearing+",Ed", "R_{"+bearing+",i}"
+	return Reactions{
+		ultimate("ultimate"+id, "Largest reaction at "+name+" of each combination", symbol+",n}", "max", effect),
+		ultimate("ultimate"+id+"-least", "Least reaction at "+name+" of each combination", symbol+",min,n}", "min", effect),
+		envelope("design"+id, "Largest reaction at "+name+", ultimate limit state", symbol+"}", "max", symbol+",n}", "kN"),
+		envelope("design"+id+"-least", "Least reaction at "+name+", ultimate limit state", symbol+",min}", "min", symbol+",min,n}", "kN"),
+	}
+}
+
+func characteristicReactions(bearing, name string) Reactions {
+	id, symbol, effect := "-reaction-"+strings.ToLower(bearing), "R_{"+bearing+",k", "R_{"+bearing+",i}"
+	each := func(id, name, symbol, op, want string) *clause.Formula {
+		return clause.Define(&clause.Formula{
+			ID: id, Name: name, Ref: en1990("6.5.3(2)a", "6.14b"),
+			Text: symbol + " = Σ_i(" + op + "((k_{G,i} + (1 − k_{G,i})·ψ_{i,n})·" + effect + "; k_{G,i}·" + effect + "))", Unit: "kN", Digits: 6,
+			Examples: hand(want, "k_{G,i} = 1, 0, 0", "ψ_{i,n} = 0, 0.7, 1", effect+" = 100 kN, 20 kN, -30 kN"),
+		})
+	}
+	return Reactions{
+		each("characteristic"+id, "Largest reaction at "+name+", characteristic, each combination", symbol+",n}", "max", "114 kN"),
+		each("characteristic"+id+"-least", "Least reaction at "+name+", characteristic, each combination", symbol+",min,n}", "min", "70 kN"),
+		envelope("service"+id, "Largest reaction at "+name+", characteristic", symbol+"}", "max", symbol+",n}", "kN"),
+		envelope("service"+id+"-least", "Least reaction at "+name+", characteristic", symbol+",min}", "min", symbol+",min,n}", "kN"),
+	}
+}
+
+// Reactions at bearings A and B, at the ultimate limit state and in the characteristic combination.
+var (
+	UltimateReactions       = []Reactions{ultimateReactions("A", "bearing A"), ultimateReactions("B", "bearing B")}
+	CharacteristicReactions = []Reactions{characteristicReactions("A", "bearing A"), characteristicReactions("B", "bearing B")}
+)
+
+// Axial force, compression positive: the same at every station.
+var (
+	UltimateAxial    = ultimate("ultimate-axial", "Greatest axial force of each combination, compression positive", "N_{Ed,n}", "max", "N_i")
+	UltimateAxialMin = ultimate("ultimate-axial-least", "Least axial force of each combination", "N_{Ed,min,n}", "min", "N_i")
+	AxialEnvelope    = envelope("axial", "Greatest axial force, compression positive", "N_{Ed,max}", "max", "N_{Ed,n}", "kN")
+	AxialEnvelopeMin = envelope("axial-least", "Least axial force", "N_{Ed,min}", "min", "N_{Ed,min,n}", "kN")
+)
+
+// The axial force beside which the section is asked for its resistance.
+var (
+	GreatestAxial = clause.Define(&clause.Formula{ID: "greatest-axial", Name: "Axial force, the greatest of the combinations, compression positive", Text: "N_Ed = N_{Ed,max}", Unit: "kN", Digits: 6, Examples: hand("162 kN", "N_{Ed,max} = 162 kN")})
+	LeastAxial    = clause.Define(&clause.Formula{ID: "least-axial", Name: "Axial force, the least of the combinations, compression positive", Text: "N_Ed = N_{Ed,min}", Unit: "kN", Digits: 6, Examples: hand("-45 kN", "N_{Ed,min} = -45 kN")})
+)

@@ -4,16 +4,37 @@ import "soffit/calc/clause"
 
 // Cracks at the ultimate limit state, and what they ask of the tendons.
 
-// BottomStress is the tension of the bottom fibre with the design moment, section uncracked.
-var BottomStress = clause.Define(&clause.Formula{
-	ID: "bottom-stress", Name: "Tension at the bottom with the design moment, section uncracked", Ref: en("8.10.2.3(1)", ""),
-	Text: "σ_b = (M_Ed − M_P)/W_b − P_d/A_c", Unit: "MPa",
-	Examples: hand("8.4904 MPa", "M_Ed = 1279.77 kN·m", "M_P = 474.31 kN·m", "W_b = 68744.3 10³ mm³", "P_d = 840.79 kN", "A_c = 260600 mm²"),
-})
+// The tension of the edge that the moment stretches, section uncracked: at the bottom, at the top where the moment hogs, and
+// of a member with topping, where what acts before the topping is hard acts on the bare section and the rest on the composite
+// one; each also beside an axial force.
+var (
+	BottomStress, AxialBottomStress = edgeStresses("bottom-stress", "Tension at the bottom with the design moment, section uncracked", "(M_Ed − M_P)/W_b",
+		"8.4904 MPa", "M_Ed = 1279.77 kN·m", "M_P = 474.31 kN·m", "W_b = 68744.3 10³ mm³", "P_d = 840.79 kN", "A_c = 260600 mm²")
+	TopStress, AxialTopStress = edgeStresses("top-stress", "Tension at the top with the hogging design moment, section uncracked", "(M_{Ed,h} + M_P)/W_t",
+		"4 MPa", "M_{Ed,h} = 400 kN·m", "M_P = 100 kN·m", "W_t = 100000 10³ mm³", "P_d = 200 kN", "A_c = 200000 mm²")
+	ToppedBottomStress, AxialToppedBottomStress = edgeStresses("topped-bottom-stress", "Tension at the bottom with the design moment, sections uncracked: bare member with its permanent loads at their upper factor, then composite", "(max(γ_{G,sup}·M_0; M_0) − M_P)/W_b + (M_Ed − max(γ_{G,sup}·M_0; M_0))/W_{co,b}",
+		"4 MPa", "M_0 = 300 kN·m", "γ_{G,sup} = 1.0", "M_P = 500 kN·m", "W_b = 100000 10³ mm³", "M_Ed = 1200 kN·m", "W_{co,b} = 150000 10³ mm³", "P_d = 0 kN", "A_c = 200000 mm²")
+
+	ToppedTopStress = clause.Define(&clause.Formula{
+		ID: "topped-top-stress", Name: "Tension at the top of the topping with the hogging moment after it is hard, section uncracked", Ref: en("8.10.2.3(1)", ""),
+		Text: "σ_b = (M_{Ed,h} + M_0)/W_{co,o}", Unit: "MPa",
+		Examples: hand("3 MPa", "M_{Ed,h} = 400 kN·m", "M_0 = -100 kN·m", "W_{co,o} = 100000 10³ mm³")})
+)
+
+func edgeStresses(id, name, bending, want string, given ...string) (*clause.Formula, *clause.Formula) {
+	define := func(id, force string, given []string) *clause.Formula {
+		return clause.Define(&clause.Formula{ID: id, Name: name, Ref: en("8.10.2.3(1)", ""), Text: "σ_b = " + bending + " − " + force + "/A_c", Unit: "MPa", Examples: hand(want, given...)})
+	}
+	return define(id, "P_d", given), define("axial-"+id, "(P_d + N_Ed)", append(given[:len(given):len(given)], "N_Ed = 0 kN"))
+}
 
 // CrackedAtUltimate asks where the section cracks in bending at the ultimate limit state.
 var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
 	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage"}
+
+// CrackedOfPostTensioned asks the same of a post-tensioned member, whose tendons need no bond to be anchored.
+var CrackedOfPostTensioned = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("5.10.1(5)P", ""),
+	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending"}
 
 // Resists asks whether any resistance is counted at the station.
 var Resists = &clause.Condition{ID: "resists", Name: "Resistance at the station", Text: "M_Rd > 0·[kN·m]", Yes: "counted", No: "no resistance is counted here: bending fails already"}
@@ -48,9 +69,21 @@ var MomentWithShear = clause.Define(&clause.Formula{
 var BendingWithShear = &clause.Check{ID: "bending-with-shear", Name: "Bending with the tension added by shear", Ref: en("6.2.3(7)", "6.18"),
 	Demand: "M_{Ed,V}", Limit: "M_Rd"}
 
+// HoggingWithShear and its moments are the same where the moment hogs.
+var (
+	HoggingMomentWithShear = clause.Define(&clause.Formula{
+		ID: "hogging-moment-with-shear", Name: "Hogging moment with the tension that shear adds, at most the largest of the member", Ref: en("6.2.3(7)", "6.18"),
+		Text: "M_{Ed,V} = min(M_{Ed,h,max}; M_{Ed,h} + ΔM)", Unit: "kN·m", Digits: 6,
+		Examples: hand("900 kN·m", "M_{Ed,h,max} = 1200 kN·m", "M_{Ed,h} = 800 kN·m", "ΔM = 100 kN·m")})
+	HoggingWithShear     = &clause.Check{ID: "hogging-with-shear", Name: "Hogging with the tension added by shear", Ref: en("6.2.3(7)", "6.18"), Demand: "M_{Ed,V}", Limit: "M_Rd"}
+	LargestHoggingMoment = clause.Define(&clause.Formula{
+		ID: "largest-hogging-moment", Name: "Largest hogging design moment of the member", Text: "M_{Ed,h,max} = M_{Ed,h}", Unit: "kN·m", Digits: 6, Examples: hand("120 kN·m", "M_{Ed,h} = 120 kN·m")})
+	NoLargerHoggingMoment = &clause.Condition{ID: "no-larger-hogging-moment", Name: "No station has a larger hogging moment", Text: "M_{Ed,h} ≤ M_{Ed,h,max}", Yes: "not larger", No: "larger"}
+)
+
 // LargestMoment is the largest design moment of the span.
 var LargestMoment = clause.Define(&clause.Formula{
-	ID: "largest-moment", Name: "Largest design moment of the span", Text: "M_{Ed,max} = M_Ed", Unit: "kN·m", Digits: 6,
+	ID: "largest-moment", Name: "Largest design moment at the stations", Text: "M_{Ed,max} = M_Ed", Unit: "kN·m", Digits: 6,
 	Examples: hand("1279.77 kN·m", "M_Ed = 1279.77 kN·m"),
 })
 

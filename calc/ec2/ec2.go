@@ -8,8 +8,9 @@ import "soffit/calc/clause"
 
 // Documents cited.
 const (
-	Code    = "EN 1992-1-1"
-	Actions = "EN 1990"
+	Code      = "EN 1992-1-1"
+	Actions   = "EN 1990"
+	Execution = "EN 1991-1-6"
 )
 
 func en(clauseNumber, equation string) clause.Ref {
@@ -18,6 +19,10 @@ func en(clauseNumber, equation string) clause.Ref {
 
 func en1990(clauseNumber, equation string) clause.Ref {
 	return clause.Ref{Document: Actions, Clause: clauseNumber, Equation: equation}
+}
+
+func en1991(clauseNumber, equation string) clause.Ref {
+	return clause.Ref{Document: Execution, Clause: clauseNumber, Equation: equation}
 }
 
 func by(source string, grade clause.Grade, want string, given ...string) clause.Example {

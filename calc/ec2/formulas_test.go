@@ -53,7 +53,7 @@ func TestPrintParse(t *testing.T) {
 	}
 }
 
-// TestFormulaIDs holds the IDs against the list of those ever used: they are append-only.
+// TestFormulaIDs holds the IDs against the lists of those in use and of those given up, which are never used again.
 func TestFormulaIDs(t *testing.T) {
 	const file = "testdata/formula-ids.txt"
 	seen := map[string]bool{}
@@ -73,6 +73,15 @@ func TestFormulaIDs(t *testing.T) {
 	data, err := os.ReadFile(file)
 	if err != nil {
 		t.Fatal(err)
+	}
+	gone, err := os.ReadFile("testdata/retired-ids.txt")
+	if err != nil {
+		t.Fatal(err)
+	}
+	for _, id := range strings.Fields(string(gone)) {
+		if seen[id] {
+			t.Errorf("ID %s was given up and is used again", id)
+		}
 	}
 	listed := map[string]bool{}
 	for _, id := range strings.Fields(string(data)) {

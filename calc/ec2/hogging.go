@@ -7,8 +7,8 @@ import "soffit/calc/clause"
 // OverhangStress is the tension at the top over a bearing from external loads.
 var OverhangStress = clause.Define(&clause.Formula{
 	ID: "hogging-stress", Name: "Tension at the top from the hogging moment of the loads alone, section uncracked", Ref: en("12.3.1(2)", ""),
-	Text: "σ_ct = −M_{Ed,min}/W_t", Unit: "MPa",
-	Examples: hand("0.002 MPa", "M_{Ed,min} = -0.16 kN·m", "W_t = 80000 10³ mm³"),
+	Text: "σ_ct = M_{Ed,h}/W_t", Unit: "MPa",
+	Examples: hand("0.002 MPa", "M_{Ed,h} = 0.16 kN·m", "W_t = 80000 10³ mm³"),
 })
 
 // PlainTensileStrength is f_ctd,pl.
@@ -19,7 +19,7 @@ var PlainTensileStrength = clause.Define(&clause.Formula{
 })
 
 // Hogging asks where the moment is negative.
-var Hogging = &clause.Condition{ID: "hogging", Name: "Sign of the least moment", Ref: clause.Ref{}, Text: "M_{Ed,min} < 0·[kN·m]",
+var Hogging = &clause.Condition{ID: "hogging", Name: "Sign of the least moment", Ref: clause.Ref{}, Text: "M_{Ed,h} > 0·[kN·m]",
 	Yes: "hogging", No: "no hogging"}
 
 // HoggingResisted is σ_ct ≤ f_ctd,pl.

@@ -4,24 +4,56 @@ import "soffit/calc/clause"
 
 // Minimum and maximum steel, 9.2.1.1.
 
-// TensionPartDepth is the depth of each part below the centroid.
+// The tension zone lies beyond the centroid, at the depth z_0 from the compressed edge.
+
+// TensionPartDepth is the depth of each part beyond the centroid.
 var TensionPartDepth = clause.Define(&clause.Formula{
-	ID: "tension-part-depth", Name: "Depth of each part below the centroid", Text: "c_{t,n} = max(0; min(h_{c,n}; y_cg − y_{u,n}))", Unit: "mm", Digits: 6,
-	Examples: hand("300 mm", "h_{c,n} = 700 mm", "y_cg = 500 mm", "y_{u,n} = 200 mm"),
+	ID: "tension-part-depth", Name: "Depth of each part in the tension zone, beyond the centroid", Text: "c_{t,n} = max(0; min(h_{c,n}; z_{c,n} + h_{c,n} − z_0))", Unit: "mm", Digits: 6,
+	Examples: hand("300 mm", "h_{c,n} = 700 mm", "z_0 = 500 mm", "z_{c,n} = 100 mm"),
 })
 
-// TensionPartArea is the area of each part below the centroid.
+// TensionPartArea is the area of each part beyond the centroid.
 var TensionPartArea = clause.Define(&clause.Formula{
-	ID: "tension-part-area", Name: "Area of each part below the centroid",
-	Text: "A_{ct,n} = c_{t,n}·(b_{u,n} + (b_{o,n} − b_{u,n})·c_{t,n}/(2·h_{c,n}))", Unit: "mm²", Digits: 7,
-	Examples: hand("42000 mm²", "c_{t,n} = 300 mm", "b_{u,n} = 140 mm", "b_{o,n} = 140 mm", "h_{c,n} = 700 mm"),
+	ID: "tension-part-area", Name: "Area of each part in the tension zone",
+	Text: "A_{ct,n} = c_{t,n}·(b_{2,n} + (b_{1,n} − b_{2,n})·c_{t,n}/(2·h_{c,n}))", Unit: "mm²", Digits: 7,
+	Examples: hand("42000 mm²", "c_{t,n} = 300 mm", "b_{2,n} = 140 mm", "b_{1,n} = 140 mm", "h_{c,n} = 700 mm"),
 })
+
+// TensionVoidReach and TensionVoidArea are what round parts take from the tension zone.
+var (
+	TensionVoidReach = clause.Define(&clause.Formula{
+		ID: "tension-void-reach", Name: "Reach of the compression zone into each round part, from the tip of the circle",
+		Text: "t_{t,m} = max(t_{1,m}; min(t_{2,m}; z_0 − z_{v,m} + r_{v,m}))", Unit: "mm", Digits: 7,
+		Examples: hand("75 mm", "t_{1,m} = 0 mm", "t_{2,m} = 150 mm", "z_0 = 100 mm", "z_{v,m} = 100 mm", "r_{v,m} = 75 mm"),
+	})
+	TensionVoidArea = clause.Define(&clause.Formula{
+		ID: "tension-void-area", Name: "Area that the tension zone loses to the round parts",
+		Text: "A_{vt,m} = n_{v,m}·(" + segment("t_{2,m}") + " − " + segment("t_{t,m}") + ")", Unit: "mm²", Digits: 7,
+		Examples: hand("8835.729 mm²", "n_{v,m} = 1", "r_{v,m} = 75 mm", "t_{2,m} = 150 mm", "t_{t,m} = 75 mm"),
+	})
+)
 
 // TensionWidth is b_t.
 var TensionWidth = clause.Define(&clause.Formula{
-	ID: "tension-width", Name: "Mean width of the tension zone, below the centroid", Ref: en("9.2.1.1(1)", ""),
-	Text: "b_t = Σ_n(A_{ct,n})/y_cg", Unit: "mm",
-	Examples: hand("204 mm", "A_{ct,n} = 60000 mm², 42000 mm²", "y_cg = 500 mm"),
+	ID: "tension-width", Name: "Mean width of the tension zone", Ref: en("9.2.1.1(1)", ""),
+	Text: "b_t = Σ_n(A_{ct,n})/(h − z_0)", Unit: "mm",
+	Examples: hand("204 mm", "A_{ct,n} = 60000 mm², 42000 mm²", "h = 1100 mm", "z_0 = 600 mm"),
+})
+
+// TensionWidthWithVoids is b_t with round parts left out.
+var TensionWidthWithVoids = clause.Define(&clause.Formula{
+	ID: "tension-width-with-voids", Name: "Mean width of the tension zone, round parts left out", Ref: en("9.2.1.1(1)", ""),
+	Text: "b_t = (Σ_n(A_{ct,n}) − Σ_m(A_{vt,m}))/(h − z_0)", Unit: "mm",
+	Examples: hand("200 mm", "A_{ct,n} = 60000 mm², 42000 mm²", "A_{vt,m} = 2000 mm²", "h = 1100 mm", "z_0 = 600 mm"),
+})
+
+// BetweenBearings asks where the minimum at the bottom is needed of a member that reaches past its bearings.
+var BetweenBearings = &clause.Condition{ID: "between-bearings", Name: "Place of the station", Ref: en("9.2.1.1(1)", ""), Text: "x_A ≤ x_m ≤ x_B",
+	Yes: "between the bearings", No: "on an overhang: no minimum at the bottom"}
+
+// ToppingTensionWidth is b_t where the topping is stretched.
+var ToppingTensionWidth = clause.Define(&clause.Formula{
+	ID: "topping-tension-width", Name: "Width of the tension zone: the topping's", Ref: en("9.2.1.1(1)", ""), Text: "b_t = b_top", Unit: "mm", Examples: hand("1200 mm", "b_top = 1200 mm"),
 })
 
 // MinimumSteel is A_s,min, a national parameter.
@@ -44,12 +76,44 @@ var MaximumSteelPositive = &clause.Condition{ID: "maximum-steel-positive", Name:
 
 // The steel counted towards the minimum: rows bonded at the station.
 var TensionSteelWithBars, TensionSteel = steelSums(
-	&clause.Formula{ID: "tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk)", Unit: "mm²",
-		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")},
-	&clause.Formula{ID: "tension-steel", Name: "Steel counted: tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pm∞,i})/f_yk)", Unit: "mm²",
-		Examples: hand("1100.9 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pm∞,i} = 1145 MPa", "f_yk = 500 MPa")})
+	&clause.Formula{ID: "tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress, as far as it is anchored (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·min(1; (σ_{av,i} − σ_{pt,i})/max(f_{pd,i} − σ_{pt,i}; 1·[MPa]))·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1, 1", "A_{p,i} = 1112 mm², 500 mm²", "σ_{av,i} = 1426 MPa, 300 MPa", "f_{pd,i} = 1426 MPa, 1426 MPa", "f_{p0,1k,i} = 1640 MPa, 1640 MPa", "σ_{pt,i} = 1145 MPa, 300 MPa", "f_yk = 500 MPa")},
+	&clause.Formula{ID: "tension-steel", Name: "Steel counted: tendons by their strength left above the prestress, as far as it is anchored (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·min(1; (σ_{av,i} − σ_{pt,i})/max(f_{pd,i} − σ_{pt,i}; 1·[MPa]))·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1100.9 mm²", "t_{p,i} = 1, 1", "A_{p,i} = 1112 mm², 500 mm²", "σ_{av,i} = 1426 MPa, 300 MPa", "f_{pd,i} = 1426 MPa, 1426 MPa", "f_{p0,1k,i} = 1640 MPa, 1640 MPa", "σ_{pt,i} = 1145 MPa, 300 MPa", "f_yk = 500 MPa")})
+
+// AnchoredInFull asks where the minimum applies: where a row that counts is anchored up to its design strength.
+var AnchoredInFullWithBars, AnchoredInFull = &clause.Condition{ID: "anchored-in-full", Name: "Steel anchored in full in the tension zone", Ref: en("9.2.1.1(1), (2)", ""),
+	Text: "Σ_i(cases(t_{p,i} = 1 and σ_{av,i} ≥ f_{pd,i}: 1; otherwise: 0)) > 0 or (Σ_i(cases(d_{p,i} > z_0: 1; otherwise: 0)) = 0 and Σ_j(cases(t_{s,j} = 1 and σ_{sa,j} ≥ f_{yd,j}: 1; otherwise: 0)) > 0)", Yes: anchoredYes, No: anchoredNo},
+	&clause.Condition{ID: "anchored-in-full", Name: "Steel anchored in full in the tension zone", Ref: en("9.2.1.1(1), (2)", ""),
+		Text: "Σ_i(cases(t_{p,i} = 1 and σ_{av,i} ≥ f_{pd,i}: 1; otherwise: 0)) > 0", Yes: anchoredYes, No: anchoredNo}
+
+const (
+	anchoredYes = "a row is anchored in full here"
+	anchoredNo  = "no row is anchored in full here: unreinforced as far as the minimum goes"
+)
+
+// BarsAlone and BarsReach are method A of 5.10.1(6) for a post-tensioned member: bars that warn when tendons are lost.
+var (
+	BarsAlone = clause.Define(&clause.Formula{ID: "bars-alone", Name: "Bars alone in the tension zone", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} = Σ_j(t_{s,j}·A_{s,j})", Unit: "mm²",
+		Examples: hand("1570.8 mm²", "t_{s,j} = 1, 0", "A_{s,j} = 1570.8 mm², 804.2 mm²")})
+	BarsReach = &clause.Condition{ID: "bars-reach", Name: "Minimum steel by bars alone", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} ≥ A_{s,min}",
+		Yes: "the bars alone reach the minimum: they warn when tendons are lost", No: "the bars alone do not reach the minimum"}
+)
+
+// The same of a post-tensioned member, whose stress changes along the tendon.
+var PostTensionSteelWithBars, PostTensionSteel = steelSums(
+	&clause.Formula{ID: "post-tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")},
+	&clause.Formula{ID: "post-tension-steel", Name: "Steel counted: tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
+		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1100.9 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")})
+
+// MinimumSteelProvided is A_s,min ≤ A_s,prov; TopSteelProvided the same where the moment hogs.
+var TopSteelProvided = &clause.Check{ID: "minimum-top-steel-provided", Name: "Minimum steel in tension, at the top", Ref: en("9.2.1.1(1)", "9.1N"),
+	Demand: "A_{s,min}", Limit: "A_{s,prov}"}
 
 // MinimumSteelProvided is A_s,min ≤ A_s,prov.
 var MinimumSteelProvided = &clause.Check{ID: "minimum-steel-provided", Name: "Minimum steel in tension", Ref: en("9.2.1.1(1)", "9.1N"),

@@ -55,6 +55,13 @@ var BarArea = clause.Define(&clause.Formula{
 	Examples: hand("804.25 mm²", "n_{s,j} = 4", "φ_{s,j} = 16 mm"),
 })
 
+// BareBarArea is the area of a row of bars without those in a topping, which the bare member has not yet.
+var BareBarArea = clause.Define(&clause.Formula{
+	ID: "bare-bar-area", Name: "Area of the row in the bare member: none in the topping", Ref: clause.Ref{},
+	Text: "A_{s,j} = (1 − k_{t,j})·n_{s,j}·π/4·φ_{s,j}^2", Unit: "mm²",
+	Examples: hand("804.25 mm², 0 mm²", "k_{t,j} = 0, 1", "n_{s,j} = 4, 4", "φ_{s,j} = 16 mm, 16 mm"),
+})
+
 // BarDesignStrength is f_yd.
 var BarDesignStrength = clause.Define(&clause.Formula{
 	ID: "bar-design-strength", Name: "Design strength of the bars", Ref: en("3.2.7(2)", ""),

@@ -18,6 +18,12 @@ var LimitForceWithBars = clause.Define(&clause.Formula{
 	Examples: hand("1935.5 kN", "A_{p,i} = 1112 mm²", "σ_{av,i} = 1426.1 MPa", "A_{s,j} = 804.25 mm²", "σ_{sa,j} = 434.78 MPa"),
 })
 
+// SteelAnchoredAxially is SteelAnchored beside an axial force, which a tension must not exceed.
+var SteelAnchoredAxially = &clause.Condition{
+	ID: "steel-anchored-axially", Name: "Steel at the station", Ref: en("8.10.2.3", ""), Text: "F_lim > 0·[kN] and F_lim + N_Ed > 0·[kN]",
+	Yes: "steel is anchored here and holds the axial force", No: "no steel is anchored here, or not enough to hold the axial tension",
+}
+
 // SteelAnchored asks whether any steel counts at the station.
 var SteelAnchored = &clause.Condition{
 	ID: "steel-anchored", Name: "Steel at the station", Ref: en("8.10.2.3", ""), Text: "F_lim > 0·[kN]",
@@ -44,62 +50,21 @@ var NoResistanceCompressed = clause.Define(&clause.Formula{
 
 // FlangeTrial is the neutral axis with the block in the flange.
 var FlangeTrial = clause.Define(&clause.Formula{
-	ID: "axis-flange-trial", Name: "Depth of the neutral axis if the block lies in the top part", Ref: en("3.1.7(3) Figure 3.5", ""),
+	ID: "axis-flange-trial", Name: "Depth of the neutral axis if the block lies in the outermost part", Ref: en("3.1.7(3) Figure 3.5", ""),
 	Text: "x_f = F_lim/(λ·η·f_cd·b_f)", Unit: "mm", Digits: 7,
 	Examples: hand("118.936 mm", "F_lim = 1585.8 kN", "λ = 0.8", "η = 1", "f_cd = 33.333 MPa", "b_f = 500 mm"),
 })
 
-// BlockInFlange asks whether the block lies in the top part.
+// BlockInFlange asks whether the neutral axis, and with it the block, lies in the outermost part, a rectangle.
 var BlockInFlange = &clause.Condition{
-	ID: "block-in-flange", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_f ≤ h_f",
-	Yes: "block in the flange", No: "block below the flange",
+	ID: "block-in-flange", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "x_f ≤ h_f",
+	Yes: "neutral axis and block in the outermost part", No: "neutral axis beyond the outermost part: strains decide",
 }
 
 // BlockInRectangle is BlockInFlange for a section without a flange.
 var BlockInRectangle = &clause.Condition{
 	ID: "block-in-section", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_f ≤ h_f",
 	Yes: "block within the section", No: "block deeper than the section",
-}
-
-// HaunchRest is the area of the block below the flange.
-var HaunchRest = clause.Define(&clause.Formula{
-	ID: "block-rest", Name: "Area that the block needs below the flange", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "A_r = F_lim/(η·f_cd) − b_f·h_f", Unit: "mm²", Digits: 6,
-	Examples: hand("17500 mm²", "F_lim = 1350 kN", "η = 1", "f_cd = 20 MPa", "b_f = 500 mm", "h_f = 100 mm"),
-})
-
-// HaunchDepth is how far the block reaches into the haunch, whose width falls from b_f to b_w over h_h.
-var HaunchDepth = clause.Define(&clause.Formula{
-	ID: "block-in-haunch-depth", Name: "Depth of the block within the haunch, whose width falls from that of the flange to that of the web",
-	Ref:  en("3.1.7(3) Figure 3.5", ""),
-	Text: "c_h = h_h/(b_f − b_w)·(b_f − sqrt(b_f^2 − 2·(b_f − b_w)/h_h·A_r))", Unit: "mm", Digits: 6,
-	Examples: hand("42.0844 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "A_r = 17500 mm²"),
-})
-
-// HaunchTrial is the neutral axis with the lower edge of the block in the haunch below the flange.
-var HaunchTrial = clause.Define(&clause.Formula{
-	ID: "axis-haunch-trial", Name: "Depth of the neutral axis if the block ends in the haunch", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_h = (h_f + c_h)/λ", Unit: "mm", Digits: 7,
-	Examples: hand("177.606 mm", "h_f = 100 mm", "c_h = 42.0844 mm", "λ = 0.8"),
-})
-
-// BlockInHaunch asks whether the block ends in the haunch.
-var BlockInHaunch = &clause.Condition{
-	ID: "block-in-haunch", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "F_lim ≤ η·f_cd·(b_f·h_f + (b_f + b_w)/2·h_h)",
-	Yes: "block ends in the haunch", No: "block reaches the web",
-}
-
-// WebTrial is the neutral axis with the lower edge of the block in the web.
-var WebTrial = clause.Define(&clause.Formula{
-	ID: "axis-web-trial", Name: "Depth of the neutral axis if the block ends in the web", Ref: en("3.1.7(3) Figure 3.5", ""),
-	Text: "x_w = (h_f + h_h + (F_lim/(η·f_cd) − b_f·h_f − (b_f + b_w)/2·h_h)/b_w)/λ", Unit: "mm", Digits: 7,
-	Examples: hand("312.5 mm", "h_f = 100 mm", "h_h = 100 mm", "b_f = 500 mm", "b_w = 100 mm", "F_lim = 1700 kN", "η = 1", "f_cd = 20 MPa", "λ = 0.8"),
-})
-
-// BlockInWeb asks whether the block ends above the lower flange.
-var BlockInWeb = &clause.Condition{
-	ID: "block-in-web", Name: "Place of the block", Ref: en("3.1.7(3)", ""), Text: "λ·x_w ≤ z_w",
-	Yes: "block ends in the web", No: "block reaches below the web",
 }
 
 // Trial is a neutral axis that supposes every row of steel at its limit, by where the block ends: the strains
@@ -132,9 +97,5 @@ func trial(place, x string) Trial {
 	}
 }
 
-// The three trials.
-var (
-	TrialInFlange = trial("flange", "x_f")
-	TrialInHaunch = trial("haunch", "x_h")
-	TrialInWeb    = trial("web", "x_w")
-)
+// TrialInFlange is the trial with the block in the outermost part.
+var TrialInFlange = trial("flange", "x_f")

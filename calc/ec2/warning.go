@@ -1,6 +1,10 @@
 package ec2
 
-import "soffit/calc/clause"
+import (
+	"strings"
+
+	"soffit/calc/clause"
+)
 
 // Failure with warning, 5.10.1(5)P: cracks form before the resistance is spent when the load grows.
 
@@ -16,12 +20,29 @@ var InitialMoment = clause.Define(&clause.Formula{
 	Examples: hand("600.84 kN·m", "A_{p,i} = 1112 mm²", "σ_{pi,i} = 1228 MPa", "e_i = 440 mm"),
 })
 
-// CrackingMoment is M_cr with the greatest prestress.
-var CrackingMoment = clause.Define(&clause.Formula{
-	ID: "cracking-moment", Name: "Greatest cracking moment: bottom fibre at its mean tensile strength, greatest prestress", Ref: en("5.10.1(5)P, (6)", ""),
-	Text: "M_cr = (f_ctm + P_i0/A_c)·W_b + M_Pi", Unit: "kN·m",
-	Examples: hand("1210.5 kN·m", "f_ctm = 4.0716 MPa", "P_i0 = 1273.2 kN", "A_c = 420000 mm²", "W_b = 91532 10³ mm³", "M_Pi = 560.35 kN·m"),
-})
+// The cracking moment of the edge that the moment stretches, its mean tensile strength on the section with its steel as
+// concrete: sagging with the greatest prestress; hogging with the prestress that the resistance is counted with, for more of it may
+// help or harm; each also beside an axial force.
+var (
+	CrackingMoment, AxialCrackingMoment = crackingMoments("cracking-moment", "Cracking moment: bottom fibre at its mean tensile strength, prestress at its greatest, steel counted",
+		"W_{id,b}·(f_ctm + # + M_Pi/W_b)", "1331.6 kN·m", "P_i0", "f_ctm = 4.0716 MPa", "P_i0 = 1273.2 kN", "A_c = 420000 mm²", "W_b = 91532 10³ mm³", "W_{id,b} = 100685.2 10³ mm³", "M_Pi = 560.35 kN·m")
+	HoggingCracking, AxialHoggingCracking = crackingMoments("hogging-cracking", "Cracking moment, hogging: top fibre at its mean tensile strength, steel counted",
+		"W_{id,t}·(f_ctm + # − M_P/W_t)", "500 kN·m", "P_d", "f_ctm = 4 MPa", "P_d = 800 kN", "A_c = 400000 mm²", "W_t = 100000 10³ mm³", "W_{id,t} = 100000 10³ mm³", "M_P = 100 kN·m")
+	ToppedCrackingMoment, AxialToppedCrackingMoment = crackingMoments("topped-cracking-moment", "Cracking moment: bottom fibre at its mean tensile strength, prestress at its greatest; bare member, then composite, its modulus raised by the steel as that of the bare member",
+		"M_0 + W_{co,b}·W_{id,b}/W_b·(f_ctm + # − (M_0 − M_Pi)/W_b)", "1620 kN·m", "P_i0", "M_0 = 300 kN·m", "W_{co,b} = 150000 10³ mm³", "W_{id,b} = 110000 10³ mm³", "f_ctm = 4 MPa", "P_i0 = 800 kN", "A_c = 400000 mm²", "M_Pi = 500 kN·m", "W_b = 100000 10³ mm³")
+
+	ToppedHoggingCrackingMoment = clause.Define(&clause.Formula{
+		ID: "topped-hogging-cracking-moment", Name: "Cracking moment, hogging: top of the topping at its mean tensile strength", Ref: en("5.10.1(5)P, (6)", ""),
+		Text: "M_cr = f_{ctm,t}·W_{co,o} − M_0", Unit: "kN·m",
+		Examples: hand("200 kN·m", "f_{ctm,t} = 3 MPa", "W_{co,o} = 100000 10³ mm³", "M_0 = 100 kN·m")})
+)
+
+func crackingMoments(id, name, text, want, force string, given ...string) (*clause.Formula, *clause.Formula) {
+	define := func(id, axial string, given []string) *clause.Formula {
+		return clause.Define(&clause.Formula{ID: id, Name: name, Ref: en("5.10.1(5)P, (6)", ""), Text: "M_cr = " + strings.Replace(text, "#", axial+"/A_c", 1), Unit: "kN·m", Examples: hand(want, given...)})
+	}
+	return define(id, force, given), define("axial-"+id, "("+force+" + N_Ed)", append(given[:len(given):len(given)], "N_Ed = 0 kN"))
+}
 
 // FailureWithWarning is M_cr ≤ M_Rd.
 var FailureWithWarning = &clause.Check{ID: "failure-with-warning", Name: "Warning before failure, load growing", Ref: en("5.10.1(5)P, (6)", ""),

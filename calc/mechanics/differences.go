@@ -29,3 +29,16 @@ var MomentDifference = clause.Define(&clause.Formula{
 	ID: "moment-difference", Name: "Difference of the moments", Text: "ΔM = M_2 − M_Σ", Unit: "kN·m", Digits: 1,
 	Examples: hand("0.1 kN·m", "M_2 = 10.1 kN·m", "M_Σ = 10 kN·m"),
 })
+
+// Differences of section properties found corner by corner (suffix 3).
+var (
+	PolygonAreaDifference     = difference("polygon-area-difference", "Difference of the area corner by corner", "δ_A3", "A_{c,3}", "A_c", "mm²")
+	PolygonCentroidDifference = difference("polygon-centroid-difference", "Difference of the centroid corner by corner", "δ_y3", "y_{cg,3}", "y_cg", "mm")
+	PolygonInertiaDifference  = difference("polygon-inertia-difference", "Difference of the second moment of area corner by corner", "δ_I3", "I_{c,3}", "I_c", "10⁶ mm⁴")
+)
+
+// SectionMethodsAgree holds both second methods to the properties: corner by corner only rounding to the printed digits is
+// left; level slices miss round and sloping edges by a little.
+var SectionMethodsAgree = &clause.Condition{ID: "section-methods-agree", Name: "Properties by all methods",
+	Text: "max(abs(δ_A3); abs(δ_y3); abs(δ_I3)) ≤ 0.03·[‰] and max(abs(δ_A); abs(δ_y); abs(δ_I)) ≤ 0.1·[‰]",
+	Yes:  "they agree within 0.03 ‰ corner by corner and 0.1 ‰ by slices", No: "they differ by more than 0.03 ‰ corner by corner or 0.1 ‰ by slices: a fault of the program"}

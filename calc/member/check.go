@@ -11,12 +11,15 @@ import (
 func (r *reader) check(m *Member) {
 	r.checkDocument(m)
 	r.checkConcrete(&m.Concrete)
-	r.checkShape(&m.Shape)
+	o, ok := r.checkShape(&m.Shape)
+	r.checkTopping(m, o, ok)
 	r.checkSpan(&m.Span)
 	r.checkProducts(m.Strands.Products)
+	r.checkProducts(m.Ducts.Products)
 	r.checkStrands(m)
+	r.checkDucts(m)
 	r.checkBars(m)
-	r.checkFit(m)
+	r.checkFit(m, o, ok)
 	r.checkActions(m)
 }
 
@@ -77,6 +80,6 @@ func nameList[T any](rows []T, name func(*T) Word) []Word {
 
 func (r *reader) checkConcrete(c *Concrete) {
 	if known(c.Fck, c.FckAtRelease) && exceeds(c.FckAtRelease.Base(), c.Fck.Base()) {
-		r.at(c.FckAtRelease.Origin, "f_ck at release: have "+c.FckAtRelease.String()+", want at most "+c.Fck.String()+", the strength at 28 days", "write the strength asked for when the tendons are released")
+		r.at(c.FckAtRelease.Origin, "f_ck at release: have "+c.FckAtRelease.String()+", want at most "+c.Fck.String()+", the strength at 28 days", "write the strength asked for when the tendons are released or stressed")
 	}
 }

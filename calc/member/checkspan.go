@@ -29,6 +29,9 @@ func (r *reader) checkActions(m *Member) {
 		if n := strings.ToLower(a.Name.Text); n == "self-weight" || n == "self weight" {
 			r.at(a.Name.Origin, "name: have "+a.Name.Text+", which is kept for the weight of the member", "leave the action out: the self-weight is always added; or write another name")
 		}
+		if a.ActsOn.Given && !m.Topping.Present() {
+			r.at(a.ActsOn.Origin, "acts on: have "+a.ActsOn.Text+", but the file has no topping", "remove it, or add topping: with width, depth, f_ck, unit weight, casting")
+		}
 		for k := range a.Loads {
 			r.checkLoad(&a.Loads[k], m.Span.Length)
 		}
@@ -36,8 +39,8 @@ func (r *reader) checkActions(m *Member) {
 }
 
 func (r *reader) checkLoad(l *Load, length Value) {
-	switch u, p := l.Uniform.Given, l.Point.Given; {
-	case u && p:
+	switch u, p, n := l.Uniform.Given, l.Point.Given, l.Axial.Given; {
+	case u && p || u && n || p && n:
 		return // a finding already
 	case known(l.From, l.To) && !exceeds(l.To.Base(), l.From.Base()):
 		const hint = "write from and to as distances from end A of the concrete"

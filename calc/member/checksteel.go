@@ -50,15 +50,41 @@ func (r *reader) tabled(name string) (ProductSpec, bool) {
 	return ProductSpec{}, false
 }
 
-// product finds diameter and f_pk of a row, 0 where unknown; ok is false where there is no such product.
-func (r *reader) product(m *Member, name string) (diameter, tensile float64, ok bool) {
-	for i := range m.Strands.Products {
-		if p := &m.Strands.Products[i]; p.Name.Text == name {
+// product finds diameter and f_pk of a product of the file or of the tables, 0 where unknown; ok is false where there is no
+// such product.
+func product(own []Product, tables []ProductSpec, name string) (diameter, tensile float64, ok bool) {
+	for i := range own {
+		if p := &own[i]; p.Name.Text == name {
 			return p.Diameter.Base(), p.Fpk.Base(), true
 		}
 	}
-	p, ok := r.tabled(name)
-	return p.Diameter, p.Tensile, ok
+	for _, p := range tables {
+		if p.Name == name {
+			return p.Diameter, p.Tensile, true
+		}
+	}
+	return 0, 0, false
+}
+
+// checkStress looks for the product of a row, and at its jacking stress.
+func (r *reader) checkStress(own []Product, name Word, jack Value, hint string) {
+	_, tensile, ok := product(own, r.opt.Products, name.Text)
+	if name.Present() && !ok {
+		r.at(name.Origin, "product: have "+clip(name.Text)+", which neither the tables nor products know", instead(name.Text, r.productNames(own)))
+	}
+	if jack.Present() && tensile > 0 && exceeds(jack.Base(), tensile) {
+		r.at(jack.Origin, "jacking stress: have "+jack.String()+", want at most "+shown(tensile, jack)+", the tensile strength of the product", hint)
+	}
+}
+
+// checkLosses looks at the order of stated losses; first is what they are at release or stressing.
+func (r *reader) checkLosses(jack, first, final Value, key, hint string) {
+	if known(final, first) && exceeds(first.Base(), final.Base()) {
+		r.at(final.Origin, "final: have "+final.String()+", want at least "+first.String()+", the losses "+key, hint)
+	}
+	if known(jack, final) && !exceeds(jack.Base(), final.Base()) {
+		r.at(final.Origin, "final: have "+final.String()+", want less than "+jack.String()+", the jacking stress", "write the sum of all losses")
+	}
 }
 
 // checkStrands looks at products, stresses and losses, and at how much of the length is debonded.
@@ -67,33 +93,36 @@ func (r *reader) checkStrands(m *Member) {
 	r.names(nameList(rows, func(s *StrandRow) Word { return s.Name }))
 	for i := range rows {
 		s := &rows[i]
-		_, tensile, ok := r.product(m, s.Product.Text)
-		if s.Product.Present() && !ok {
-			r.at(s.Product.Origin, "product: have "+clip(s.Product.Text)+", which neither the tables nor products know", instead(s.Product.Text, r.productNames(m)))
-		}
-		if s.Count.N > 1 && s.Spacing == (Value{}) {
+		r.checkStress(m.Strands.Products, s.Product, s.JackingStress, "write the stress in the strand before release, without the losses")
+		if s.Count.N > 1 && s.Spacing == (Value{}) && len(s.Positions) == 0 {
 			r.at(Origin{Pos: s.Pos}, fmt.Sprintf("rows: have no spacing, want a length for %d strands", s.Count.N), "add, for example, spacing: 50 mm")
 		}
-		jack, l := s.JackingStress, &s.StatedLosses
-		if jack.Present() && tensile > 0 && exceeds(jack.Base(), tensile) {
-			r.at(jack.Origin, "jacking stress: have "+jack.String()+", want at most "+shown(tensile, jack)+", the tensile strength of the product", "write the stress in the strand before release, without the losses")
-		}
-		if known(l.Final, l.AtRelease) && exceeds(l.AtRelease.Base(), l.Final.Base()) {
-			r.at(l.Final.Origin, "final: have "+l.Final.String()+", want at least "+l.AtRelease.String()+", the losses at release", "count all losses from the jacking stress")
-		}
-		if known(jack, l.Final) && !exceeds(jack.Base(), l.Final.Base()) {
-			r.at(l.Final.Origin, "final: have "+l.Final.String()+", want less than "+jack.String()+", the jacking stress", "write the sum of all losses")
-		}
+		r.checkLosses(s.JackingStress, s.StatedLosses.AtRelease, s.StatedLosses.Final, "at release", "count all losses from the jacking stress")
 		if known(s.DebondedLength, m.Span.Length) && !exceeds(m.Span.Length.Base()/2, s.DebondedLength.Base()) {
 			r.at(s.DebondedLength.Origin, "debonded length: have "+s.DebondedLength.String()+", want less than "+shown(m.Span.Length.Base()/2, s.DebondedLength)+", half the length", "write the length from each end")
 		}
+		r.checkDeflection(s, m.Span.Length)
 	}
 }
 
-func (r *reader) productNames(m *Member) []string {
+// checkDeflection looks for places at which strands cannot be held down, and for deflected strands that are debonded.
+func (r *reader) checkDeflection(s *StrandRow, length Value) {
+	d := &s.Deflected
+	if !d.Present() {
+		return
+	}
+	if known(d.FromEnd, length) && exceeds(d.FromEnd.Base(), length.Base()/2) {
+		r.at(d.FromEnd.Origin, "held down from ends: have "+d.FromEnd.String()+", want at most "+shown(length.Base()/2, d.FromEnd)+", half the length", "write the distance of each of the two points from its nearer end; half the length for one point at mid-length")
+	}
+	if s.DebondedLength.Base() > 0 {
+		r.at(s.DebondedLength.Origin, "debonded length: have it for strands that are deflected, which is not covered", "write 0 m, or rows of their own for debonded and for deflected strands")
+	}
+}
+
+func (r *reader) productNames(own []Product) []string {
 	var names []string
-	for i := range m.Strands.Products {
-		if w := m.Strands.Products[i].Name; w.Present() {
+	for i := range own {
+		if w := own[i].Name; w.Present() {
 			names = append(names, w.Text)
 		}
 	}

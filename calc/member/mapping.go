@@ -4,6 +4,7 @@ import (
 	"fmt"
 	"reflect"
 	"slices"
+	"strconv"
 	"strings"
 
 	"soffit/calc/diag"
@@ -11,7 +12,7 @@ import (
 	"soffit/calc/quantity"
 )
 
-// mostRows is how many rows a list of the member file may have.
+// mostRows is how many rows a list of the member file may have, where its tag says nothing else.
 const mostRows = 100
 
 // mapping reads a group of keys into a struct by its plan. label and at name the group in findings about what
@@ -29,7 +30,11 @@ func (r *reader) mapping(n *node.Node, into reflect.Value, label string, at plac
 		if len(keys) == 0 {
 			keys = p.all()
 		}
-		r.find(placeOf(n), label+": have "+have(n)+", want keys", "write "+strings.Join(keys, ", ")+" on lines of their own below, further in")
+		hint := "write " + strings.Join(keys, ", ") + " on lines of their own below, further in"
+		if n.Kind == node.List {
+			hint += ", or in one line: {" + strings.Join(p.examples(keys), ", ") + "}"
+		}
+		r.find(placeOf(n), label+": have "+have(n)+", want keys", hint)
 		return
 	}
 	if len(n.Entries) == 0 && len(p.required()) == 0 {
@@ -38,8 +43,12 @@ func (r *reader) mapping(n *node.Node, into reflect.Value, label string, at plac
 	}
 	seen := r.entries(n, p, label)
 	for i := range p.fields {
-		if f := &p.fields[i]; f.or != "" {
-			r.oneOf(f, p, seen, label, at)
+		f := &p.fields[i]
+		if f.or != nil {
+			r.oneOf(f, p, into.Type(), seen, label, at)
+		}
+		if other, ok := seen[f.not]; f.not != "" && ok && has(seen, f.key) {
+			r.find(placeOf(other.Key), f.not+": have it beside "+f.key+", want one of them", "remove one of them")
 		}
 		r.field(&p.fields[i], p, seen, into, label, at, n.Pos)
 	}
@@ -49,18 +58,29 @@ func (r *reader) mapping(n *node.Node, into reflect.Value, label string, at plac
 func (p *plan) required() []string {
 	var keys []string
 	for i := range p.fields {
-		if f := &p.fields[i]; !f.optional && f.std == "" && f.with == "" && f.when == "" {
+		if f := &p.fields[i]; (!f.optional || f.unless != "") && f.std == "" && f.with == "" && f.when == "" {
 			keys = append(keys, f.key)
 		}
 	}
 	return keys
 }
 
+// examples are keys with a fitting value each; those of groups of keys are left out.
+func (p *plan) examples(keys []string) []string {
+	var out []string
+	for _, key := range keys {
+		if f := p.find(key); f.example != "" {
+			out = append(out, key+": "+f.example)
+		}
+	}
+	return out
+}
+
 // entries sorts the keys of a mapping; unknown and repeated ones are found. What stands under a mistyped key
 // is read as what was meant, so that nothing wrong in it stays hidden.
 func (r *reader) entries(n *node.Node, p *plan, label string) map[string]node.Entry {
 	seen, meant := map[string]node.Entry{}, map[string]node.Entry{}
-	word := wordIn(n)
+	word := wordIn(n, p)
 	for _, e := range n.Entries {
 		key := e.Key.Text
 		f := p.find(key)
@@ -103,12 +123,13 @@ func (p *plan) meant(key string, word func(string) string) (near, hint string) {
 	return "", hint
 }
 
-// wordIn tells the word of a key of the mapping as written, "" where there is none.
-func wordIn(n *node.Node) func(string) string {
+// wordIn tells the word of a key of the mapping, as written or as it was likely meant; "" where there is none.
+func wordIn(n *node.Node, p *plan) func(string) string {
 	return func(key string) string {
 		for _, e := range n.Entries {
-			if e.Key.Text == key && e.Value.Kind == node.Scalar {
-				return e.Value.Text
+			if f := p.find(key); f != nil && e.Key.Text == key && e.Value.Kind == node.Scalar {
+				near, _ := quantity.Nearest(e.Value.Text, f.words)
+				return near
 			}
 		}
 		return ""
@@ -127,7 +148,7 @@ func (r *reader) field(f *field, p *plan, seen map[string]node.Entry, into refle
 	} else if f.std != "" {
 		standIn(f, to, origin)
 		return
-	} else if f.optional || !decided {
+	} else if f.optional && (f.unless == "" || has(seen, f.unless)) || !decided {
 		return
 	}
 	msg := label + ": have no " + f.key
@@ -137,19 +158,36 @@ func (r *reader) field(f *field, p *plan, seen map[string]node.Entry, into refle
 	r.find(at, msg, f.add(to.Type()))
 }
 
-// oneOf finds two keys of which one stands in the place of the other, and the lack of both. Where a key that belongs
+func has(seen map[string]node.Entry, key string) bool {
+	_, ok := seen[key]
+	return ok
+}
+
+// oneOf finds two keys of which one stands in the place of the other, and the lack of all. Where a key that belongs
 // beside one of them is there, it has its finding already.
-func (r *reader) oneOf(f *field, p *plan, seen map[string]node.Entry, label string, at place) {
-	_, first := seen[f.key]
-	second, also := seen[f.or]
-	switch {
-	case first && also:
-		r.find(placeOf(second.Value), f.or+": have it beside "+f.key+", want one of them", "write one of them here, and the other in a row of its own")
-	case !first && !also && !slices.ContainsFunc(p.fields, func(o field) bool {
-		_, there := seen[o.key]
-		return there && (o.with == f.key || o.with == f.or)
-	}):
-		r.find(at, label+": have no "+f.key+" and no "+f.or+", want one of them", "add, for example, "+f.key+": "+f.example)
+func (r *reader) oneOf(f *field, p *plan, t reflect.Type, seen map[string]node.Entry, label string, at place) {
+	keys := append([]string{f.key}, f.or...)
+	first := slices.IndexFunc(keys, func(key string) bool { return has(seen, key) })
+	if first < 0 {
+		if !slices.ContainsFunc(p.fields, func(o field) bool { return has(seen, o.key) && slices.Contains(keys, o.with) }) {
+			last := len(f.or)
+			hint := f.add(t.Field(f.index).Type)
+			if f.example == "" {
+				other := p.find(f.or[0])
+				hint += "; or " + strings.TrimPrefix(other.add(t.Field(other.index).Type), "add ")
+			}
+			r.find(at, label+": have no "+strings.Join(keys[:last], ", no ")+" and no "+keys[last]+", want one of them", hint)
+		}
+		return
+	}
+	for _, key := range keys[first+1:] {
+		if e := seen[key]; has(seen, key) {
+			there := placeOf(e.Value)
+			if e.Value.Kind != node.Scalar {
+				there = placeOf(e.Key)
+			}
+			r.find(there, key+": have it beside "+keys[first]+", want one of them", f.both)
+		}
 	}
 }
 
@@ -196,6 +234,8 @@ func (r *reader) read(e node.Entry, f *field, to reflect.Value) {
 		r.word(e.Value, f, to)
 	case *Date:
 		r.date(e.Value, f, to)
+	case *[]Value:
+		r.values(e.Value, f, to)
 	case *NationalParameters:
 		r.nationalParameters(e.Value, to)
 	case *Narrative:
@@ -219,6 +259,14 @@ func mark(to reflect.Value, at diag.Pos) {
 		to.Origin = o
 	case *Date:
 		to.Origin = o
+	case *[]Value:
+		*to = []Value{{Origin: o}}
+	default:
+		if v := reflect.ValueOf(to).Elem(); v.Kind() == reflect.Struct {
+			if p := planOf(v.Type()); p.place >= 0 {
+				v.Field(p.place).Set(reflect.ValueOf(at))
+			}
+		}
 	}
 }
 
@@ -238,17 +286,19 @@ func (r *reader) group(e node.Entry, f *field, to reflect.Value) {
 		r.find(placeOf(e.Value), f.key+": have "+have(e.Value)+", want a list", hint)
 		return
 	}
-	if len(e.Value.Items) < f.least {
-		r.find(placeOf(e.Value), f.key+": have no rows, want at least one", "begin each row with - on a line of its own below")
+	if n := len(e.Value.Items); n == 0 && f.least > 0 {
+		r.find(placeOf(e.Value), f.key+": have no rows, want at least "+counted(f.least), "begin each row with - on a line of its own below")
+	} else if n < f.least {
+		r.find(placeOf(e.Key), fmt.Sprintf("%s: have %d, want at least %d", f.key, n, f.least), "add further rows, each beginning with - on a line of its own")
 	}
 	for i, item := range e.Value.Items {
-		if i == mostRows {
-			r.find(placeOf(item), fmt.Sprintf("%s: have %d rows, want at most %d", f.key, len(e.Value.Items), mostRows), "")
+		if i == f.most {
+			r.find(placeOf(item), fmt.Sprintf("%s: have %d rows, want at most %d", f.key, len(e.Value.Items), f.most), "")
 			return
 		}
 		one := reflect.New(to.Type().Elem()).Elem()
 		if item.Kind == node.Broken {
-			continue
+			// A row all the same: it has its finding.
 		} else if w, ok := one.Addr().Interface().(*Word); ok {
 			r.word(item, f, w)
 		} else {
@@ -269,5 +319,44 @@ func standIn(f *field, to reflect.Value, origin diag.Pos) {
 		}
 	case *Word:
 		*to = Word{f.std, o}
+	}
+}
+
+// counted is a small number in a sentence: "one", "2".
+func counted(n int) string {
+	if n == 1 {
+		return "one"
+	}
+	return strconv.Itoa(n)
+}
+
+// values reads a list of values, [100 mm, 200 mm].
+func (r *reader) values(n *node.Node, f *field, to *[]Value) {
+	if n.Kind != node.List || len(n.Items) == 0 {
+		one := f.example
+		if n.Kind == node.Scalar {
+			if l, err := quantity.ParseAs(n.Text, f.eg.Unit.Dim()); err == nil {
+				one = strings.TrimPrefix(l.String(), "-")
+			}
+		}
+		hint := "write a list, for example [-" + one + ", " + one + "]"
+		have := have(n)
+		if n.Kind == node.List {
+			have = "an empty list"
+		}
+		r.find(placeOf(n), f.key+": have "+have+", want a list", hint)
+		return
+	}
+	*to = nil
+	for i, item := range n.Items {
+		if i == f.most {
+			r.find(placeOf(item), fmt.Sprintf("%s: have %d, want at most %d", f.key, len(n.Items), f.most), "")
+			return
+		}
+		v := Value{Origin: Origin{Pos: item.Pos, Given: true}}
+		if item.Kind != node.Broken {
+			r.value(item, f, &v)
+		}
+		*to = append(*to, v)
 	}
 }

@@ -27,26 +27,31 @@ type field struct {
 	example  string           // as it would be written
 	low      *quantity.Literal
 	high     *quantity.Literal
-	most     int // of a Count
+	most     int // of a Count, and of a list
 	least    int // of a list
 	words    []string
 	std, why string // default and its reason; std "" is none
 	name     bool   // a text that names a row
 	when     string // the key that decides whether this one belongs here
 	of       []string
-	with     string // the key beside which this one belongs
-	or       string // the key in whose place this one may stand
-	among    string // the key whose rows this one names
-	what     string // what the key holds
+	with     string   // the key beside which this one belongs
+	or       []string // the keys in whose place this one may stand
+	both     string   // what is said where two of them stand
+	not      string   // the key beside which this one must not stand
+	unless   string   // the key beside which this one may be left out
+	among    string   // the key whose rows this one names
+	what     string   // what the key holds
 }
 
 var (
-	valueType = reflect.TypeFor[Value]()
-	countType = reflect.TypeFor[Count]()
-	wordType  = reflect.TypeFor[Word]()
-	dateType  = reflect.TypeFor[Date]()
-	posType   = reflect.TypeFor[diag.Pos]()
-	plans     sync.Map // reflect.Type → *plan
+	valueType  = reflect.TypeFor[Value]()
+	valuesType = reflect.TypeFor[[]Value]()
+	countType  = reflect.TypeFor[Count]()
+	wordType   = reflect.TypeFor[Word]()
+	dateType   = reflect.TypeFor[Date]()
+	shapeType  = reflect.TypeFor[Shape]()
+	posType    = reflect.TypeFor[diag.Pos]()
+	plans      sync.Map // reflect.Type → *plan
 )
 
 // isScalar reports whether a field of the type is written as one piece of text.
@@ -76,7 +81,7 @@ func planOf(t reflect.Type) *plan {
 func newField(index int, s reflect.StructField, key string) field {
 	tag := s.Tag
 	f := field{index: index, example: tag.Get("eg"), std: tag.Get("default"), why: tag.Get("why"), name: tag.Get("text") == "name",
-		with: tag.Get("with"), or: tag.Get("or"), among: tag.Get("among"), what: tag.Get("what")}
+		with: tag.Get("with"), both: tag.Get("both"), not: tag.Get("not"), unless: tag.Get("unless"), among: tag.Get("among"), what: tag.Get("what")}
 	f.key, f.optional = strings.CutSuffix(key, "?")
 	if w := tag.Get("words"); w != "" {
 		f.words = strings.Split(w, "|")
@@ -86,7 +91,10 @@ func newField(index int, s reflect.StructField, key string) field {
 		name, of, _ := strings.Cut(when, "=")
 		f.when, f.of = name, strings.Split(of, "|")
 	}
-	if s.Type == valueType && f.example != "" {
+	if or := tag.Get("or"); or != "" {
+		f.or = strings.Split(or, "|")
+	}
+	if (s.Type == valueType || s.Type == valuesType) && f.example != "" {
 		f.eg = literal(s, "eg", quantity.Dim{})
 		f.low, f.high = bound(s, "from", f.eg), bound(s, "to", f.eg)
 		if f.std != "" {
@@ -96,6 +104,11 @@ func newField(index int, s reflect.StructField, key string) field {
 	f.least, _ = strconv.Atoi(tag.Get("least"))
 	if s.Type == countType {
 		f.most, _ = strconv.Atoi(tag.Get("to"))
+	} else if s.Type.Kind() == reflect.Slice {
+		f.most = mostRows
+		if most := tag.Get("most"); most != "" {
+			f.most, _ = strconv.Atoi(most)
+		}
 	}
 	if s.Type == dateType {
 		f.example = "2031-04-07"
@@ -163,7 +176,7 @@ func gather(t reflect.Type, path string, m map[string][]string) {
 		if below.Kind() == reflect.Slice {
 			below = below.Elem()
 		}
-		if below.Kind() == reflect.Struct && len(planOf(below).fields) > 0 {
+		if below.Kind() == reflect.Struct && !isScalar(below) && len(planOf(below).fields) > 0 {
 			gather(below, strings.TrimPrefix(path+", "+f.key, ", "), m)
 		}
 	}

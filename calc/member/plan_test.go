@@ -17,7 +17,7 @@ func TestPlans(t *testing.T) {
 		for i := range p.fields {
 			f, below := &p.fields[i], typ.Field(p.fields[i].index).Type
 			keys++
-			if below == valueType && f.example != "" {
+			if (below == valueType || below == valuesType) && f.example != "" {
 				if !f.within(f.eg) {
 					t.Errorf("%v %s: the example %s lies outside the bounds", typ, f.key, f.example)
 				}
@@ -34,8 +34,15 @@ func TestPlans(t *testing.T) {
 			if f.what == "" || strings.HasSuffix(f.what, ".") || strings.TrimSpace(f.what) != f.what {
 				t.Errorf("%v %s: what it holds is not said, or not in the way of the others: %q", typ, f.key, f.what)
 			}
-			if f.or != "" && !(f.optional && p.find(f.or) != nil && p.find(f.or).optional) {
-				t.Errorf("%v %s: of two keys that stand for one another both may be left out", typ, f.key)
+			for _, or := range f.or {
+				if !(f.optional && p.find(or) != nil && p.find(or).optional) || f.both == "" {
+					t.Errorf("%v %s: of two keys that stand for one another both may be left out, and why not both stand is said", typ, f.key)
+				}
+			}
+			for _, by := range []string{f.not, f.unless} {
+				if by != "" && !(f.optional && p.find(by) != nil && p.find(by).optional) {
+					t.Errorf("%v %s: depends on %s, which has to be a key that may be left out", typ, f.key, by)
+				}
 			}
 			for _, by := range []string{f.when, f.with} {
 				if by != "" && p.find(by) == nil {

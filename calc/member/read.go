@@ -26,6 +26,8 @@ func Read(file string, src []byte, opt Options) (*Member, diag.List) {
 		r.find(place{diag.Pos{Line: 1, Col: 1}, 1}, "the file is empty", "begin with a line format: soffit/1")
 	case f.Root != nil && r.format(f.Root):
 		r.mapping(f.Root, reflect.ValueOf(m).Elem(), "the file", placeOf(f.Root))
+		r.checkGroups(&m.Strands)
+		m.Strands.share()
 		m.complete()
 		r.check(m)
 	}
@@ -122,15 +124,21 @@ func either(words []string) string {
 	return words[0]
 }
 
-// instead proposes the word that was likely meant, or all of them. A word that one alone begins with means that one.
+// instead proposes the word that was likely meant, or all of them. A word that one alone begins with means that one, and
+// so does the first of several words.
 func instead(word string, known []string) string {
-	begun := slices.DeleteFunc(slices.Clone(known), func(k string) bool { return len(word) < 3 || !strings.HasPrefix(k, word) })
+	begins := func(with string) []string {
+		return slices.DeleteFunc(slices.Clone(known), func(k string) bool { return len(with) < 3 || !strings.HasPrefix(k, with) })
+	}
 	near, ok := quantity.Nearest(word, known)
-	switch {
+	first, _, several := strings.Cut(word, " ")
+	switch begun := begins(word); {
 	case len(begun) == 1:
 		return "write " + begun[0]
 	case ok:
 		return "write " + near
+	case several && len(begins(first+" ")) == 1:
+		return "write " + begins(first + " ")[0]
 	case len(known) == 0:
 		return ""
 	}

@@ -15,6 +15,7 @@ import (
 	"soffit/calc/design"
 	"soffit/calc/diag"
 	"soffit/calc/member"
+	"soffit/templates"
 )
 
 func samples(t testing.TB, folder string) (names []string, sources [][]byte) {
@@ -33,8 +34,20 @@ func samples(t testing.TB, folder string) (names []string, sources [][]byte) {
 	return names, sources
 }
 
+// good are the samples, and the drafts without their comments: at least one for each kind of section.
+func good(t testing.TB) (names []string, sources [][]byte) {
+	t.Helper()
+	names, sources = samples(t, "members")
+	comment := regexp.MustCompile(`(?m) +# .*$`)
+	for _, kind := range templates.Drafts() {
+		text, _ := templates.Draft(kind)
+		names, sources = append(names, kind+".yaml"), append(sources, comment.ReplaceAll(text, nil))
+	}
+	return names, sources
+}
+
 func TestSamples(t *testing.T) {
-	names, sources := samples(t, "members")
+	names, sources := good(t)
 	for i, src := range sources {
 		m, found := member.Read(names[i], src, design.Options())
 		if m == nil {
@@ -181,9 +194,9 @@ func character(l []string, r *rand.Rand, spoil func([]rune, int) []rune) []strin
 
 // TestMutations spoils the samples: whatever comes of it is a finding or a sound member, the same each time.
 func TestMutations(t *testing.T) {
-	const each = 60
+	const each = 20
 	opt := design.Options()
-	names, sources := samples(t, "members")
+	names, sources := good(t)
 	total, silent := 0, map[string]int{}
 	for i, src := range sources {
 		for k, m := range mutations {
@@ -213,7 +226,7 @@ func TestMutations(t *testing.T) {
 // TestOtherDimension gives every value of the samples, one after the other, a unit that does not fit.
 func TestOtherDimension(t *testing.T) {
 	opt := design.Options()
-	names, sources := samples(t, "members")
+	names, sources := good(t)
 	for i, src := range sources {
 		values := unit.FindAllSubmatchIndex(src, -1)
 		if len(values) < 20 {
@@ -239,11 +252,10 @@ func TestOtherDimension(t *testing.T) {
 
 // FuzzRead: whatever bytes come, a member or findings.
 func FuzzRead(f *testing.F) {
-	for _, folder := range []string{"members", "bad"} {
-		_, sources := samples(f, folder)
-		for _, src := range sources {
-			f.Add(src)
-		}
+	_, sources := good(f)
+	_, faulty := samples(f, "bad")
+	for _, src := range append(sources, faulty...) {
+		f.Add(src)
 	}
 	opt := design.Options()
 	f.Fuzz(func(t *testing.T, src []byte) {

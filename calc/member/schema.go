@@ -51,7 +51,9 @@ func slug(name string) string {
 	for i, r := range name {
 		switch {
 		case unicode.IsUpper(r) && i > 0:
-			b.WriteByte('-')
+			if name[i-1] != ' ' {
+				b.WriteByte('-')
+			}
 			b.WriteRune(unicode.ToLower(r))
 		case unicode.IsLetter(r), unicode.IsDigit(r):
 			b.WriteRune(unicode.ToLower(r))
@@ -102,7 +104,7 @@ func (s *schemer) closed(t reflect.Type, word string) object {
 	p := planOf(t)
 	var required []string
 	var properties, beside object
-	var choice []object
+	var choice, all []object
 	for i := range p.fields {
 		f := &p.fields[i]
 		if f.when != "" && !slices.Contains(f.of, word) {
@@ -117,10 +119,20 @@ func (s *schemer) closed(t reflect.Type, word string) object {
 				beside = beside.need(f.with, f.key)
 			}
 		}
-		if f.or != "" {
-			choice = []object{{{"required", []string{f.key}}}, {{"required", []string{f.or}}}}
+		for _, key := range append([]string{f.key}, f.or...) {
+			if f.or != nil {
+				choice = append(choice, object{{"required", []string{key}}})
+			}
 		}
-		of := s.key(f, t.Field(f.index).Type)
+		if f.unless != "" {
+			all = append(all, object{{"anyOf", []object{{{"required", []string{f.key}}}, {{"required", []string{f.unless}}}}}})
+		}
+		if f.not != "" {
+			all = append(all, object{{"not", object{{"required", []string{f.key, f.not}}}}})
+		}
+		told := *f
+		told.when = "" // it is one of the keys of this word
+		of := s.key(&told, t.Field(f.index).Type)
 		if by := p.decides(); word != "" && by == f {
 			of = object{{"description", f.describe(wordType)}, {"const", word}}
 		}
@@ -139,7 +151,10 @@ func (s *schemer) closed(t reflect.Type, word string) object {
 	if choice != nil {
 		out = append(out, pair{"oneOf", choice})
 	}
-	return append(out, s.named(t)...)
+	if all = append(all, s.named(t)...); all != nil {
+		out = append(out, pair{"allOf", all})
+	}
+	return out
 }
 
 // need adds a key that has to be there beside another.
@@ -173,18 +188,21 @@ func (s *schemer) key(f *field, t reflect.Type) object {
 		return append(out, s.group(t)...)
 	case t.Elem() == wordType:
 		return append(out, pair{"type", "array"}, pair{"uniqueItems", true}, pair{"items", s.word(f)})
+	case t == valuesType:
+		return append(out, pair{"type", "array"}, pair{"minItems", 1}, pair{"maxItems", f.most}, pair{"items", s.value(f)})
 	}
 	out = append(out, pair{"type", "array"})
 	if f.least > 0 {
 		out = append(out, pair{"minItems", f.least})
 	}
-	return append(out, pair{"maxItems", mostRows}, pair{"items", s.group(t.Elem())})
+	return append(out, pair{"maxItems", f.most}, pair{"items", s.group(t.Elem())})
 }
 
 // named bounds the names that rows use where the list that could add some is left out: then those of the options are
-// all there are.
-func (s *schemer) named(t reflect.Type) object {
+// all there are, if any.
+func (s *schemer) named(t reflect.Type) []object {
 	p := planOf(t)
+	var out []object
 	for i := range p.fields {
 		list := t.Field(p.fields[i].index).Type
 		if list.Kind() != reflect.Slice || list.Elem().Kind() != reflect.Struct {
@@ -194,15 +212,18 @@ func (s *schemer) named(t reflect.Type) object {
 			if f.among == "" {
 				continue
 			}
-			name := object{{f.key, object{{"enum", s.opt.named(f.among)}}}}
+			name := object{{f.key, false}}
+			if names := s.opt.named(f.among); names != nil {
+				name = object{{f.key, object{{"enum", names}}}}
+			}
 			rows := object{{p.fields[i].key, object{{"items", object{{"properties", name}}}}}}
-			return object{
+			out = append(out, object{
 				{"if", object{{"not", object{{"required", []string{f.among}}}}}},
 				{"then", object{{"properties", rows}}},
-			}
+			})
 		}
 	}
-	return nil
+	return out
 }
 
 // slots are the places of the engineer's own text.

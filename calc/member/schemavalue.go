@@ -22,13 +22,13 @@ func (f *field) describe(t reflect.Type) string {
 	if f.with != "" {
 		parts = append(parts, "with "+f.with)
 	}
-	if f.or != "" {
-		parts = append(parts, "either this or "+f.or)
+	if f.or != nil {
+		parts = append(parts, "either this or "+either(f.or))
 	}
 	switch {
 	case f.std != "":
 		parts = append(parts, "left out: "+f.std+" ("+f.why+")")
-	case f.optional && f.or == "" && !strings.Contains(f.what, "left out"):
+	case f.optional && f.or == nil && !strings.Contains(f.what, "left out"):
 		parts = append(parts, "may be left out")
 	}
 	return strings.Join(parts, "; ")
@@ -39,7 +39,10 @@ func (f *field) bounds(t reflect.Type) string {
 	switch {
 	case t == countType:
 		return "a whole number, 1 to " + strconv.Itoa(f.most)
-	case t == valueType && (f.low != nil || f.high != nil):
+	case (t == valueType || t == valuesType) && (f.low != nil || f.high != nil):
+		if t == valuesType {
+			return "each " + f.eg.Unit.Dim().Indefinite() + ", " + f.range_()
+		}
 		return f.eg.Unit.Dim().Indefinite() + ", " + f.range_()
 	}
 	return ""
@@ -108,7 +111,7 @@ func (s *schemer) word(f *field) object {
 		out = append(out, pair{"default", f.std})
 	}
 	switch {
-	case f.among != "":
+	case f.among != "" && s.opt.named(f.among) != nil:
 		out = append(out, pair{"examples", s.opt.named(f.among)})
 	case f.words == nil && f.example != "":
 		out = append(out, pair{"examples", []string{f.example}})
@@ -141,9 +144,14 @@ func (s *schemer) date(f *field) object {
 	}), pair{"examples", []string{f.example}})
 }
 
-// named are the names that the options give for a list of the file, in alphabetical order.
+// named are the names that the options give for a list of the file, in alphabetical order; nil where the list has those
+// of the file alone.
 func (opt *Options) named(list string) []string {
-	if list != "products" {
+	switch list {
+	case "groups":
+		return nil
+	case "products":
+	default:
 		panic("member: no names for " + list)
 	}
 	names := []string{}

@@ -58,9 +58,11 @@ func (b *Block) Check(c *clause.Check) {
 			return fr.miss
 		}
 		e.Fails[i] = exceeds(d, l) || exceeds(ds, ls)
-		e.judge(i, d, l, max(demand.Decimals, limit.Decimals))
+		of, _ := fr.taken(0)
+		against, _ := fr.taken(1)
+		e.judge(i, d, l, max(of.Decimals, against.Decimals))
 		if l > 0 && ls > 0 {
-			e.Effect = math.Max(e.Effect, math.Abs(d/l-ds/ls))
+			e.Effect = math.Max(e.Effect, math.Abs(math.Max(d, 0)/l-math.Max(ds, 0)/ls)) // of the ratio
 		}
 		r := rankOf(e.Fails[i], d, l)
 		if e.Worst < 0 || r.above(worst) {
@@ -118,15 +120,16 @@ func rankOf(fails bool, demand, limit float64) rank {
 
 func (r rank) above(s rank) bool { return r.class > s.class || r.class == s.class && r.size > s.size }
 
-// rank is that of the governing row.
+// rank is that of the governing row, by the ratio as printed: a record read back ranks its checks alike.
 func (c *Check) rank() rank {
+	ratio, _ := quantity.Value(c.Ratio[c.Worst])
 	switch {
 	case c.Ratio[c.Worst] == "" && c.Failed():
 		return rank{class: 3}
 	case c.Failed():
-		return rank{2, c.Value[c.Worst]}
+		return rank{2, ratio}
 	case c.Ratio[c.Worst] != "":
-		return rank{1, c.Value[c.Worst]}
+		return rank{1, ratio}
 	}
 	return rank{}
 }

@@ -7,24 +7,26 @@ import (
 	"io/fs"
 	"os"
 	"path/filepath"
+	"strings"
 
 	"soffit/templates"
 )
 
 type draftCommand struct {
-	Kind string `arg:"" name:"kind" help:"Kind of cross-section: ${drafts}."`
-	Out  string `name:"out" short:"o" placeholder:"FILE" help:"File to write; its folder is made if it is not there. Without it: KIND.yaml."`
+	Kind []string `arg:"" name:"kind" help:"Kind of cross-section: ${drafts}; double-T for double T."`
+	Out  string   `name:"out" short:"o" placeholder:"FILE" help:"File to write; its folder is made if it is not there. Without it: KIND.yaml."`
 }
 
 func (c *draftCommand) run(out, problems io.Writer) int {
-	text, ok := templates.Draft(c.Kind)
+	kind := strings.Join(c.Kind, " ")
+	text, ok := templates.Draft(kind)
 	if !ok {
-		say(problems, "soffit: draft: %s\n", unknown(c.Kind, templates.Drafts()))
+		say(problems, "soffit: draft: %s\n", unknown(kind, templates.Drafts()))
 		return noNote
 	}
 	file := c.Out
 	if file == "" {
-		file = c.Kind + ".yaml"
+		file = templates.DraftFile(kind)
 	}
 	if err := create(file, text); err != nil {
 		say(problems, "soffit: %v\n", err)

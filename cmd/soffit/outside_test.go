@@ -60,7 +60,7 @@ func TestNotesFromOutside(t *testing.T) {
 				t.Errorf("%s: %s does not come out as text", pdf, sign)
 			}
 		}
-		if strings.Contains(file, "ib-") && !strings.Contains(text, "√") {
+		if strings.Contains(file, "hollow-") && !strings.Contains(text, "√") {
 			t.Errorf("%s: √ does not come out as text", pdf)
 		}
 		if strings.Contains(text, "NaN") || strings.Contains(text, "+Inf") {

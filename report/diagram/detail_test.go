@@ -108,3 +108,25 @@ func TestThreeRowsAbreast(t *testing.T) {
 		t.Error("the legend does not say what is grey")
 	}
 }
+
+// TestForcesAlongAreSaid: a force along the member stands in words under the elevation, others do not.
+func TestForcesAlongAreSaid(t *testing.T) {
+	for _, m := range kindsOfSection() {
+		n, figs := m.note(t)
+		got := strings.Count(strings.Join(drawn(t, n, figs["fig-elevation"], 510).Texts(), "|"), "along the member, compression")
+		if want := pick(m.ducts, 1, 0); got != want {
+			t.Errorf("%s: said %d times, want %d", m.name, got, want)
+		}
+	}
+}
+
+// TestStressAlongDucts: stress that changes with friction is drawn over the whole length, bonded strands near end A.
+func TestStressAlongDucts(t *testing.T) {
+	for _, m := range kindsOfSection() {
+		n, figs := m.note(t)
+		texts := strings.Join(drawn(t, n, figs["fig-stress"], 510).Texts(), "|")
+		if got := strings.Contains(texts, "|40"); got != m.ducts {
+			t.Errorf("%s of %g m: whole length %t: %s", m.name, m.length, got, texts)
+		}
+	}
+}

@@ -30,7 +30,11 @@ func effects(d *data, width draw.Pt) *tape {
 	g.scaleY(t, titled(top, "sagging downward"))
 	g.extreme(t, []column{top}, 1, below)
 	if !same(top, bottom) {
-		g.extreme(t, []column{bottom}, 0, above)
+		if g.hogs(bottom) {
+			g.hogging(t, bottom)
+		} else {
+			g.extreme(t, []column{bottom}, 0, above)
+		}
 	}
 	low := g.ways.within.Y1
 	g.values(low+16, 80, false, vmax[0], vmax[1], vmin[0], vmin[1])
@@ -109,6 +113,43 @@ func titled(c column, remark string) label {
 		l = l.say(draw.Serif, ", "+remark)
 	}
 	return l
+}
+
+// hogs tells whether a column of moments goes below zero by more than can be overlooked.
+func (g *graph) hogs(c column) bool {
+	return slices.ContainsFunc(c.cells, func(v cell) bool { return v.value < -g.slight() })
+}
+
+// slight is a value that can be overlooked in the graph.
+func (g *graph) slight() float64 { return 0.03 * (g.y.hi - g.y.lo) }
+
+// hogging marks the least moment near each bearing, and the least of all where that lies elsewhere: each place once.
+func (g *graph) hogging(c draw.Canvas, of column) {
+	least := func(from, to float64) int {
+		best := -1
+		for _, i := range g.along.order {
+			x := g.along.x.cells[i].value
+			if v := of.cells[i]; v.taken() && v.value < -g.slight() && x >= from && x <= to && (best < 0 || v.value < of.cells[best].value) {
+				best = i
+			}
+		}
+		return best
+	}
+	marks := []int{least(g.along.start(), g.along.end())}
+	if len(g.supports) == 2 {
+		for _, s := range g.supports {
+			if k := least(s.value-1, s.value+1); k >= 0 { // at the bearing, within a millimetre
+				marks = append(marks, k)
+			}
+		}
+	}
+	for n, i := range marks {
+		if i < 0 || slices.ContainsFunc(marks[:n], func(k int) bool { return of.cells[k].shown == of.cells[i].shown && k == i }) {
+			continue
+		}
+		x := g.along.x.cells[i]
+		g.mark(c, g.at(x.value, of.cells[i].value), above, label{}.equals(of.cells[i]).say(draw.Serif, " at ").equals(x))
+	}
 }
 
 // extreme marks the value furthest in a direction, 1 up and −1 down, or the largest magnitude for 0, with

@@ -10,32 +10,52 @@ import (
 // elevation draws the member from the side with its bearings, rows of tendons and loads. Lengths and depths
 // have their own scales where the member is long, which is said.
 //
-// Roles: length, depth (of the concrete), support-A, support-B (bearing centres from end A), bearing-A,
-// bearing-B (lengths of bearings); level (above the soffit) and debonded (length from each end) over the
-// rows of tendons; load-q (force a length), load-F (force), load-from, load-to (from end A) over the loads,
-// where q = 0 marks a point load at load-from; optional span (between bearing centres), height, lower, upper (parts
-// of the section from the soffit up, whose edges are then seen), bar-level (above the soffit) over the rows of bars.
+// Roles: length, depth (of the concrete, without a topping), support-A, support-B (bearing centres from end A),
+// bearing-A, bearing-B (lengths of bearings); over the rows of tendons level (above the soffit), optional debonded
+// (length from each end), end-level (height at the ends of rows that are held down) with held-down (distance of the two
+// points from the nearer end, 0 for none); or in place of level profile-x over the stations (from end A) with profile-y
+// (height) over stations and rows; load-q (force a length), load-F (force), load-from, load-to (from end A) over the
+// loads, where q = 0 marks a point load at load-from; optional load-N (along the member, compression positive) over the
+// loads; optional span (between bearing centres), overhang-B (bearing
+// centre B from end B), topping-depth, the outline (see shape), whose edges are then seen, bar-level (above the soffit)
+// over the rows of bars.
 func elevation(d *data, width draw.Pt) *tape {
 	e := sideView{length: d.one("length"), depth: d.one("depth"), a: d.one("support-A"), b: d.one("support-B"),
-		bearingA: d.one("bearing-A"), bearingB: d.one("bearing-B"), level: d.rows("level")}
-	e.debonded = d.beside("debonded", e.level)
+		bearingA: d.one("bearing-A"), bearingB: d.one("bearing-B"), rows: d.paths()}
 	if d.has("span") {
 		e.span = d.one("span")
 	}
-	if d.has("height") {
-		e.parts = d.parts()
+	if d.has("overhang-B") {
+		e.overhang = d.one("overhang-B")
+	}
+	if d.has("topping-depth") {
+		e.topping = d.one("topping-depth")
+	}
+	if d.has("corner-x") {
+		s := d.shape()
+		if off := s.height - e.depth.value; d.err == nil && (off > 2*near || off < -2*near) {
+			d.fail("role \"depth\": %s, the outline is %.1f mm deep", e.depth.shown, s.height)
+		}
+		if d.err == nil {
+			e.seen = s.silhouette()
+		}
 	}
 	if d.has("bar-level") {
 		e.bars = d.rows("bar-level")
 	}
-	e.loads = d.loads()
+	e.loads, e.axials = d.loads(), d.axials()
 	if d.err != nil {
 		return nil
 	}
-	const least draw.Pt = 190 // of the member beside a listing
 	t := e.fitted(width, true)
-	if e.l < least {
-		t = e.fitted(width, false)
+	beside := e.l
+	if beside >= 0.7*width {
+		return t
+	}
+	u := e.fitted(width, false)
+	const least draw.Pt = 190 // of the member beside a listing
+	if beside < least || e.l > 1.3*beside {
+		return u
 	}
 	return t
 }
@@ -57,11 +77,14 @@ func (e *sideView) fitted(width draw.Pt, beside bool) *tape {
 
 // sideView is what an elevation shows.
 type sideView struct {
-	length, depth, a, b, bearingA, bearingB, span cell
-	level, debonded, bars                         column // bars may be none
-	parts                                         parts  // none if not given
-	loads                                         []loading
-	beside                                        bool // the listing of the rows, else it stands below
+	length, depth, a, b, bearingA, bearingB cell
+	span, overhang, topping                 cell // not taken if not given
+	rows                                    []path
+	bars                                    column    // may be none
+	seen                                    []float64 // heights of edges, mm
+	loads                                   []loading
+	axials                                  []label // forces along the member
+	beside                                  bool    // the listing of the rows, else it stands below
 
 	l, h draw.Pt // of the concrete on paper; its soffit is at y = 0, end A at x = 0
 	per  draw.Pt // along the length
@@ -76,9 +99,9 @@ func (e *sideView) upright(along scale) scale {
 		return along
 	}
 	nearest := math.Inf(1)
-	for i, v := range e.level.cells {
-		for _, u := range e.level.cells[:i] {
-			if d := math.Abs(u.value - v.value); d > 0 {
+	for i, r := range e.rows {
+		for _, o := range e.rows[:i] {
+			if d := r.apart(o); d > 0 {
 				nearest = min(nearest, d)
 			}
 		}
@@ -95,6 +118,10 @@ func (e *sideView) upright(along scale) scale {
 func (e *sideView) draw(c draw.Canvas, along scale) {
 	up := e.upright(along)
 	e.per, e.l, e.h = along.per(), along.of(e.length.value), up.of(e.depth.value)
+	top := -e.h - up.of(e.topping.value)
+	if e.topping.taken() {
+		c.Rect(0, top, e.l, -e.h-top, draw.Style{Stroke: medium, Fill: cast})
+	}
 	c.Rect(0, -e.h, e.l, e.h, draw.Style{Stroke: outline, Fill: concrete})
 	e.edges(c, up)
 	l := e.tendons(c, up)
@@ -105,59 +132,41 @@ func (e *sideView) draw(c draw.Canvas, along scale) {
 		l.names().draw(c, e.l+6)
 	}
 	under := e.bearings(c)
-	drawLoads(c, e.loads, e.per, e.l, -e.h)
+	drawLoads(c, e.loads, e.per, e.l, top)
 	low := e.dimensions(c, under)
 	const left draw.Pt = -9
 	extendLeft(c, -e.h, 0, left)
 	extendLeft(c, 0, 0, left)
-	stack(c, left, []draw.Pt{-e.h, 0}, []label{label{}.value(e.depth)})
+	if e.topping.taken() {
+		extendLeft(c, top, 0, left)
+		stack(c, left, []draw.Pt{top, -e.h, 0}, []label{label{}.value(e.topping), label{}.value(e.depth)})
+	} else {
+		stack(c, left, []draw.Pt{-e.h, 0}, []label{label{}.value(e.depth)})
+	}
 	note := "elevation " + along.String()
 	if up != along {
 		note = fmt.Sprintf("elevation: lengths %s, depths %s", along, up)
 	}
 	words(note).centre(c, e.l/2, low+size+5)
+	y := low + size + 5
+	for _, l := range e.axials {
+		y += leading
+		l.centre(c, e.l/2, y)
+	}
 	if !e.beside {
-		l.below(c, 0, low+size+20)
+		l.below(c, 0, y+15)
 	}
 }
 
-// tendons draws a line for each row, dashed where it is debonded, and gives the listing of the rows.
-func (e *sideView) tendons(c draw.Canvas, up scale) listing {
-	any := false
-	for _, v := range e.debonded.cells {
-		any = any || v.value > 0
-	}
-	l := listing{heads: []label{words("row"), words("height")}}
-	if any {
-		l.heads = append(l.heads, words("debonded"))
-	}
-	for i, v := range e.level.cells {
-		y := -up.of(v.value)
-		loose := min(draw.Pt(e.debonded.cells[i].value)*e.per, e.l/2)
-		if loose > 0 {
-			c.Line(0, y, loose, y, hair, dashed...)
-			c.Line(e.l-loose, y, e.l, y, hair, dashed...)
-			c.Line(loose, y-1.4, loose, y+1.4, hair)
-			c.Line(e.l-loose, y-1.4, e.l-loose, y+1.4, hair)
-		}
-		c.Line(loose, y, e.l-loose, y, medium)
-		line := listed{from: e.l + clearance, y: y, name: e.level.axis.Rows[i], columns: []entry{{label{}.value(v), beforePoint(v)}}}
-		if any && e.debonded.cells[i].value > 0 {
-			line.columns = append(line.columns, entry{label{}.value(e.debonded.cells[i]), beforePoint(e.debonded.cells[i])})
-		}
-		l.lines = append(l.lines, line)
-	}
-	return l
-}
-
-// edges draws the edges of flanges, haunches and web that are seen from the side.
+// edges draws the edges of flanges, haunches and webs that are seen from the side, as far as they are apart on paper.
 func (e *sideView) edges(c draw.Canvas, up scale) {
-	if e.parts.height.len() < 2 {
-		return
-	}
-	levels := e.parts.levels()
-	for _, v := range levels[1 : len(levels)-1] {
-		c.Line(0, -up.of(v), e.l, -up.of(v), edge)
+	const apart draw.Pt = 1.6
+	last := draw.Pt(0)
+	for _, v := range e.seen {
+		if y := up.of(v); y-last >= apart && e.h-y >= apart {
+			c.Line(0, -y, e.l, -y, edge)
+			last = y
+		}
 	}
 }
 
@@ -214,8 +223,27 @@ func (e *sideView) dimensions(c draw.Canvas, bottom draw.Pt) draw.Pt {
 	la, lb := label{}.equals(e.a), label{}.equals(e.b)
 	switch {
 	case e.span.taken():
-		across(c, 0, a, y, label{}.value(e.a), -1)
-		across(c, a, b, y, label{}.value(e.span), 1)
+		if e.a.value > 0 {
+			across(c, 0, a, y, label{}.value(e.a), -1)
+		}
+		mid := label{}.value(e.span)
+		if mid.width+4 <= b-a {
+			across(c, a, b, y, mid, 1)
+		} else { // on a line of its own
+			across(c, a, b, y+13, mid, 1)
+			extend(a, y+13)
+			extend(b, y+13)
+			last += 13
+		}
+		if e.overhang.taken() && e.overhang.value > 0 {
+			extend(e.l, y)
+			v := label{}.value(e.overhang)
+			side := 1
+			if mid.width/2+v.width+10 < (b-a)/2 { // over the line of the span
+				side = -1
+			}
+			across(c, b, e.l, y, v, side)
+		}
 	case a+3+la.width+8+lb.width+3 < b: // both from end A, on one line
 		c.Line(0, y, b, y, hair)
 		c.Circle(0, y, 1.6, draw.Style{Stroke: hair, Fill: draw.White})

@@ -30,7 +30,7 @@ var numeral = regexp.MustCompile(`−?[0-9]+(\.[0-9]+)?`)
 // TestNumbersComeFromTheRecord: every number on the figures without graduations is one that the record shows,
 // apart from scales.
 func TestNumbersComeFromTheRecord(t *testing.T) {
-	for _, m := range samples() {
+	for _, m := range append(samples(), kindsOfSection()...) {
 		n, figs := m.note(t)
 		shown := map[string]bool{}
 		names := ""
@@ -45,7 +45,7 @@ func TestNumbersComeFromTheRecord(t *testing.T) {
 		for _, a := range n.Axes {
 			names += strings.Join(a.Rows, " ") + " "
 		}
-		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-ultimate"} {
+		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-ultimate", "fig-ultimate-hogging", "fig-ultimate-curve"} {
 			count := 0
 			for _, width := range []draw.Pt{320, 510} {
 				for _, text := range drawn(t, n, figs[id], width).Texts() {
@@ -189,9 +189,14 @@ func TestErrors(t *testing.T) {
 		{drop("fig-ultimate", "neutral-axis"), 400, `no entry in role "neutral-axis"`},
 		{drop("fig-resistance", "x"), 400, `no entry in role "x"`},
 		{drop("fig-stress", "available"), 400, `no entry in role "available"`},
-		{swap("fig-section", "count", "all.geometry/height"), 400, `role "count" runs over parts, want tendons`},
+		{swap("fig-section", "count", "all.geometry/corner-x"), 400, `role "count" runs over corners, want tendons`},
 		{swap("fig-section", "count", "all.geometry/nothing"), 400, `role "count": no values under key all.geometry/nothing`},
 		{swap("fig-effects", "M-max", "all.geometry/level"), 400, `M-max`},
+		{swap("fig-section", "dimension-x2", "all.geometry/dimension-x1"), 400, `its ends are`},
+		{swap("fig-section", "depth", "all.geometry/centroid"), 400, `the outline is 750.0 mm deep`},
+		{swap("fig-ultimate", "h", "all.geometry/centroid"), 500, `the outline is 750.0 mm deep`},
+		{drop("fig-section", "spacing"), 400, `no entry in role "spacing" or "position-x"`},
+		{drop("fig-ultimate", "block-depth"), 400, `no entry in role "block-depth"`},
 		{&elsewhere, 500, `needs a row of stations, has "nowhere"`},
 		{&strange, 400, `no kind "sketch"`},
 		{figs["fig-section"], 90, `mm of width, has 32 mm`},

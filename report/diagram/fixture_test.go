@@ -5,17 +5,23 @@ import (
 	"math"
 	"slices"
 	"strconv"
+	"strings"
 	"testing"
 
 	"soffit/calc/clause"
 	"soffit/calc/quantity"
+	cross "soffit/calc/section"
 	"soffit/calc/trace"
 )
 
 // invented is a member made up for these tests: nobody's design, with forces and strains that agree among
 // themselves only as far as the pictures need it.
 type invented struct {
-	parts    [][3]float64 // height, lower, upper width, mm, from the soffit up
+	name     string
+	parts    [][3]float64 // height, lower, upper width, mm, from the soffit up; or
+	form     cross.Form
+	dims     []dimension // beside those of the parts
+	topping  [2]float64  // width, depth, mm
 	tendons  []row
 	bars     []row
 	length   float64 // m
@@ -26,12 +32,28 @@ type invented struct {
 	centroid float64
 	x        float64 // neutral axis, mm
 	capacity float64 // resistance to the greatest moment, 0 for 1.12
+	ducts    bool
+
+	set *cross.Contour // of form, once set out
 }
 
+// row is a row of tendons or bars; places, if given, are those of each, end is another height at the ends, held how far
+// from them it is held down.
 type row struct {
 	name                            string
 	count                           int
 	spacing, level, diameter, loose float64 // mm, loose in m
+	places                          []float64
+	end, held                       float64   // mm, m
+	duct                            float64   // mm
+	strands                         int       // in a duct
+	profile                         []float64 // heights at the ends of twelve equal parts of the length, mm
+}
+
+// dimension is one of a section, mm.
+type dimension struct {
+	name           string
+	x1, y1, x2, y2 float64
 }
 
 type load struct {
@@ -77,13 +99,91 @@ func each[T any](in []T, f func(T) float64) []float64 {
 	return out
 }
 
-// depth is the whole height of the section, mm.
-func (m *invented) depth() float64 {
+// contour is the section as rings and voids.
+func (m *invented) contour(t testing.TB) cross.Contour {
+	if m.set != nil {
+		return *m.set
+	}
+	if m.form != nil {
+		o, err := m.form.Outline()
+		if err != nil {
+			t.Fatal(err)
+		}
+		c := o.Contour()
+		m.set = &c
+		return c
+	}
+	var right, left cross.Ring
+	y := 0.0
+	add := func(w, y float64) {
+		right = append(right, cross.Point{X: w / 2, Y: y})
+		left = append(cross.Ring{{X: -w / 2, Y: y}}, left...)
+	}
+	for i, p := range m.parts {
+		if i == 0 || m.parts[i-1][2] != p[1] {
+			add(p[1], y)
+		}
+		y += p[0]
+		add(p[2], y)
+	}
+	return cross.Contour{Outer: []cross.Ring{append(right, left...)}}
+}
+
+// dimensions are those stated and, of parts, their heights and widths.
+func (m *invented) dimensions() []dimension {
+	out := m.dims
+	y := 0.0
+	for i, p := range m.parts {
+		w := min(p[1], p[2]) / 2
+		out = append(out, dimension{fmt.Sprintf("depth %d", i+1), -w, y, -w, y + p[0]},
+			dimension{fmt.Sprintf("lower width %d", i+1), -p[1] / 2, y, p[1] / 2, y},
+			dimension{fmt.Sprintf("upper width %d", i+1), -p[2] / 2, y + p[0], p[2] / 2, y + p[0]})
+		y += p[0]
+	}
+	return out
+}
+
+// depth is the whole height of the bare section, mm.
+func (m *invented) depth(t testing.TB) float64 {
 	var h float64
-	for _, p := range m.parts {
-		h += p[0]
+	for _, p := range m.contour(t).Outer[0] {
+		h = max(h, p.Y)
 	}
 	return h
+}
+
+// width is the net width of section and topping at a height, mm.
+func (m *invented) width(t testing.TB, y float64) float64 {
+	c := m.contour(t)
+	if h := m.depth(t); y > h {
+		return m.topping[0]
+	}
+	var w float64
+	across := func(r cross.Ring, sign float64) {
+		var at []float64
+		for i, p := range r {
+			q := r[(i+1)%len(r)]
+			if (p.Y > y) != (q.Y > y) {
+				at = append(at, p.X+(q.X-p.X)*(y-p.Y)/(q.Y-p.Y))
+			}
+		}
+		slices.Sort(at)
+		for i := 1; i < len(at); i += 2 {
+			w += sign * (at[i] - at[i-1])
+		}
+	}
+	for _, r := range c.Outer {
+		across(r, 1)
+	}
+	for _, r := range c.Holes {
+		across(r, -1)
+	}
+	for _, v := range c.Voids { // round ones
+		if d := v.Depth/2 - math.Abs(y-v.Y); d > 0 {
+			w -= v.Width - v.Depth + 2*math.Sqrt(d*(v.Depth-d))
+		}
+	}
+	return w
 }
 
 // note records the member and one figure of each kind.
@@ -96,9 +196,18 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 		}
 		return out
 	}
-	var partNames, loadNames, stationNames []string
-	for i := range m.parts {
-		partNames = append(partNames, "part "+strconv.Itoa(i+1))
+	var loadNames, stationNames, cornerNames, dimensionNames []string
+	var corners [][3]float64
+	outer := m.contour(t)
+	for k, r := range append(slices.Clone(outer.Outer), outer.Holes...) {
+		for _, p := range r {
+			cornerNames = append(cornerNames, strconv.Itoa(len(corners)+1))
+			corners = append(corners, [3]float64{p.X, p.Y, float64(k)})
+		}
+	}
+	dims := m.dimensions()
+	for _, d := range dims {
+		dimensionNames = append(dimensionNames, d.name)
 	}
 	for _, l := range m.loads {
 		loadNames = append(loadNames, l.name)
@@ -108,7 +217,8 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 	}
 	stations := n.Axis("stations", "stations", "", stationNames)
 	tendons := n.Axis("tendons", "rows of tendons", "i", names(m.tendons))
-	parts := n.Axis("parts", "parts of the section", "n", partNames)
+	parts := n.Axis("corners", "corners of the section", "n", cornerNames)
+	measures := n.Axis("dimensions", "dimensions of the section", "n", dimensionNames)
 	loads := n.Axis("loads", "loads", "n", loadNames)
 	var bars *trace.Axis
 	if len(m.bars) > 0 {
@@ -117,10 +227,33 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 	ch := n.Chapter("all", "All")
 	k := book{t, n, ch.Block("geometry", "Geometry", nil)}
 	over := func(a *trace.Axis) []*trace.Axis { return []*trace.Axis{a} }
+	corner := func(k int) func(p [3]float64) float64 { return func(p [3]float64) float64 { return p[k] } }
 	outline := []trace.Plot{
-		k.rows("height", "h_n", "mm", 0, over(parts), each(m.parts, func(p [3]float64) float64 { return p[0] })),
-		k.rows("lower", "b_{l,n}", "mm", 0, over(parts), each(m.parts, func(p [3]float64) float64 { return p[1] })),
-		k.rows("upper", "b_{u,n}", "mm", 0, over(parts), each(m.parts, func(p [3]float64) float64 { return p[2] })),
+		k.rows("corner-x", "x_{k,n}", "mm", 1, over(parts), each(corners, corner(0))),
+		k.rows("corner-y", "y_{k,n}", "mm", 1, over(parts), each(corners, corner(1))),
+		k.rows("corner-ring", "r_{k,n}", "", 0, over(parts), each(corners, corner(2))),
+	}
+	if len(outer.Voids) > 0 {
+		var names []string
+		for i := range outer.Voids {
+			names = append(names, strconv.Itoa(i+1))
+		}
+		voids := over(n.Axis("voids", "voids", "n", names))
+		outline = append(outline,
+			k.rows("void-x", "x_{o,n}", "mm", 1, voids, each(outer.Voids, func(v cross.Round) float64 { return v.X })),
+			k.rows("void-y", "y_{o,n}", "mm", 1, voids, each(outer.Voids, func(v cross.Round) float64 { return v.Y })),
+			k.rows("void-width", "w_{o,n}", "mm", 1, voids, each(outer.Voids, func(v cross.Round) float64 { return v.Width })),
+			k.rows("void-depth", "d_{o,n}", "mm", 1, voids, each(outer.Voids, func(v cross.Round) float64 { return v.Depth })))
+	}
+	if m.topping[1] > 0 {
+		outline = append(outline, k.value("topping-width", "b_top", "mm", 0, m.topping[0]), k.value("topping-depth", "h_top", "mm", 0, m.topping[1]))
+	}
+	ends := []trace.Plot{
+		k.rows("dimension", "v_n", "mm", 0, over(measures), each(dims, func(d dimension) float64 { return math.Hypot(d.x2-d.x1, d.y2-d.y1) })),
+		k.rows("dimension-x1", "x_{1,n}", "mm", 1, over(measures), each(dims, func(d dimension) float64 { return d.x1 })),
+		k.rows("dimension-y1", "y_{1,n}", "mm", 1, over(measures), each(dims, func(d dimension) float64 { return d.y1 })),
+		k.rows("dimension-x2", "x_{2,n}", "mm", 1, over(measures), each(dims, func(d dimension) float64 { return d.x2 })),
+		k.rows("dimension-y2", "y_{2,n}", "mm", 1, over(measures), each(dims, func(d dimension) float64 { return d.y2 })),
 	}
 	rows := func(prefix, index string, a *trace.Axis, r []row) []trace.Plot {
 		return []trace.Plot{
@@ -132,14 +265,49 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 	}
 	tp := rows("", "i", tendons, m.tendons)
 	level := tp[2]
+	var deflected []trace.Plot
+	if slices.ContainsFunc(m.tendons, func(r row) bool { return r.end > 0 }) {
+		deflected = []trace.Plot{
+			k.rows("end-level", "y_{e,i}", "mm", 0, over(tendons), each(m.tendons, func(r row) float64 { return max(r.end, r.level) })),
+			k.rows("held-down", "l_{h,i}", "m", 2, over(tendons), each(m.tendons, func(r row) float64 { return r.held }))}
+		tp = append(tp, deflected[0])
+	}
+	if m.ducts {
+		tp = append(tp, k.rows("duct-diameter", "ø_{d,i}", "mm", 0, over(tendons), each(m.tendons, func(r row) float64 { return r.duct })),
+			k.rows("strands", "n_{s,i}", "", 0, over(tendons), each(m.tendons, func(r row) float64 { return float64(r.strands) })))
+	}
+	single := func(prefix, index string, rs []row) []trace.Plot {
+		if !slices.ContainsFunc(rs, func(r row) bool { return r.places != nil }) {
+			return nil
+		}
+		var x, no []float64
+		var names []string
+		for i, r := range rs {
+			for j := range r.count {
+				at := (float64(j) - float64(r.count-1)/2) * r.spacing
+				if r.places != nil {
+					at = r.places[j]
+				}
+				x, no, names = append(x, at), append(no, float64(i)), append(names, fmt.Sprintf("%s-%d", r.name, j+1))
+			}
+		}
+		one := over(n.Axis(prefix+"tendon positions", "one by one", "m", names))
+		return []trace.Plot{k.rows(prefix+"position-x", "x_{"+index+",m}", "mm", 1, one, x), k.rows(prefix+"position-row", "n_{"+index+",m}", "", 0, one, no)}
+	}
+	tp = append(tp, single("", "p", m.tendons)...)
 	debonded := k.rows("debonded", "l_{db,i}", "m", 2, over(tendons), each(m.tendons, func(r row) float64 { return r.loose }))
 	var bp []trace.Plot
 	if bars != nil {
-		bp = rows("bar-", "j", bars, m.bars)
+		bp = append(rows("bar-", "j", bars, m.bars), single("bar-", "s", m.bars)...)
 	}
 	centroid := k.value("centroid", "y_s", "mm", 2, m.centroid)
-	depth := k.value("depth", "h", "mm", 0, m.depth())
-	sec := append(append(append([]trace.Plot{centroid, depth}, outline...), tp...), bp...)
+	depth := k.value("depth", "h", "mm", 0, m.depth(t))
+	sec := append(append(append([]trace.Plot{centroid, depth}, slices.Concat(outline, ends)...), tp...), bp...)
+	total := m.depth(t) + m.topping[1]
+	whole := k.value("total-depth", "h_tot", "mm", 0, total)
+	if m.topping[1] > 0 {
+		sec = append(sec, whole, k.value("composite-centroid", "y_co", "mm", 2, m.centroid+0.6*(total-m.centroid)*m.topping[1]/total))
+	}
 	k.b.Figure("fig-section", "section", "Section", "", sec...)
 	k.b.Figure("fig-section-loose", "section", "Section, debonded shown", "", append([]trace.Plot{debonded}, sec...)...)
 
@@ -153,15 +321,28 @@ func (m *invented) note(t testing.TB) (*trace.Note, map[string]*trace.Figure) {
 		k.rows("load-from", "a_n", "m", 2, over(loads), each(m.loads, func(l load) float64 { return l.from })),
 		k.rows("load-to", "c_n", "m", 2, over(loads), each(m.loads, func(l load) float64 { return l.to })),
 	}
+	if m.ducts { // the last load also acts along the member
+		along := make([]float64, len(m.loads))
+		along[len(along)-1] = 120
+		el = append(el, k.rows("load-N", "N_n", "kN", 0, over(loads), along))
+	}
 	k.b.Figure("fig-elevation", "elevation", "Elevation", "", el...)
-	seen := append(append([]trace.Plot{}, el...), outline...)
+	seen := append(append(append([]trace.Plot{}, el...), outline...), deflected...)
+	if m.length-m.b > 0 {
+		seen = append(seen, k.value("overhang-B", "a_B", "m", 3, m.length-m.b))
+	}
 	if bars != nil {
 		seen = append(seen, bp[2])
 	}
 	k.b.Figure("fig-elevation-parts", "elevation", "Elevation with its edges", "", seen...)
 
 	m.effects(ch, n, stations, el[4:6])
-	m.bending(ch, n, stations, tendons, bars, outline, depth)
+	if slices.ContainsFunc(m.tendons, func(r row) bool { return r.profile != nil }) {
+		m.profiles(ch, n, tendons, seen)
+	}
+	outline = append(outline, tp...)
+	outline = append(outline, bp...)
+	m.bending(ch, n, stations, tendons, bars, outline, total)
 	m.stress(ch, n, stations, tendons)
 	if err := n.Err(); err != nil {
 		t.Fatal(err)
@@ -278,6 +459,11 @@ func (m *invented) effects(ch *trace.Chapter, n *trace.Note, stations *trace.Axi
 	check := &clause.Check{ID: "bending", Name: "bending", Demand: "M_{Ed,max}", Limit: "M_Rd"}
 	k.b.Check(check)
 	k.b.Figure("fig-resistance", "resistance", "Resistance", "", append([]trace.Plot{x, dem, res}, sup...)...)
+	least := plots[2]
+	least.Role = "demand-least"
+	hog := slices.Min(get(lo(0)))
+	up := k.rows("resistance-hogging", "M_{Rd,h}", "kN·m", 1, over, get(func(x float64) float64 { return max(1.3*-hog, 0.3*most) * min(1, x/lt+0.3, (m.length-x)/lt+0.3) }))
+	k.b.Figure("fig-resistance-both", "resistance", "Resistances", "", append([]trace.Plot{x, dem, res, least, up}, sup...)...)
 }
 
 func (m *invented) stress(ch *trace.Chapter, n *trace.Note, stations, tendons *trace.Axis) {
@@ -288,6 +474,14 @@ func (m *invented) stress(ch *trace.Chapter, n *trace.Note, stations, tendons *t
 		d := min(s.x, m.length-s.x)
 		for i, t := range m.tendons {
 			lt := 70 * t.diameter / 1000
+			if t.duct > 0 { // stressed from end A, friction and draw-in
+				v := 1300 - 6*s.x
+				if s.x < 0.4*m.length {
+					v = 1300 - 6*(0.8*m.length-s.x)
+				}
+				present, available = append(present, v-20*float64(i)), append(available, 1426.1)
+				continue
+			}
 			present = append(present, (1120-float64(i%2)*15)*max(0, min(1, (d-t.loose)/lt)))
 			e := max(0, d-t.loose)
 			switch {
@@ -298,91 +492,161 @@ func (m *invented) stress(ch *trace.Chapter, n *trace.Note, stations, tendons *t
 			}
 		}
 	}
-	k.b.Figure("fig-stress", "tendon-stress", "Stress", "",
+	var pulled []trace.Plot
+	if m.ducts {
+		pulled = append(pulled, k.rows("stressed-A", "n_{A,i}", "", 0, []*trace.Axis{tendons}, each(m.tendons, func(r row) float64 { return min(r.duct, 1) })))
+	}
+	k.b.Figure("fig-stress", "tendon-stress", "Stress", "", append(pulled,
 		trace.Plot{Role: "x", Key: "all.effects/x"},
 		k.rows("present", "σ_{pm,i}", "MPa", 1, over, present),
-		k.rows("available", "σ_{pd,i}", "MPa", 1, over, available))
+		k.rows("available", "σ_{pd,i}", "MPa", 1, over, available))...)
 }
 
-func (m *invented) bending(ch *trace.Chapter, n *trace.Note, stations, tendons, bars *trace.Axis, outline []trace.Plot, depth trace.Plot) {
-	b := ch.Block("bending", "Bending", stations)
-	k := book{nil, n, b}
-	h, x := m.depth(), m.x
-	const fcd, ecu, ep0 = 30.0, 3.5, 5.6
+// profiles draws the elevation with heights of tendons given at the ends of twelve parts of the length.
+func (m *invented) profiles(ch *trace.Chapter, n *trace.Note, tendons *trace.Axis, seen []trace.Plot) {
+	const parts = 12
+	var names []string
+	var x, y []float64
+	for i := range parts + 1 {
+		names = append(names, fmt.Sprintf("point %d", i))
+		x = append(x, m.length*float64(i)/parts)
+		for _, r := range m.tendons {
+			if r.profile == nil {
+				y = append(y, r.level)
+				continue
+			}
+			y = append(y, r.profile[i])
+		}
+	}
+	points := n.Axis("points", "points of the tendons", "", names)
+	k := book{nil, n, ch.Block("profiles", "Profiles", points)}
+	plots := []trace.Plot{k.rows("profile-x", "x_p", "m", 3, []*trace.Axis{points}, x), k.rows("profile-y", "y_{p,i}", "mm", 0, []*trace.Axis{points, tendons}, y)}
+	for _, p := range seen {
+		switch p.Role {
+		case "level", "end-level", "held-down":
+		default:
+			plots = append(plots, trace.Plot{Role: p.Role, Key: "all.geometry/" + strings.TrimPrefix(p.Key, "all.geometry/")})
+		}
+	}
+	k.b.Figure("fig-elevation-profile", "elevation", "Elevation with profiles", "", plots...)
+}
+
+func (m *invented) bending(ch *trace.Chapter, n *trace.Note, stations, tendons, bars *trace.Axis, outline []trace.Plot, h float64) {
+	const ecu, ep0 = 3.5, 5.6
 	every := func(v float64) []float64 { return each(m.stations, func(station) float64 { return v }) }
 	over := []*trace.Axis{stations}
-	area := func(y float64) (a, s float64) { // of the section above y, with its moment about the top
-		const strips = 400
-		for i := range strips {
-			t := (float64(i) + 0.5) / strips * (h - y)
-			dy := (h - y) / strips
-			level, w := 0.0, 0.0
-			for _, p := range m.parts {
-				if v := h - t; v >= level && v <= level+p[0] {
-					w = p[1] + (p[2]-p[1])*(v-level)/p[0]
-				}
-				level += p[0]
+	lines := func(of func(role string) bool) (out []trace.Plot) {
+		for _, p := range outline {
+			if of(p.Role) {
+				out = append(out, trace.Plot{Role: p.Role, Key: "all.geometry/" + strings.TrimPrefix(p.Key, "all.geometry/")})
 			}
-			a += w * dy
-			s += w * dy * t
 		}
-		return a, s
+		return out
 	}
-	a, s := area(h - 0.8*x)
-	fc, yc := a*fcd/1000, s/a
-	strain := func(d float64) float64 { return ecu * (d - x) / x }
-	plots := append([]trace.Plot(nil), outline...)
-	for i := range plots {
-		plots[i].Key = "all.geometry/" + plots[i].Role
-	}
-	plots = append(plots, trace.Plot{Role: "h", Key: "all.geometry/depth"},
-		k.rows("neutral-axis", "x", "mm", 2, over, every(x)),
-		k.rows("block-depth", "a", "mm", 2, over, every(0.8*x)),
-		k.value("block-stress", "f_cd", "MPa", 3, fcd),
-		k.rows("block-force", "F_c", "kN", 1, over, every(fc)),
-		k.rows("block-centroid", "d_c", "mm", 2, over, every(yc)),
-		k.value("strain-top", "ε_cu3", "‰", 1, ecu))
-	grid := func(id, symbol, unit string, dec int, a *trace.Axis, rs []row, f func(row) float64) {
-		var v []float64
-		for range m.stations {
-			v = append(v, each(rs, f)...)
+	shape := lines(func(r string) bool {
+		return strings.HasPrefix(r, "corner") || strings.HasPrefix(r, "void") || strings.HasPrefix(r, "topping")
+	})
+	rows := lines(func(r string) bool {
+		switch r {
+		case "level", "bar-level", "end-level":
+			return false
 		}
-		plots = append(plots, k.rows(id, symbol, unit, dec, []*trace.Axis{stations, a}, v))
-	}
-	total := 0.0
-	for _, r := range m.tendons {
-		total += float64(r.count)
-	}
-	share := func(r row) float64 { return fc * float64(r.count) / total }
-	plots = append(plots, k.rows("depth", "d_i", "mm", 0, []*trace.Axis{tendons}, each(m.tendons, func(r row) float64 { return h - r.level })))
-	grid("prestrain", "ε_{p0,i}", "‰", 4, tendons, m.tendons, func(r row) float64 { return ep0 - r.level/1000 })
-	grid("strain", "ε_{p,i}", "‰", 3, tendons, m.tendons, func(r row) float64 { return ep0 - r.level/1000 + strain(h-r.level) })
-	grid("force", "F_{p,i}", "kN", 1, tendons, m.tendons, share)
-	grid("lever", "z_i", "mm", 2, tendons, m.tendons, func(r row) float64 { return h - r.level - yc })
-	if bars != nil {
-		plots = append(plots, k.rows("bar-depth", "d_{s,j}", "mm", 0, []*trace.Axis{bars}, each(m.bars, func(r row) float64 { return h - r.level })))
-		grid("bar-strain", "ε_{s,j}", "‰", 3, bars, m.bars, func(r row) float64 { return strain(h - r.level) })
-		grid("bar-force", "F_{s,j}", "kN", 1, bars, m.bars, func(r row) float64 {
-			return float64(r.count) * math.Pi / 4 * r.diameter * r.diameter * max(-435, min(435, strain(h-r.level)*200)) / 1000
-		})
-		grid("bar-lever", "z_{s,j}", "mm", 2, bars, m.bars, func(r row) float64 { return h - r.level - yc })
-	}
-	plots = append(plots, k.rows("resistance", "M_Rd", "kN·m", 1, over, every(fc*(0.85*h-yc)/1000)))
-	b.Figure("fig-ultimate-bare", "ultimate", "Strain, stress and forces, rows as lines", "midspan", append([]trace.Plot(nil), plots...)...)
-	for _, role := range []string{"count", "spacing", "diameter", "bar-count", "bar-spacing", "bar-diameter"} {
-		if bars != nil || role[:3] != "bar" {
-			plots = append(plots, trace.Plot{Role: role, Key: "all.geometry/" + role})
+		return !strings.HasPrefix(r, "corner") && !strings.HasPrefix(r, "void") && !strings.HasPrefix(r, "topping")
+	})
+	at := func(r row, hogging bool) float64 { return pick(hogging, r.level, h-r.level) }
+	// state records a state of equilibrium in a block of its own.
+	state := func(slug string, x, fcd float64, hogging, curved bool) (*trace.Block, []trace.Plot) {
+		b := ch.Block(slug, "Bending", stations)
+		k := book{nil, n, b}
+		area := func(depth float64) (a, s float64) { // of the section down to a depth, with its moment about the edge
+			const strips = 300
+			for i := range strips {
+				t := (float64(i) + 0.5) / strips * depth
+				w := m.width(k.t, pick(hogging, t, h-t))
+				a += w * depth / strips
+				s += w * depth / strips * t
+			}
+			return a, s
 		}
+		a, s := area(min(0.8*x, h))
+		fc, yc := a*fcd/1000, s/a
+		strain := func(d float64) float64 { return ecu * (d - x) / x }
+		plots := append(slices.Clone(shape), k.value("h", "h", "mm", 0, h),
+			k.rows("neutral-axis", "x", "mm", 2, over, every(x)),
+			k.value("block-stress", "f_cd", "MPa", 3, fcd),
+			k.rows("block-force", "F_c", "kN", 1, over, every(fc)),
+			k.rows("block-centroid", "d_c", "mm", 2, over, every(yc)),
+			k.value("strain-top", "ε_cu3", "‰", 1, ecu))
+		if curved {
+			const fibres = 64
+			var names []string
+			var level, stress []float64
+			for i := range fibres {
+				y := h * (float64(i) + 0.5) / fibres
+				names = append(names, strconv.Itoa(i+1))
+				level = append(level, y)
+				e := ecu * (x - pick(hogging, y, h-y)) / x
+				v := fcd * (1 - math.Pow(1-min(max(e, 0), 2)/2, 2))
+				if m.topping[1] > 0 && y > h-m.topping[1] {
+					v *= 0.7
+				}
+				stress = append(stress, v)
+			}
+			axis := n.Axis("fibres "+slug, "fibres", "m", names)
+			var all []float64
+			for range m.stations {
+				all = append(all, stress...)
+			}
+			plots = append(plots, k.rows("fibre-level", "y_{f,m}", "mm", 2, []*trace.Axis{axis}, level),
+				k.rows("fibre-stress", "σ_{c,m}", "MPa", 2, []*trace.Axis{stations, axis}, all))
+		} else {
+			plots = append(plots, k.rows("block-depth", "a", "mm", 2, over, every(0.8*x)))
+		}
+		if hogging {
+			plots = append(plots, k.value("hogging", "n_h", "", 0, 1))
+		}
+		grid := func(id, symbol, unit string, dec int, a *trace.Axis, rs []row, f func(row) float64) {
+			var v []float64
+			for range m.stations {
+				v = append(v, each(rs, f)...)
+			}
+			plots = append(plots, k.rows(id, symbol, unit, dec, []*trace.Axis{stations, a}, v))
+		}
+		total := 0.0
+		for _, r := range m.tendons {
+			total += float64(r.count)
+		}
+		whole := func(r row) float64 { return ep0 - r.level/1000 + strain(at(r, hogging)) }
+		plots = append(plots, k.rows("depth", "d_i", "mm", 0, []*trace.Axis{tendons}, each(m.tendons, func(r row) float64 { return at(r, hogging) })))
+		grid("prestrain", "ε_{p0,i}", "‰", 4, tendons, m.tendons, func(r row) float64 { return ep0 - r.level/1000 })
+		grid("strain", "ε_{p,i}", "‰", 3, tendons, m.tendons, whole)
+		grid("force", "F_{p,i}", "kN", 1, tendons, m.tendons, func(r row) float64 { return fc * float64(r.count) / total })
+		grid("lever", "z_i", "mm", 2, tendons, m.tendons, func(r row) float64 { return at(r, hogging) - yc })
+		if bars != nil {
+			plots = append(plots, k.rows("bar-depth", "d_{s,j}", "mm", 0, []*trace.Axis{bars}, each(m.bars, func(r row) float64 { return at(r, hogging) })))
+			grid("bar-strain", "ε_{s,j}", "‰", 3, bars, m.bars, func(r row) float64 { return strain(at(r, hogging)) })
+			grid("bar-force", "F_{s,j}", "kN", 1, bars, m.bars, func(r row) float64 {
+				return float64(r.count) * math.Pi / 4 * r.diameter * r.diameter * max(-435, min(435, strain(at(r, hogging))*200)) / 1000
+			})
+			grid("bar-lever", "z_{s,j}", "mm", 2, bars, m.bars, func(r row) float64 { return at(r, hogging) - yc })
+		}
+		return b, append(plots, k.rows("resistance", "M_Rd", "kN·m", 1, over, every(fc*(0.85*h-yc)/1000)))
 	}
-	b.Figure("fig-ultimate", "ultimate", "Strain, stress and forces", "midspan", plots...)
+	b, plots := state("bending", m.x, 30, false, false)
+	b.Figure("fig-ultimate-bare", "ultimate", "Strain, stress and forces, rows as lines", "midspan", slices.Clone(plots)...)
+	b.Figure("fig-ultimate", "ultimate", "Strain, stress and forces", "midspan", append(plots, rows...)...)
+	b, plots = state("bending-hogging", 0.22*h, 28, true, false)
+	b.Figure("fig-ultimate-hogging", "ultimate", "Strain, stress and forces, hogging", "midspan", append(plots, rows...)...)
+	b, plots = state("bending-curve", max(m.x, 0.2*h), 26, false, true)
+	b.Figure("fig-ultimate-curve", "ultimate", "Strain, stress and forces, stress as a curve", "midspan", append(plots, rows...)...)
 }
 
 // sample members.
 func tBeam() *invented {
 	m := &invented{
 		parts:   [][3]float64{{550, 300, 300}, {60, 300, 420}, {140, 1200, 1200}},
-		tendons: []row{{"bottom", 6, 45, 50, 12.5, 0}, {"second", 4, 50, 95, 12.5, 1.5}, {"top", 2, 200, 690, 9.3, 0}},
-		bars:    []row{{"soffit", 2, 210, 45, 16, 0}},
+		tendons: []row{{name: "bottom", count: 6, spacing: 45, level: 50, diameter: 12.5}, {name: "second", count: 4, spacing: 50, level: 95, diameter: 12.5, loose: 1.5}, {name: "top", count: 2, spacing: 200, level: 690, diameter: 9.3}},
+		bars:    []row{{name: "soffit", count: 2, spacing: 210, level: 45, diameter: 16}},
 		length:  14.3, a: 0.15, b: 14.15, bearing: [2]float64{200, 200},
 		loads: []load{{"self-weight", 8.61, 0, 0, 14.3}, {"finishes", 2.4, 0, 0, 14.3}, {"imposed", 6, 0, 0, 14.3},
 			{"partition", 4, 0, 2, 9}, {"crane", 0, 45, 7.15, 7.15}},
@@ -400,7 +664,7 @@ func iBeam() *invented {
 		centroid: 603.18, x: 152.4,
 	}
 	for i := range 8 {
-		m.tendons = append(m.tendons, row{fmt.Sprintf("%d", i+1), 8, 50, 50 + 45*float64(i), 15.2, float64(i%3) * 1.5})
+		m.tendons = append(m.tendons, row{name: fmt.Sprintf("%d", i+1), count: 8, spacing: 50, level: 50 + 45*float64(i), diameter: 15.2, loose: float64(i%3) * 1.5})
 		if i > 3 {
 			m.tendons[i].count = 2
 			m.tendons[i].spacing = 60
@@ -413,7 +677,7 @@ func iBeam() *invented {
 func plank() *invented {
 	m := &invented{
 		parts:   [][3]float64{{150, 1200, 1200}},
-		tendons: []row{{"lower", 10, 110, 30, 9.3, 0}},
+		tendons: []row{{name: "lower", count: 10, spacing: 110, level: 30, diameter: 9.3}},
 		length:  5.2, a: 0.05, b: 5.15, bearing: [2]float64{70, 70},
 		loads:    []load{{"self-weight", 4.5, 0, 0, 5.2}, {"screed", 1.2, 0, 0, 5.2}, {"imposed", 3, 0, 0, 5.2}},
 		centroid: 75, x: 24.31,

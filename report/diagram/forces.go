@@ -42,7 +42,7 @@ func (u *equilibrium) forces(c draw.Canvas, f frame, x, run draw.Pt, in layout) 
 	if len(u.rows) > 0 { // the symbol where the line is free for longest
 		ends := []draw.Pt{origin}
 		for _, y := range at {
-			if y > origin {
+			if (y-origin)*u.down() > 0 {
 				ends = append(ends, y)
 			}
 		}
@@ -68,7 +68,7 @@ func (u *equilibrium) forces(c draw.Canvas, f frame, x, run draw.Pt, in layout) 
 	} else {
 		thrust = label{}.equals(u.force).say(draw.Serif, " at ").equals(u.centroid)
 		moment := label{}.equals(u.resistance)
-		l.lines = append(l.lines, listed{free: true, y: f.y + 6, remark: &moment})
+		l.lines = append(l.lines, listed{free: true, y: max(f.y, slices.Max(append(at, 0))) + 6, remark: &moment})
 	}
 	l.lines = append(l.lines, listed{from: line + 2, y: origin, remark: &thrust})
 	l.draw(c, line+5)
@@ -77,14 +77,22 @@ func (u *equilibrium) forces(c draw.Canvas, f frame, x, run draw.Pt, in layout) 
 // separated are the heights of the forces of the rows, moved apart where their arrows would lie on each other or on
 // that of the block.
 func (u *equilibrium) separated(f frame, origin draw.Pt) []draw.Pt {
-	const apart draw.Pt = 4.4
-	at, room := []draw.Pt{origin}, []draw.Pt{apart}
-	for _, r := range u.rows {
-		at, room = append(at, u.depthAt(f, r.depth.value)), append(room, apart)
+	out := make([]draw.Pt, len(u.rows))
+	for _, over := range []bool{true, false} {
+		var at, room []draw.Pt
+		var of []int
+		for i, r := range u.rows {
+			if y := u.depthAt(f, r.depth.value); (y < origin) == over {
+				at, room, of = append(at, y), append(room, forcesApart), append(of, i)
+			}
+		}
+		to := spread(at, room, origin+forcesApart/2, f.y+2)
+		if over {
+			to = spread(at, room, -8, origin-forcesApart/2)
+		}
+		for k, i := range of {
+			out[i] = to[k]
+		}
 	}
-	to := spread(at, room, -1e6, 1e6)
-	for i := range to {
-		to[i] += origin - to[0] // the force in the block stays
-	}
-	return to[1:]
+	return out
 }

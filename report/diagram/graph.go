@@ -97,6 +97,26 @@ func (g *graph) points(of ...column) []draw.Point {
 	return out
 }
 
+// runs are the points of a column, stretch by stretch where stations without a value lie between.
+func (g *graph) runs(c column) [][]draw.Point {
+	var out [][]draw.Point
+	broken := true
+	for _, i := range g.along.order {
+		v := c.cells[i]
+		if !v.taken() {
+			broken = true
+			continue
+		}
+		if broken {
+			out = append(out, nil)
+		}
+		last := len(out) - 1
+		out[last] = append(out[last], g.at(g.along.x.cells[i].value, v.value))
+		broken = false
+	}
+	return out
+}
+
 // envelope draws the area between two lines, the governing one heavier.
 func (g *graph) envelope(c draw.Canvas, a, b []draw.Point) {
 	area := append([]draw.Point(nil), a...)

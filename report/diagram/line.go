@@ -19,6 +19,9 @@ var (
 	concrete   = draw.Grey(0.94)
 	compressed = draw.Grey(0.78)
 	envelope   = draw.Grey(0.90)
+	cast       = draw.Grey(0.98) // topping
+	squeezed   = draw.Grey(0.84) // compressed topping
+	faint      = draw.Grey(0.5)  // what lies elsewhere along the member
 )
 
 // chain is the dash of axes of symmetry and neutral axes, dashed that of hidden and second lines, long that of bars

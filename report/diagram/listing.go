@@ -14,6 +14,8 @@ type listing struct {
 	heads []label
 	lines []listed
 	floor draw.Pt
+
+	straight bool // leaders run level up to where the listing begins
 }
 
 // listed is one line: a row's name and its columns, or one remark across them. From and Y are where its leader starts; a free
@@ -92,7 +94,7 @@ func (l listing) beside(c draw.Canvas, x draw.Pt) {
 	for i, e := range l.lines {
 		switch turn := e.from + draw.Pt(math.Abs(float64(to[i]-e.y))); {
 		case e.free:
-		case l.crowded(i) && turn < x: // away from the others' lines at once
+		case l.crowded(i) && turn < x && !l.straight: // away from the others' lines at once
 			c.Polyline([]draw.Point{{X: e.from, Y: e.y}, {X: turn, Y: to[i]}, {X: x + bend, Y: to[i]}}, draw.Style{Stroke: hair})
 		default:
 			leader(c, e.from, e.y, x, x+bend, to[i])
@@ -149,7 +151,7 @@ func (l listing) below(c draw.Canvas, x, y draw.Pt) draw.Pt {
 
 // names is the listing with the names of the rows alone, for a drawing that has the rest below.
 func (l listing) names() listing {
-	out := listing{lines: slices.Clone(l.lines), floor: l.floor}
+	out := listing{lines: slices.Clone(l.lines), floor: l.floor, straight: l.straight}
 	for i := range out.lines {
 		out.lines[i].columns = nil
 	}

@@ -16,6 +16,24 @@ type loading struct {
 	label    label
 }
 
+// axials are the rows of loads that act along the member, in the optional role load-N, compression positive: a line of
+// words for each.
+func (d *data) axials() []label {
+	if !d.has("load-N") {
+		return nil
+	}
+	n := d.rows("load-N")
+	var out []label
+	for i, v := range n.cells {
+		if v.value == 0 {
+			continue
+		}
+		l := words(shorten(draw.Serif, n.axis.Rows[i], 1.4*nameRoom)).gap(0.5).value(v)
+		out = append(out, l.say(draw.Serif, " along the member, "+pick(v.value > 0, "compression", "tension")))
+	}
+	return out
+}
+
 // loads are the rows of loads. A row without any force is left out.
 func (d *data) loads() []loading {
 	if !d.has("load-from") {

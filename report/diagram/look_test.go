@@ -20,13 +20,16 @@ func TestLook(t *testing.T) {
 	if *look == "" {
 		t.Skip("no folder given")
 	}
-	for _, w := range []draw.Pt{320, 510} {
-		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-effects", "fig-ultimate", "fig-resistance", "fig-stress"} {
+	for _, w := range []draw.Pt{340, 510} {
+		for _, id := range []string{"fig-section", "fig-section-loose", "fig-elevation", "fig-elevation-parts", "fig-elevation-profile", "fig-effects", "fig-ultimate", "fig-ultimate-hogging", "fig-ultimate-curve", "fig-resistance", "fig-resistance-both", "fig-stress"} {
 			d := pdf.New(pdf.Options{Title: "figures", Created: time.Unix(0, 0)})
 			var s *pdf.Sheet
 			y := draw.SheetHeight
-			for _, m := range samples() {
+			for _, m := range append(samples(), kindsOfSection()...) {
 				n, figs := m.note(t)
+				if figs[id] == nil {
+					continue
+				}
 				fig, err := Lay(n, figs[id], w)
 				if err != nil {
 					t.Errorf("%s %.0f: %v", id, float64(w), err)

@@ -68,7 +68,7 @@ func member(t *rapid.T) *invented {
 	for i := range rapid.IntRange(0, 3).Draw(t, "bars") {
 		level := []float64{40, h - 45, 85}[i]
 		if level < h-30 {
-			m.bars = append(m.bars, row{name: fmt.Sprintf("bars %d", i+1), count: 2, spacing: m.width(level) - 70, level: level, diameter: 16})
+			m.bars = append(m.bars, row{name: fmt.Sprintf("bars %d", i+1), count: 2, spacing: m.width(nil, level) - 70, level: level, diameter: 16})
 		}
 	}
 	m.length = step("length", 3, 40, 1) + rapid.SampledFrom([]float64{0, 0.3, 0.75}).Draw(t, "and")
@@ -132,14 +132,29 @@ func TestFiguresAreClean(t *testing.T) {
 	})
 }
 
-// width is the width of the section at a height, mm.
-func (m *invented) width(y float64) float64 {
-	level := 0.0
-	for _, p := range m.parts {
-		if y <= level+p[0] {
-			return p[1] + (p[2]-p[1])*(y-level)/p[0]
-		}
-		level += p[0]
+// TestKindsAreClean draws every figure of a member of each kind of section at several widths, as TestFiguresAreClean.
+func TestKindsAreClean(t *testing.T) {
+	for _, m := range kindsOfSection() {
+		t.Run(m.name, func(t *testing.T) {
+			n, figs := m.note(t)
+			for id, f := range figs {
+				for _, width := range []draw.Pt{320, 350, 384, 420, 516} {
+					fig, err := Lay(n, f, width)
+					if err != nil {
+						t.Errorf("%s at %.0f pt: %v", id, float64(width), err)
+						continue
+					}
+					if fig.Height > 460 {
+						t.Errorf("%s at %.0f pt is %.0f pt high", id, float64(width), float64(fig.Height))
+					}
+					var r draw.Recorder
+					area := draw.BoxAt(40, 60, width, fig.Height)
+					fig.Draw(&r, area.X0+(area.Width()-fig.Width)/2, area.Y0)
+					for _, fault := range append(r.Faults(), r.Outside(area, nil)...) {
+						t.Errorf("%s at %.0f pt: %s", id, float64(width), fault)
+					}
+				}
+			}
+		})
 	}
-	return 0
 }

@@ -2,6 +2,7 @@ package diagram
 
 import (
 	"fmt"
+	"strings"
 
 	"soffit/calc/trace"
 )
@@ -9,19 +10,19 @@ import (
 // data reads the entries of a figure by their roles. The first fault is kept and asked for once at the end,
 // so that a diagram reads as a list of what it needs.
 type data struct {
-	note  *trace.Note
-	fig   *trace.Figure
-	roles map[string][]*trace.Line
-	check *trace.Check // the entry in the role "check", if it is one
-	err   error
+	note   *trace.Note
+	fig    *trace.Figure
+	roles  map[string][]*trace.Line
+	checks map[string]*trace.Check // the entries in roles that begin with "check" and are checks
+	err    error
 }
 
 func read(n *trace.Note, f *trace.Figure) *data {
-	d := &data{note: n, fig: f, roles: map[string][]*trace.Line{}}
+	d := &data{note: n, fig: f, roles: map[string][]*trace.Line{}, checks: map[string]*trace.Check{}}
 	for _, p := range f.Series {
 		e := n.Entry(p.Key)
-		if c, ok := e.(*trace.Check); ok && p.Role == "check" {
-			d.check = c
+		if c, ok := e.(*trace.Check); ok && strings.HasPrefix(p.Role, "check") {
+			d.checks[p.Role] = c
 			continue
 		}
 		l := trace.LineOf(e)

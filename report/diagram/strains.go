@@ -1,8 +1,12 @@
 package diagram
 
-import "soffit/report/draw"
+import (
+	"slices"
 
-// strains draws the strain due to bending from the line of zero, compression to the left, and writes the whole
+	"soffit/report/draw"
+)
+
+// strains draws the strain due to bending from the line of zero, compression to the left, and writes the
 // strain of the rows beside it where there is room. It returns where that line is, where the picture ends, and
 // whether any strain is written.
 func (u *equilibrium) strains(c draw.Canvas, f frame, x, run draw.Pt) (zero, end draw.Pt, written bool) {
@@ -20,52 +24,55 @@ func (u *equilibrium) strains(c draw.Canvas, f frame, x, run draw.Pt) (zero, end
 	place := func(depth float64) draw.Point {
 		return draw.Point{X: zero + draw.Pt(at(depth))*per, Y: u.depthAt(f, depth)}
 	}
-	bottom := place(deepest)
+	bottom, edge := place(deepest), draw.Point{X: zero, Y: u.depthAt(f, 0)}
 	if at(deepest) > 0 {
 		axis := draw.Point{X: zero, Y: u.axis(f)}
-		c.Polygon([]draw.Point{{X: zero}, place(0), axis}, draw.Style{Fill: compressed})
+		c.Polygon([]draw.Point{edge, place(0), axis}, draw.Style{Fill: compressed})
 	} else {
-		c.Polygon([]draw.Point{{X: zero}, place(0), bottom, {X: zero, Y: bottom.Y}}, draw.Style{Fill: compressed})
+		c.Polygon([]draw.Point{edge, place(0), bottom, {X: zero, Y: bottom.Y}}, draw.Style{Fill: compressed})
 	}
 	for _, r := range u.rows {
 		p := place(r.depth.value)
 		c.Line(zero, p.Y, p.X, p.Y, hair)
 	}
 	written = u.strainsWritten(c, zero, func(depth float64) draw.Point { return place(depth) })
-	c.Polyline([]draw.Point{{X: zero}, place(0), bottom}, draw.Style{Stroke: medium})
-	c.Line(zero, 0, zero, bottom.Y, medium)
+	c.Polyline([]draw.Point{edge, place(0), bottom}, draw.Style{Stroke: medium})
+	c.Line(zero, edge.Y, zero, bottom.Y, medium)
 	return zero, x + run, written
 }
 
-// strainsWritten writes the whole strain of each row within the picture of strains, on its line or, for the lowest,
-// under it: where no line is in the way. It tells whether it wrote any.
+// strainsWritten writes the strain of bending of each row within the picture of strains, on the side of its line towards the
+// compressed edge or, for the deepest, on the other: where no line is in the way. It tells whether it wrote any.
 func (u *equilibrium) strainsWritten(c draw.Canvas, zero draw.Pt, place func(depth float64) draw.Point) bool {
 	var taken []draw.Box
 	var lines placer
-	lowest := 0
+	deepest := 0
 	for i, r := range u.rows {
 		p := place(r.depth.value)
 		lines.line([]draw.Point{{X: zero, Y: p.Y}, p})
-		if r.depth.value > u.rows[lowest].depth.value {
-			lowest = i
+		if r.depth.value > u.rows[deepest].depth.value {
+			deepest = i
 		}
 	}
 	if len(u.rows) == 0 {
 		return false
 	}
-	lines.line([]draw.Point{place(0), place(u.rows[lowest].depth.value)})
-	lines.line([]draw.Point{{X: zero, Y: u.axisOf(place)}, {X: zero, Y: place(u.rows[lowest].depth.value).Y}})
+	lines.line([]draw.Point{place(0), place(u.rows[deepest].depth.value)})
+	lines.line([]draw.Point{{X: zero, Y: u.axisOf(place)}, {X: zero, Y: place(u.rows[deepest].depth.value).Y}})
 	lines.line([]draw.Point{{X: zero - 100, Y: u.axisOf(place)}, {X: zero + 100, Y: u.axisOf(place)}})
 	wrote := false
 	for i, r := range u.rows {
-		p, l := place(r.depth.value), label{}.value(r.strain)
-		for _, base := range []draw.Pt{p.Y - 1.5 - l.depth, p.Y + 2 + l.height} {
-			below := base > p.Y
-			if below && i != lowest || p.X <= zero {
+		p, l := place(r.depth.value), label{}.value(r.bending)
+		sides := []draw.Pt{p.Y - 1.5 - l.depth, p.Y + 2 + l.height}
+		if u.hogging {
+			slices.Reverse(sides)
+		}
+		for k, base := range sides {
+			if k > 0 && i != deepest || p.X <= zero {
 				continue
 			}
 			x := zero + 3
-			if below {
+			if k > 0 {
 				x = p.X - l.width
 			}
 			b := l.at(x, base)

@@ -3,6 +3,7 @@ package diagram
 import (
 	"cmp"
 	"fmt"
+	"math"
 	"slices"
 	"strings"
 
@@ -10,15 +11,23 @@ import (
 	"soffit/report/draw"
 )
 
-// tendonStress draws the stress in the tendons along the first part of the member from end A: the stress
-// present and that available at ultimate, a graph for each kind of row. Rows alike share one.
+// tendonStress draws the stress in the tendons: the stress present and that available at ultimate, a graph for each
+// kind of row. Rows alike share one. Where the stress is built up by bond at the ends and then keeps its value, the
+// first part of the member from end A is drawn; where it changes all along, as with friction in ducts, the whole length.
 //
-// Roles: x over the stations (from end A); present, available over stations and rows of tendons.
+// Roles: x over the stations (from end A); present, available over stations and rows of tendons; optional stressed-A,
+// stressed-B over the rows (other than 0 where a row is stressed from that end), marked by arrows.
 func tendonStress(d *data, width draw.Pt) *tape {
 	along := d.alongBy(d.stations("x"))
 	rows := d.axis("available", false)
 	if d.err != nil {
 		return nil
+	}
+	var pulled [2]column
+	for i, role := range []string{"stressed-A", "stressed-B"} {
+		if d.has(role) {
+			pulled[i] = d.beside(role, column{axis: rows, cells: make([]cell, len(rows.Rows))})
+		}
 	}
 	var kinds []endStress
 	for i, name := range rows.Rows {
@@ -28,7 +37,12 @@ func tendonStress(d *data, width draw.Pt) *tape {
 		if d.err != nil {
 			return nil
 		}
-		k := slices.IndexFunc(kinds, func(o endStress) bool { return same(o.present, e.present) && same(o.available, e.available) })
+		for k, c := range pulled {
+			e.pulled[k] = c.len() > 0 && c.cells[i].value != 0
+		}
+		k := slices.IndexFunc(kinds, func(o endStress) bool {
+			return same(o.present, e.present) && same(o.available, e.available) && o.pulled == e.pulled
+		})
 		if k >= 0 {
 			kinds[k].rows = append(kinds[k].rows, name)
 			continue
@@ -38,23 +52,33 @@ func tendonStress(d *data, width draw.Pt) *tape {
 	left := kinds[min(len(kinds), mostKinds):]
 	kinds = kinds[:min(len(kinds), mostKinds)]
 	reach := 0.0
+	whole := d.has("stressed-A") || d.has("stressed-B")
 	for _, e := range kinds {
 		reach = max(reach, e.full(along))
+		whole = whole || e.varies()
 	}
 	half := (along.start() + along.end()) / 2
 	near := along.within(min(along.start()+1.3*(reach-along.start()), half))
-	const least, gap draw.Pt = 145, 12
-	height := draw.Pt(74)
+	const gap draw.Pt = 12
+	least, widest, height := draw.Pt(145), draw.Pt(240), draw.Pt(74)
 	if len(kinds) > 4 {
 		height = 60
 	}
+	if whole {
+		near = along
+		least, widest = 230, 480
+	}
 	columns := max(min(int((width+gap)/(least+gap)), len(kinds)), 1)
-	w := min((width-gap*draw.Pt(columns-1))/draw.Pt(columns), 240)
+	w := min((width-gap*draw.Pt(columns-1))/draw.Pt(columns), widest)
 	t := &tape{}
 	y := draw.Pt(0)
 	for k, e := range kinds {
 		if k > 0 && k%columns == 0 {
 			y = t.ink.Y1 + 14
+		}
+		if whole {
+			e.drawWhole(t, near, draw.Pt(k%columns)*(w+gap), y, w, height)
+			continue
 		}
 		e.draw(t, near, draw.Pt(k%columns)*(w+gap), y, w, height)
 	}
@@ -80,6 +104,71 @@ const mostKinds = 9
 type endStress struct {
 	rows               []string
 	present, available column
+	pulled             [2]bool // stressed from end A, from end B
+}
+
+// varies tells whether the stress present changes by more than a hundredth where all the stress is available: along
+// bonded strands it is constant there.
+func (e endStress) varies() bool {
+	var full float64
+	for _, v := range e.available.cells {
+		full = max(full, v.value)
+	}
+	lo, hi := math.Inf(1), math.Inf(-1)
+	for i, v := range e.present.cells {
+		if v.taken() && e.available.cells[i].value >= 0.995*full {
+			lo, hi = min(lo, v.value), max(hi, v.value)
+		}
+	}
+	return hi-lo > 0.01*hi
+}
+
+// drawWhole draws the stress over the whole length, with the values present at the ends, the greatest and the least.
+func (e endStress) drawWhole(t *tape, along course, left, top, width, height draw.Pt) {
+	g := newGraph(along, width, nil)
+	g.x.a, g.x.b = g.x.a+left, g.x.b+left-14
+	g.values(top, height, false, e.present, e.available)
+	present, available := g.points(e.present), g.points(e.available)
+	g.fill(t, present, envelope)
+	g.zero(t)
+	g.curve(t, present, medium, dashed...)
+	g.curve(t, available, outline)
+	unit := label{}.say(draw.Serif, ", ").then(titled(e.available, ""))
+	title := pick(len(e.rows) > 1, "rows ", "row ") + strings.Join(e.rows, ", ")
+	g.scaleY(t, label{}.say(draw.Bold, shorten(draw.Bold, title, g.x.b-g.x.a+22-unit.width)).then(unit))
+	for k, x := range []draw.Pt{g.x.a, g.x.b} { // towards the jack
+		if e.pulled[k] {
+			run := pick[draw.Pt](k == 0, -1, 1)
+			y := present[pick(k == 0, 0, len(present)-1)].Y
+			arrow(t, x-run*9, y+6, x, y+6, medium, 4)
+			g.ways.taken = append(g.ways.taken, draw.BoxAt(min(x, x-run*9), y+4, 9, 4))
+		}
+	}
+	g.ends(t, e.available, e.present)
+	first, last := along.order[0], along.order[len(along.order)-1]
+	least := -1
+	for _, i := range along.order {
+		if v := e.present.cells[i]; v.taken() && (least < 0 || v.value < e.present.cells[least].value) {
+			least = i
+		}
+	}
+	most, at := g.greatest(e.present, 1)
+	written := map[string]bool{}
+	if v := e.present.cells[last]; v.taken() {
+		written[v.shown] = true
+	}
+	note := func(v, x cell, side direction) {
+		if v.taken() && !written[v.shown] {
+			written[v.shown] = true
+			g.mark(t, g.at(x.value, v.value), side, label{}.number(v).say(draw.Serif, " at ").value(x))
+		}
+	}
+	note(e.present.cells[first], along.x.cells[first], below)
+	note(most, at, below)
+	if least >= 0 {
+		note(e.present.cells[least], along.x.cells[least], below)
+	}
+	g.scaleX(t, g.y.at(0)+5)
 }
 
 // full is the first place from which on the stress available, and that present, stay near
