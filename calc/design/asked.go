@@ -12,6 +12,7 @@ import (
 // it, beside which axial force, and against which moment.
 type asked struct {
 	slug, title string
+	words       string // ", least axial force"
 	check       *clause.Check
 	text        string         // template that opens the block
 	view        *trace.Block   // section seen from the compressed edge
@@ -26,7 +27,8 @@ type asked struct {
 	hogging     *trace.Block // where it hogs; of one asked from below
 	fibred      bool         // with fibres of concrete in place of the block
 
-	block *trace.Block // where it was asked; nil where it was not
+	block   *trace.Block // where it was asked; nil where it was not
+	cracked *trace.Block // where its section cracks
 }
 
 // law is the stress-strain diagram of the concrete: as the member file says, or the block, or with a topping, whose strain

@@ -38,7 +38,8 @@ func (j *job) resist(c *trace.Chapter, q *asked, rows trace.Rows) {
 func (j *job) resistAt(b *trace.Block, q *asked) {
 	b.Step(pick(j.ducted(), ec2.PostTendonCounts, ec2.TendonCounts))
 	if j.hasBars() {
-		b.Step(ec2.BarCounts)
+		b.Step(pick(j.hasTopping() && !q.topped, ec2.BareBarCounts, ec2.BarCounts))
+		b.Step(ec2.TendonsInTension)
 	}
 	b.Step(pick(j.hasBars(), ec2.TensionSteelForceWithBars, ec2.TensionSteelForce))
 	there, none := b.Choose(ec2.TensionSteelThere)
@@ -69,7 +70,7 @@ func (j *job) resistAt(b *trace.Block, q *asked) {
 		})
 	})
 	b.On(bare, func() { b.Step(ec2.NoResistance) })
-	b.Check(q.check)
+	b.Check(named(q.check, q.words))
 	j.bendingFigures(b, q)
 }
 
@@ -77,7 +78,8 @@ func (j *job) resistAt(b *trace.Block, q *asked) {
 // which the trial does not stand, so that strains decide. The inclined branch has no limit to try, fibres and an axial force
 // have no block to try, and an edge that is no rectangle no width.
 func (j *job) trial(b *trace.Block, q *asked) trace.Rows {
-	if j.limited() || q.fibred || q.axial != nil || j.base(q.view.Path()+"/edge-depth", nil) == 0 {
+	ghosts := j.hasTopping() && !q.topped && j.hasBars() // bars of the topping, which are not there yet
+	if j.limited() || q.fibred || q.axial != nil || ghosts || j.base(q.view.Path()+"/edge-depth", nil) == 0 {
 		return b.Active()
 	}
 	b.Step(ec2.FlangeTrial)

@@ -53,7 +53,7 @@ func (j *job) ultimatePlots(b *trace.Block, q *asked, at string) []trace.Plot {
 	row := j.stations.Row(at)
 	one := func(role string, ids ...string) { // the first of these that was computed there
 		for _, id := range ids {
-			if l := trace.LineOf(j.n.Entry(b.Path() + "/" + id)); l != nil && (len(l.Axes) == 0 || l.Taken(row)) {
+			if l := trace.LineOf(j.n.Entry(b.Path() + "/" + id)); l != nil && takenAt(l, row) {
 				add(role, id)
 				return
 			}
@@ -105,10 +105,19 @@ func (j *job) ultimatePlots(b *trace.Block, q *asked, at string) []trace.Plot {
 
 // prestrainKey is the entry that gives ε_p0.
 func (j *job) prestrainKey(q *asked) string {
-	for _, id := range []string{"prestrain", "hogging-prestrain", "topped-prestrain", "bare-prestrain"} {
+	for _, id := range []string{"prestrain", "topped-prestrain", "bare-prestrain"} {
 		if key := q.prestrain[0].Path() + "/" + id; j.n.Entry(key) != nil {
 			return key
 		}
 	}
 	return ""
+}
+
+// takenAt says that an entry has a value at a station, or one for all.
+func takenAt(l *trace.Line, row int) bool {
+	if len(l.Axes) == 0 || l.Axes[0].Index != "" {
+		return true
+	}
+	stretch := len(l.Shown) / len(l.Axes[0].Rows)
+	return l.Taken(row * stretch)
 }

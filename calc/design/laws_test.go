@@ -350,7 +350,7 @@ func TestNarrative(t *testing.T) {
 		case want == "" && err != nil:
 			t.Errorf("%s: %v", text, err)
 		case want == "":
-			if e, ok := n.Entry("ultimate.prestress/narrative").(*trace.Text); !ok || e.Markdown != text {
+			if e, ok := n.Entry("ultimate.stress/narrative").(*trace.Text); !ok || e.Markdown != text {
 				t.Errorf("%s: recorded as %+v", text, e)
 			}
 		case err == nil || !strings.Contains(err.Error(), want):

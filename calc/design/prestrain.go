@@ -14,31 +14,31 @@ type prestressed struct {
 }
 
 // prestrain gives the prestress at each station, and the strain of the steel at zero strain of the concrete beside it; with a
-// topping also the strain that the member has when the topping is hard. Where the member hogs, below, the prestress on the
-// compressed side is the greatest.
+// topping also the strain that the member has when the topping is hard. Prestress near the compressed edge is the greatest.
 func (j *job) prestrain(c *trace.Chapter, below bool) prestressed {
-	takes := trace.Take(j.parameters, j.strengths, j.gross, j.tendons, j.tendonStrengths, j.along, j.actionData, j.effects)
-	slug, title := "prestress", "Prestress and prestrain along the member"
+	prefix, where := pick(below, "hogging-", ""), pick(below, " where the moment hogs", "")
+	view, places := pick(j.hasTopping(), j.toppedFromTop, j.fromTop), pick(j.hasTopping(), j.toppedPositions, j.positions)
 	if below {
-		b := c.Block("hogging-stress", "Stress of the tendons where the moment hogs", j.stations, trace.Take(j.fromBelow, j.positionsBelow, j.along)...)
-		b.Row = j.midSpan()
-		b.Step(ec2.HoggingStress)
-		takes = append(takes, trace.Take(b)...)
-		slug, title = "hogging-prestress", "Prestress and prestrain where the moment hogs"
+		view, places = pick(j.hasTopping(), j.toppedFromBelow, j.fromBelow), j.positionsBelow
 	}
-	b := c.Block(slug, title, j.stations, append(takes, trace.Take(j.positions)...)...)
+	counted := c.Block(prefix+"stress", "Stress of the tendons that is counted"+where, j.stations, trace.Take(view, places, j.along)...)
+	counted.Row = j.midSpan()
+	counted.Step(ec2.CountedStress)
+
+	b := c.Block(prefix+"prestress", "Prestress and prestrain along the member"+where, j.stations,
+		trace.Take(j.parameters, j.strengths, j.gross, j.tendons, j.tendonStrengths, j.actionData, j.effects, counted, j.positions)...)
 	b.Row = j.midSpan()
-	b.Steps(pick(below, ec2.HoggingForce, ec2.PrestressForce), pick(below, ec2.HoggingPrestressMoment, ec2.PrestressMoment))
+	b.Steps(ec2.PrestressForce, ec2.PrestressMoment)
 	if j.ducted() {
 		b.Steps(ec2.SelfWeightMoment, ec2.ConcreteStressWhenGrouted)
 	} else {
 		b.Step(ec2.ConcreteStressAtTendon)
 	}
 	if !j.hasTopping() {
-		b.Step(pick(below, ec2.HoggingPrestrain, ec2.Prestrain))
+		b.Step(ec2.Prestrain)
 		return prestressed{force: b, bare: []*trace.Block{b}}
 	}
-	b.Step(pick(below, ec2.HoggingMemberPrestrain, ec2.MemberPrestrain))
+	b.Step(ec2.MemberPrestrain)
 	return j.lockedIn(c, b, below)
 }
 

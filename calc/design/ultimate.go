@@ -25,11 +25,12 @@ func (j *job) ultimateChapter(c *trace.Chapter) {
 		j.resist(c, q, rows)
 		j.asked = append(j.asked, q)
 		if !q.bare {
-			j.cracked(c, q)
+			j.cracked(c, q, demand{block: j.ultimate, key: "actions.ultimate/moment"})
 		}
 	}
 	j.resistance = j.asked[0].block
 	j.constructionOnMember(c)
+	j.crackedWhileBuilt(c)
 	seen := map[bool]bool{}
 	for _, q := range j.asked {
 		if !q.bare && !seen[q.below] {
@@ -52,7 +53,7 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 		if n.block != nil {
 			with = ", " + n.words
 		}
-		add(asked{slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, text: pick(n.first, pick(j.fibred(), "fibres", "bending"), ""), check: ec2.BendingSufficient,
+		add(asked{words: with, slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, text: pick(n.first, pick(j.fibred(), "fibres", "bending"), ""), check: ec2.BendingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromTop, j.fromTop), places: pick(j.hasTopping(), j.toppedPositions, j.positions), prestrain: pick(j.hasTopping(), p.topped, p.bare), force: p.force,
 			demand: trace.Take(j.ultimate), axial: n.block, topped: j.hasTopping()})
 	}
@@ -68,7 +69,7 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 		if n.block != nil {
 			with = ", " + n.words
 		}
-		add(asked{slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, text: pick(n.first, "hogging", ""), check: ec2.HoggingSufficient,
+		add(asked{words: with, slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, text: pick(n.first, "hogging", ""), check: ec2.HoggingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromBelow, j.fromBelow), places: j.positionsBelow, prestrain: pick(j.hasTopping(), hogs.topped, hogs.bare), force: hogs.force,
 			demand: trace.Take(j.hogging), axial: n.block, below: true, topped: j.hasTopping(), hogging: j.hogging})
 	}
@@ -145,59 +146,6 @@ func (j *job) rowsWhere(key string) trace.Rows {
 	return out
 }
 
-// cracked goes through the stations that crack in bending at the ultimate limit state: there the tendons must carry the
-// tension that shear adds (8.10.2.3(1), 6.2.3(7)), and failure must announce itself when the load grows (5.10.1(5)P).
-func (j *job) cracked(c *trace.Chapter, q *asked) {
-	suffix := q.block.Slug[len(pick(q.below, "hogging-bending", "bending")):]
-	prefix := pick(q.below, "hogging-", "")
-	largest, key := ec2.LargestMoment, "actions.ultimate/moment"
-	from := j.ultimate
-	if q.below {
-		largest, key, from = ec2.LargestHoggingMoment, j.hogging.Path()+"/"+j.hoggingMomentID(), j.hogging
-	}
-	at := j.largest(key)
-	most := c.Block(prefix+"largest-moment"+suffix, pick(q.below, "Largest hogging moment at the stations, ", "Largest moment at the stations, ")+at, nil, trace.At(from, at))
-	most.Step(largest)
-
-	takes := trace.Take(j.parameters, j.strengths, j.section, j.gross, j.tendonStrengths, j.positions, j.ultimate, j.hogging, j.along, j.span, j.effects, q.force, j.transformed, q.block, most)
-	if q.topped {
-		takes = append(takes, trace.Take(j.topping, j.composite, j.toppingStrengths)...)
-	}
-	if q.axial != nil {
-		takes = append(takes, trace.Take(q.axial)...)
-	}
-	b := c.Block(prefix+"cracked"+suffix, pick(q.below, "Where the section cracks at the top at the ultimate limit state", "Where the section cracks at the ultimate limit state"), j.stations, takes...)
-	b.Row = q.block.Row
-	b.Text("cracked", templates.Text(pick(j.ducted(), "cracked-post-tensioned", "cracked")))
-	where := b.Active()
-	if q.below {
-		where = j.rowsOf(q.block.Path() + "/" + j.sums(q).resistance.ID)
-	}
-	b.On(where, func() {
-		b.Require(pick(q.below, ec2.NoLargerHoggingMoment, ec2.NoLargerMoment))
-		b.Step(j.edgeStress(q))
-		cracked, _ := b.Choose(pick(j.ducted(), ec2.CrackedOfPostTensioned, ec2.CrackedAtUltimate))
-		sheared := cracked
-		if j.ducted() { // anchored at its ends: the added tension is there also where nothing cracks
-			sheared, _ = b.Choose(ec2.BetweenBearings)
-		}
-		b.On(sheared.Or(cracked), func() {
-			resisting, _ := b.Choose(ec2.Resists)
-			b.On(resisting, func() {
-				b.On(sheared, func() { j.withShear(b, q) })
-				b.On(cracked, func() { j.withWarning(b, q) })
-			})
-		})
-	})
-	columns := []string{"actions.effects/position", j.edgeStress(q).ID}
-	for _, id := range []string{"added-moment", "moment-with-shear", "hogging-moment-with-shear", "bending-with-shear", "hogging-with-shear", j.crackingMoment(q).ID, "failure-with-warning"} {
-		if b.Has(id) {
-			columns = append(columns, id)
-		}
-	}
-	b.Table("along", "Stations along the member: cracks, tension added by shear, warning", j.stations, columns...)
-}
-
 // hoggingMomentID is the ID of the formula that gives M_Ed,h.
 func (j *job) hoggingMomentID() string {
 	return pick(j.construction != nil && !j.hasTopping(), ec2.HoggingMomentBuilt, ec2.HoggingMoment).ID
@@ -208,52 +156,9 @@ func (j *job) rowsOf(key string) trace.Rows {
 	out := make(trace.Rows, len(j.stations.Rows))
 	l := trace.LineOf(j.n.Entry(key))
 	for i := range out {
-		out[i] = l != nil && l.Taken(i)
+		out[i] = l != nil && takenAt(l, i)
 	}
 	return out
-}
-
-// edgeStress is the tension at the edge that the moment stretches.
-func (j *job) edgeStress(q *asked) *clause.Formula {
-	switch {
-	case q.topped && q.below:
-		return ec2.ToppedTopStress
-	case q.topped:
-		return pick(q.axial != nil, ec2.AxialToppedBottomStress, ec2.ToppedBottomStress)
-	case q.below:
-		return pick(q.axial != nil, ec2.AxialTopStress, ec2.TopStress)
-	}
-	return pick(q.axial != nil, ec2.AxialBottomStress, ec2.BottomStress)
-}
-
-// crackingMoment is the greatest moment at which that edge cracks.
-func (j *job) crackingMoment(q *asked) *clause.Formula {
-	switch {
-	case q.topped && q.below:
-		return ec2.ToppedHoggingCrackingMoment
-	case q.topped:
-		return pick(q.axial != nil, ec2.AxialToppedCrackingMoment, ec2.ToppedCrackingMoment)
-	case q.below:
-		return pick(q.axial != nil, ec2.AxialHoggingCracking, ec2.HoggingCracking)
-	}
-	return pick(q.axial != nil, ec2.AxialCrackingMoment, ec2.CrackingMoment)
-}
-
-// withShear adds the tension of the shear force.
-func (j *job) withShear(b *trace.Block, q *asked) {
-	b.Step(ec2.LargestShear)
-	b.Steps(ec2.LeverArm, ec2.AddedMoment, pick(q.below, ec2.HoggingMomentWithShear, ec2.MomentWithShear))
-	b.Check(pick(q.below, ec2.HoggingWithShear, ec2.BendingWithShear))
-}
-
-// withWarning asks for cracks before failure when the load grows.
-func (j *job) withWarning(b *trace.Block, q *asked) {
-	b.Text("warning", templates.Text(pick(j.ducted(), "warning-post-tensioned", "warning")))
-	if !q.below {
-		b.Steps(ec2.InitialForce, ec2.InitialMoment)
-	}
-	b.Step(j.crackingMoment(q))
-	b.Check(ec2.FailureWithWarning)
 }
 
 // constructionOnMember holds the moments during construction against the resistance of a member without topping.
@@ -261,17 +166,25 @@ func (j *job) constructionOnMember(c *trace.Chapter) {
 	if j.hasTopping() || j.construction == nil {
 		return
 	}
-	b := c.Block("construction", "Bending during construction", j.stations, trace.Take(j.construction, j.resistance)...)
+	b := c.Block("construction", "Bending during construction, sagging", j.stations, trace.Take(j.construction, j.resistance)...)
+	b.Text("construction", templates.Text("built"))
 	b.Check(ec2.ConstructionSufficient)
 }
 
 // minimumSteel checks minimum steel at every station where steel is bonded in the tension zone.
 func (j *job) minimumSteel(c *trace.Chapter, q *asked) {
 	view := pick(q.below, j.fromBelow, j.fromTop)
-	takes := trace.Take(j.parameters, j.concrete, j.strengths, j.section, j.gross, view, q.places, j.tendons, j.tendonStrengths, j.stress, j.along, j.effects, j.span, q.block)
+	concrete := trace.Take(j.concrete, j.strengths)
+	if q.topped && q.below {
+		t := c.Block("topping-stretched", "Concrete of the stretched topping", nil, trace.Take(j.topping, j.toppingStrengths)...)
+		t.Steps(ec2.StretchedStrength, ec2.StretchedMeanTension, ec2.StretchedLowerTension)
+		concrete = trace.Take(t)
+	}
+	takes := trace.Take(j.parameters, j.section, j.gross, view, q.places, j.tendons, j.tendonStrengths, j.stress, j.along, j.effects, j.span, j.ultimate, q.cracked, q.block)
 	if j.hasBars() {
 		takes = append(takes, trace.Take(j.barData, j.barStrengths)...)
 	}
+	takes = append(takes, concrete...)
 	if q.topped && q.below {
 		takes = append(takes, trace.Take(j.topping)...)
 	}
@@ -282,10 +195,14 @@ func (j *job) minimumSteel(c *trace.Chapter, q *asked) {
 	if overA, overB := j.overhangs(); q.below {
 		where = j.rowsOf(q.block.Path() + "/" + j.sums(q).resistance.ID)
 	} else if overA || overB || j.ducted() {
-		where, _ = b.Choose(ec2.BetweenBearings)
+		where, _ = b.Choose(ec2.MinimumAtBottom)
 	}
 	b.On(where, func() {
-		where, _ = b.Choose(pick(j.hasBars(), ec2.AnchoredInFullWithBars, ec2.AnchoredInFull))
+		var not trace.Rows
+		where, not = b.Choose(pick(j.hasBars(), ec2.AnchoredInFullWithBars, ec2.AnchoredInFull))
+		if !j.ducted() {
+			b.On(not, func() { b.Check(ec2.UncrackedEnd) })
+		}
 	})
 	b.On(where, func() {
 		strength, source := plain("500", "MPa"), "no bars: a usual strength to express the minimum in; it cancels but in 0.0013·b_t·d"
@@ -317,7 +234,7 @@ func (j *job) minimumSteel(c *trace.Chapter, q *asked) {
 		}
 		b.Check(pick(q.below, ec2.TopSteelProvided, ec2.MinimumSteelProvided))
 		if j.ducted() && j.hasBars() {
-			b.Step(ec2.BarsAlone)
+			b.Steps(ec2.BarsAlone, ec2.BarsDepth, ec2.BarsNeeded)
 			b.Decide(ec2.BarsReach)
 		}
 	})

@@ -28,6 +28,17 @@ func edgeStresses(id, name, bending, want string, given ...string) (*clause.Form
 	return define(id, "P_d", given), define("axial-"+id, "(P_d + N_Ed)", append(given[:len(given):len(given)], "N_Ed = 0 kN"))
 }
 
+// ToppedMemberStress is the tension at the top of the member below a stretched topping.
+var ToppedMemberStress = clause.Define(&clause.Formula{
+	ID: "topped-member-stress", Name: "Tension at the top of the member under the topping", Ref: en("8.10.2.3(1)", ""),
+	Text: "σ_t = (M_P − M_0)/W_t − P_d/A_c + (M_{Ed,h} + M_0)/W_{co,t}", Unit: "MPa",
+	Examples: hand("4 MPa", "M_P = 500 kN·m", "M_0 = -100 kN·m", "W_t = 100000 10³ mm³", "P_d = 1200 kN", "A_c = 300000 mm²", "M_{Ed,h} = 400 kN·m", "W_{co,t} = 150000 10³ mm³"),
+})
+
+// CrackedTopping asks the same of a stretched topping and the member under it.
+var CrackedTopping = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
+	Text: "σ_b > f_{ctk,0.05,t} or σ_t > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage"}
+
 // CrackedAtUltimate asks where the section cracks in bending at the ultimate limit state.
 var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("8.10.2.3(1)", ""),
 	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending: no further check of anchorage"}
@@ -35,6 +46,10 @@ var CrackedAtUltimate = &clause.Condition{ID: "cracked-at-ultimate", Name: "Crac
 // CrackedOfPostTensioned asks the same of a post-tensioned member, whose tendons need no bond to be anchored.
 var CrackedOfPostTensioned = &clause.Condition{ID: "cracked-at-ultimate", Name: "Cracks in bending at the ultimate limit state", Ref: en("5.10.1(5)P", ""),
 	Text: "σ_b > f_{ctk,0.05}", Yes: "cracked in bending", No: "not cracked in bending"}
+
+// BetweenBearings asks where a post-tensioned member carries the tension that shear adds to its sagging moment.
+var BetweenBearings = &clause.Condition{ID: "between-bearings", Name: "Place of the station", Ref: en("6.2.3(7)", ""), Text: "x_A ≤ x_m ≤ x_B",
+	Yes: "between the bearings", No: "beyond a bearing"}
 
 // Resists asks whether any resistance is counted at the station.
 var Resists = &clause.Condition{ID: "resists", Name: "Resistance at the station", Text: "M_Rd > 0·[kN·m]", Yes: "counted", No: "no resistance is counted here: bending fails already"}
@@ -44,6 +59,26 @@ var LargestShear = clause.Define(&clause.Formula{
 	ID: "largest-shear", Name: "Largest shear force at the station", Text: "V_max = max(abs(V_{Ed,l}); abs(V_{Ed,l,min}); abs(V_{Ed,r}); abs(V_{Ed,r,min}))", Unit: "kN", Digits: 6,
 	Examples: hand("9 kN", "V_{Ed,l} = 1 kN", "V_{Ed,l,min} = -9 kN", "V_{Ed,r} = 2 kN", "V_{Ed,r,min} = -8 kN"),
 })
+
+// LargestShearBuilt is the same in use and while the member is built.
+var LargestShearBuilt = clause.Define(&clause.Formula{
+	ID: "largest-shear-built", Name: "Largest shear force at the station, in use or while the member is built",
+	Text: "V_max = max(abs(V_{Ed,l}); abs(V_{Ed,l,min}); abs(V_{Ed,r}); abs(V_{Ed,r,min}); abs(V_{Ed,b,l}); abs(V_{Ed,b,l,min}); abs(V_{Ed,b,r}); abs(V_{Ed,b,r,min}))", Unit: "kN", Digits: 6,
+	Examples: hand("12 kN", "V_{Ed,l} = 1 kN", "V_{Ed,l,min} = -9 kN", "V_{Ed,r} = 2 kN", "V_{Ed,r,min} = -8 kN", "V_{Ed,b,l} = 1 kN", "V_{Ed,b,l,min} = -12 kN", "V_{Ed,b,r} = 2 kN", "V_{Ed,b,r,min} = -8 kN"),
+})
+
+// Moments and shear forces while the member is built, as what the section must carry.
+var (
+	BuiltMoment        = built("built-moment", "Moment while the member is built", "M_Ed", "M_{Ed,b}", "kN·m")
+	BuiltShearLeft     = built("built-shear-left", "Largest shear force left of the station while the member is built", "V_{Ed,l}", "V_{Ed,b,l}", "kN")
+	BuiltShearLeftMin  = built("built-shear-left-least", "Least shear force left of the station while the member is built", "V_{Ed,l,min}", "V_{Ed,b,l,min}", "kN")
+	BuiltShearRight    = built("built-shear-right", "Largest shear force right of the station while the member is built", "V_{Ed,r}", "V_{Ed,b,r}", "kN")
+	BuiltShearRightMin = built("built-shear-right-least", "Least shear force right of the station while the member is built", "V_{Ed,r,min}", "V_{Ed,b,r,min}", "kN")
+)
+
+func built(id, name, symbol, from, unit string) *clause.Formula {
+	return clause.Define(&clause.Formula{ID: id, Name: name, Text: symbol + " = " + from, Unit: unit, Digits: 6, Examples: hand("120 "+unit, from+" = 120 "+unit)})
+}
 
 // LeverArm is z of the tension chord.
 var LeverArm = clause.Define(&clause.Formula{

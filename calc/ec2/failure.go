@@ -17,6 +17,15 @@ var (
 		Examples: hand("1, 0", "d_{s,j} = 600 mm, 40 mm", "z_0 = 225 mm")})
 )
 
+// TendonsInTension is how many rows of tendons lie in the tension zone, bonded or not.
+var TendonsInTension = clause.Define(&clause.Formula{ID: "tendons-in-tension", Name: "Number of rows of tendons beyond the centroid", Text: "n_t = Σ_i(cases(d_{p,i} > z_0: 1; otherwise: 0))", Unit: "", Digits: 2,
+	Examples: hand("1", "d_{p,i} = 1090 mm, 90 mm", "z_0 = 600 mm")})
+
+// BareBarCounts leaves out bars of a topping that is not there yet, which have no area.
+var BareBarCounts = clause.Define(&clause.Formula{ID: "bare-bar-counts", Name: "1 for a row of the bare member beyond the centroid, 0 for the others",
+	Text: "t_{s,j} = cases(A_{s,j} > 0·[mm²] and d_{s,j} > z_0: 1; otherwise: 0)", Unit: "", Digits: 1,
+	Examples: hand("1, 0", "A_{s,j} = 402 mm², 0 mm²", "d_{s,j} = 600 mm, 1000 mm", "z_0 = 225 mm")})
+
 // TensionSteelForce is the design force of the steel that counts: without any there is no effective depth.
 var TensionSteelForceWithBars, TensionSteelForce = steelSums(
 	&clause.Formula{ID: "tension-steel-force-with-bars", Name: "Design force of the steel beyond the centroid that is bonded here", Ref: en(compatible, ""),

@@ -47,9 +47,12 @@ var TensionWidthWithVoids = clause.Define(&clause.Formula{
 	Examples: hand("200 mm", "A_{ct,n} = 60000 mm², 42000 mm²", "A_{vt,m} = 2000 mm²", "h = 1100 mm", "z_0 = 600 mm"),
 })
 
-// BetweenBearings asks where the minimum at the bottom is needed of a member that reaches past its bearings.
-var BetweenBearings = &clause.Condition{ID: "between-bearings", Name: "Place of the station", Ref: en("9.2.1.1(1)", ""), Text: "x_A ≤ x_m ≤ x_B",
-	Yes: "between the bearings", No: "on an overhang: no minimum at the bottom"}
+// MinimumAtBottom asks where the minimum at the bottom is needed of a member that reaches past its bearings.
+var MinimumAtBottom = &clause.Condition{ID: "minimum-at-bottom", Name: "Place of the station", Ref: en("9.2.1.1(1)", ""), Text: "x_A ≤ x_m ≤ x_B or M_Ed > 0·[kN·m]",
+	Yes: "between the bearings or sagging", No: "beyond a bearing and hogging: no minimum at the bottom"}
+
+// UncrackedEnd asks of the ends where no steel is anchored in full that they do not crack, as unreinforced concrete must not.
+var UncrackedEnd = &clause.Check{ID: "uncracked-end", Name: "No crack in bending where no steel is anchored in full", Ref: en("9.2.1.1(2), 8.10.2.3(1)", ""), Demand: "σ_b", Limit: "f_{ctk,0.05}"}
 
 // ToppingTensionWidth is b_t where the topping is stretched.
 var ToppingTensionWidth = clause.Define(&clause.Formula{
@@ -77,15 +80,15 @@ var MaximumSteelPositive = &clause.Condition{ID: "maximum-steel-positive", Name:
 // The steel counted towards the minimum: rows bonded at the station.
 var TensionSteelWithBars, TensionSteel = steelSums(
 	&clause.Formula{ID: "tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress, as far as it is anchored (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·min(1; (σ_{av,i} − σ_{pt,i})/max(f_{pd,i} − σ_{pt,i}; 1·[MPa]))·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
-		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1, 1", "A_{p,i} = 1112 mm², 500 mm²", "σ_{av,i} = 1426 MPa, 300 MPa", "f_{pd,i} = 1426 MPa, 1426 MPa", "f_{p0,1k,i} = 1640 MPa, 1640 MPa", "σ_{pt,i} = 1145 MPa, 300 MPa", "f_yk = 500 MPa")},
+		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}·min(1; σ_{sa,j}/f_{yd,j})) + Σ_i(t_{p,i}·A_{p,i}·min(1; (σ_{av,i} − σ_{pt,i})/max(f_{pd,i} − σ_{pt,i}; 1·[MPa]))·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "σ_{sa,j} = 435 MPa", "f_{yd,j} = 435 MPa", "t_{p,i} = 1, 1", "A_{p,i} = 1112 mm², 500 mm²", "σ_{av,i} = 1426 MPa, 300 MPa", "f_{pd,i} = 1426 MPa, 1426 MPa", "f_{p0,1k,i} = 1640 MPa, 1640 MPa", "σ_{pt,i} = 1145 MPa, 300 MPa", "f_yk = 500 MPa")},
 	&clause.Formula{ID: "tension-steel", Name: "Steel counted: tendons by their strength left above the prestress, as far as it is anchored (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
 		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·min(1; (σ_{av,i} − σ_{pt,i})/max(f_{pd,i} − σ_{pt,i}; 1·[MPa]))·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
 		Examples: hand("1100.9 mm²", "t_{p,i} = 1, 1", "A_{p,i} = 1112 mm², 500 mm²", "σ_{av,i} = 1426 MPa, 300 MPa", "f_{pd,i} = 1426 MPa, 1426 MPa", "f_{p0,1k,i} = 1640 MPa, 1640 MPa", "σ_{pt,i} = 1145 MPa, 300 MPa", "f_yk = 500 MPa")})
 
 // AnchoredInFull asks where the minimum applies: where a row that counts is anchored up to its design strength.
 var AnchoredInFullWithBars, AnchoredInFull = &clause.Condition{ID: "anchored-in-full", Name: "Steel anchored in full in the tension zone", Ref: en("9.2.1.1(1), (2)", ""),
-	Text: "Σ_i(cases(t_{p,i} = 1 and σ_{av,i} ≥ f_{pd,i}: 1; otherwise: 0)) > 0 or (Σ_i(cases(d_{p,i} > z_0: 1; otherwise: 0)) = 0 and Σ_j(cases(t_{s,j} = 1 and σ_{sa,j} ≥ f_{yd,j}: 1; otherwise: 0)) > 0)", Yes: anchoredYes, No: anchoredNo},
+	Text: "Σ_i(cases(t_{p,i} = 1 and σ_{av,i} ≥ f_{pd,i}: 1; otherwise: 0)) > 0 or (n_t = 0 and Σ_j(cases(t_{s,j} = 1 and σ_{sa,j} ≥ f_{yd,j}: 1; otherwise: 0)) > 0)", Yes: anchoredYes, No: anchoredNo},
 	&clause.Condition{ID: "anchored-in-full", Name: "Steel anchored in full in the tension zone", Ref: en("9.2.1.1(1), (2)", ""),
 		Text: "Σ_i(cases(t_{p,i} = 1 and σ_{av,i} ≥ f_{pd,i}: 1; otherwise: 0)) > 0", Yes: anchoredYes, No: anchoredNo}
 
@@ -96,17 +99,21 @@ const (
 
 // BarsAlone and BarsReach are method A of 5.10.1(6) for a post-tensioned member: bars that warn when tendons are lost.
 var (
-	BarsAlone = clause.Define(&clause.Formula{ID: "bars-alone", Name: "Bars alone in the tension zone", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} = Σ_j(t_{s,j}·A_{s,j})", Unit: "mm²",
-		Examples: hand("1570.8 mm²", "t_{s,j} = 1, 0", "A_{s,j} = 1570.8 mm², 804.2 mm²")})
-	BarsReach = &clause.Condition{ID: "bars-reach", Name: "Minimum steel by bars alone", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} ≥ A_{s,min}",
+	BarsAlone = clause.Define(&clause.Formula{ID: "bars-alone", Name: "Bars alone in the tension zone, as far as they are anchored", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} = Σ_j(t_{s,j}·A_{s,j}·min(1; σ_{sa,j}/f_{yd,j}))", Unit: "mm²",
+		Examples: hand("958.19 mm²", "t_{s,j} = 1, 0", "A_{s,j} = 1570.8 mm², 804.2 mm²", "σ_{sa,j} = 265.35 MPa, 435 MPa", "f_{yd,j} = 435 MPa, 435 MPa")})
+	BarsDepth = clause.Define(&clause.Formula{ID: "bars-depth", Name: "Depth of the outermost bars in the tension zone", Ref: en("5.10.1(6) A", ""), Text: "d_s = max_j(t_{s,j}·d_{s,j})", Unit: "mm", Digits: 6,
+		Examples: hand("1340 mm", "t_{s,j} = 1, 0", "d_{s,j} = 1340 mm, 60 mm")})
+	BarsNeeded = clause.Define(&clause.Formula{ID: "bars-needed", Name: "Minimum of bars alone, in the ratio of their depth to that of all steel", Ref: en("5.10.1(6) A, 9.2.1.1(1)", ""), Text: "A_{s,min,s} = A_{s,min}·max(1; d_s/d)", Unit: "mm²",
+		Examples: hand("1466 mm²", "A_{s,min} = 1175 mm²", "d_s = 1340 mm", "d = 1074 mm")})
+	BarsReach = &clause.Condition{ID: "bars-reach", Name: "Minimum steel by bars alone", Ref: en("5.10.1(6) A", ""), Text: "A_{s,bars} ≥ A_{s,min,s}",
 		Yes: "the bars alone reach the minimum: they warn when tendons are lost", No: "the bars alone do not reach the minimum"}
 )
 
 // The same of a post-tensioned member, whose stress changes along the tendon.
 var PostTensionSteelWithBars, PostTensionSteel = steelSums(
 	&clause.Formula{ID: "post-tension-steel-with-bars", Name: "Steel counted: bars, and tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
-		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}) + Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
-		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")},
+		Text: "A_{s,prov} = Σ_j(t_{s,j}·A_{s,j}·min(1; σ_{sa,j}/f_{yd,j})) + Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
+		Examples: hand("1900.9 mm²", "t_{s,j} = 1", "A_{s,j} = 800 mm²", "σ_{sa,j} = 435 MPa", "f_{yd,j} = 435 MPa", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")},
 	&clause.Formula{ID: "post-tension-steel", Name: "Steel counted: tendons by their strength left above the prestress (common practice, no source)", Ref: en("9.2.1.1(1)", ""),
 		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
 		Examples: hand("1100.9 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")})

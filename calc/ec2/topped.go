@@ -32,11 +32,8 @@ var (
 // MemberPrestrain, BarePrestrain and ToppedPrestrain are ε_p0 in the plane of the bare member and in that of the topping.
 var (
 	MemberPrestrain = clause.Define(&clause.Formula{ID: "member-prestrain", Name: "Strain of the steel at zero strain of the concrete beside it", Ref: en("6.1(2)P", ""),
-		Text: "ε_{pb,i} = γ_P·σ_{pt,i}/E_{p,i} + σ_{cp,i}/E_cm", Unit: "‰", Digits: 6,
-		Examples: hand("6.0870 ‰", "γ_P = 1.0", "σ_{pt,i} = 1145 MPa", "E_{p,i} = 195 GPa", "σ_{cp,i} = 7.96 MPa", "E_cm = 36.99 GPa")})
-	HoggingMemberPrestrain = clause.Define(&clause.Formula{ID: "hogging-member-prestrain", Name: "Strain of the steel at zero strain of the concrete beside it", Ref: en("6.1(2)P", ""),
-		Text: "ε_{pb,i} = γ_P·σ_{ph,i}/E_{p,i} + σ_{cp,i}/E_cm", Unit: "‰", Digits: 6,
-		Examples: hand("6.5126 ‰", "γ_P = 1.0", "σ_{ph,i} = 1228 MPa", "E_{p,i} = 195 GPa", "σ_{cp,i} = 7.96 MPa", "E_cm = 36.99 GPa")})
+		Text: "ε_{pb,i} = γ_P·σ_{pu,i}/E_{p,i} + σ_{cp,i}/E_cm", Unit: "‰", Digits: 6,
+		Examples: hand("6.0870 ‰", "γ_P = 1.0", "σ_{pu,i} = 1145 MPa", "E_{p,i} = 195 GPa", "σ_{cp,i} = 7.96 MPa", "E_cm = 36.99 GPa")})
 	BarePrestrain = clause.Define(&clause.Formula{ID: "bare-prestrain", Name: "Strain of the steel at zero strain of the concrete beside it, bare member", Ref: en("6.1(2)P", ""),
 		Text: "ε_{p0,i} = ε_{pb,i}", Unit: "‰", Digits: 6, Examples: hand("6.087 ‰", "ε_{pb,i} = 6.087 ‰")})
 	ToppedPrestrain = clause.Define(&clause.Formula{ID: "topped-prestrain", Name: "Strain of the steel at zero strain of the plane of the topping", Ref: en("6.1(2)P", ""),

@@ -31,6 +31,17 @@ var (
 	ToppingLawExponent, ToppingBilinearLawExponent = ofTopping(LawExponent), ofTopping(BilinearLawExponent)
 )
 
+// The concrete of a stretched topping, for the minimum of steel.
+var (
+	StretchedStrength     = stretched("stretched-strength", "Characteristic strength of the stretched concrete", "f_ck", "f_{ck,t}")
+	StretchedMeanTension  = stretched("stretched-mean-tension", "Mean tensile strength of the stretched concrete", "f_ctm", "f_{ctm,t}")
+	StretchedLowerTension = stretched("stretched-lower-tension", "Lower tensile strength of the stretched concrete", "f_{ctk,0.05}", "f_{ctk,0.05,t}")
+)
+
+func stretched(id, name, symbol, from string) *clause.Formula {
+	return clause.Define(&clause.Formula{ID: id, Name: name, Ref: en("3.1.3 Table 3.1", ""), Text: symbol + " = " + from, Unit: "MPa", Examples: hand("2.9 MPa", from+" = 2.9 MPa")})
+}
+
 // toppingSymbols are the symbols of the concrete that a topping has its own of. Its exponent of the parabola is n_{c,t}, for
 // n_t is the ratio of the moduli.
 var toppingSymbols = map[string]string{
