@@ -109,18 +109,27 @@ func (j *job) loadKey() string {
 
 // loadsText says how the loads are taken, as far as it concerns this member.
 func (j *job) loadsText() string {
-	out := []string{templates.Text("loads")}
+	out := []string{"loads"}
 	if a, b := j.overhangs(); a || b {
-		out = append(out, templates.Text("overhangs"))
+		out = append(out, "overhangs")
 	}
 	if j.hasAxial() {
-		out = append(out, templates.Text("axial"))
+		out = append(out, "axial")
 	}
 	switch {
 	case j.propped():
-		out = append(out, templates.Text("propped"))
+		out = append(out, "propped")
 	case j.hasTopping():
-		out = append(out, templates.Text("unpropped"))
+		out = append(out, "unpropped")
+	}
+	return texts(out...)
+}
+
+// texts are templates, one below another.
+func texts(names ...string) string {
+	out := make([]string, len(names))
+	for i, n := range names {
+		out[i] = templates.Text(n)
 	}
 	return strings.Join(out, "\n\n")
 }

@@ -14,7 +14,7 @@ type asked struct {
 	slug, title string
 	words       string // ", least axial force"
 	check       *clause.Check
-	text        string         // template that opens the block
+	texts       []string       // templates that open the block
 	view        *trace.Block   // section seen from the compressed edge
 	places      *trace.Block   // depths of the steel from it
 	prestrain   []*trace.Block // ε_p0, and with a topping the strains locked in

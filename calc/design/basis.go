@@ -162,7 +162,7 @@ func (j *job) assumptions() string {
 		add("The concrete that fills the joints between units is neither in the self-weight nor in the section: write its weight as an action. EN 1168 stands beside EN 1992-1-1 for such units.")
 	}
 	if len(j.m.Bars.Rows) > 0 {
-		add("Bars are straight and end %s from the ends of the concrete; each α of 8.4.4 is taken as 1.", endCover)
+		add("Bars are straight and end %s mm from the ends of the concrete; each α of 8.4.4 is taken as 1.", endCover)
 	}
 	for _, d := range j.defaults() {
 		add("%s", d)

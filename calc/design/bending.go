@@ -26,8 +26,8 @@ func (j *job) resist(c *trace.Chapter, q *asked, rows trace.Rows) {
 	}
 	b := c.Block(q.slug, q.title, j.stations, append(takes, q.demand...)...)
 	q.block = b
-	if q.text != "" {
-		b.Text("bending", templates.Text(q.text))
+	if len(q.texts) > 0 {
+		b.Text("bending", texts(q.texts...))
 	}
 	if rows == nil {
 		rows = b.Active()

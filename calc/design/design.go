@@ -28,7 +28,7 @@ type job struct {
 
 	rows, bars, parts, rounds, fibreAxis, loads, stations *trace.Axis
 
-	parameters, constants, concrete, section, span, tendons, barData, actionData     *trace.Block
+	parameters, concrete, section, span, tendons, barData, actionData                *trace.Block
 	strengths, tendonStrengths, barStrengths, bareBars, gross, positions, spanLength *trace.Block
 	characteristic                                                                   *trace.Block
 	reactions, effects, ultimate, stress, transmission, barAnchorage, along          *trace.Block

@@ -8,15 +8,13 @@ import (
 	"soffit/calc/section"
 )
 
-// form is the section as the record has it: straight-sided parts from the soffit up, round parts taken out of them, and
-// the measures of webs that the trial of bending uses. All are exact decimals of millimetres.
+// form is the section as the record has it: straight-sided parts from the soffit up, and round parts taken out of them. All
+// are exact decimals of millimetres.
 type form struct {
 	outline section.Outline
 	depth   quantity.Literal
 	parts   parts
 	rounds  []roundPart
-
-	haunch, web, bottom quantity.Literal // of a T and an I: haunch under the top flange; width of the web; depth to its lower end
 }
 
 // parts are trapezoids from the soffit up with the total width of the concrete, round voids not taken out.
@@ -56,12 +54,6 @@ func formOf(s *member.Shape) (form, error) {
 	f := form{outline: o, depth: s.Depth.Literal, parts: partsOf(o, zonesOf(s, o.Height())), rounds: roundsOf(o)}
 	if !s.Depth.Present() {
 		f.depth = mm(o.Height())
-	}
-	switch h := s.Depth.Base(); s.Kind.Text {
-	case "T":
-		f.haunch, f.web, f.bottom = mm(s.HaunchDepth.Base()), mm(s.WebWidth.Base()), mm(h-s.Chamfer.Base())
-	case "I":
-		f.haunch, f.web, f.bottom = mm(s.TopFlange.HaunchDepth.Base()), mm(s.WebWidth.Base()), mm(h-s.BottomFlange.Depth.Base()-s.BottomFlange.HaunchDepth.Base())
 	}
 	return f, nil
 }

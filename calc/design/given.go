@@ -7,8 +7,8 @@ import (
 	"soffit/calc/trace"
 )
 
-// endCover is how far bars end from the ends of the concrete.
-const endCover = "40 mm"
+// endCover is how far bars end from the ends of the concrete, mm.
+const endCover = "40"
 
 // givenChapter records the member as read.
 func (j *job) givenChapter(c *trace.Chapter) {

@@ -49,7 +49,7 @@ func (j *job) givenBars(c *trace.Chapter) {
 		column("ultimate-strain", "ε_{suk,j}", "Characteristic strain at maximum force by ductility class", "‰", "EN 1992-1-1 Table C.1 (recalled)", func(r member.BarRow) quantity.Literal { return plain(ductility[r.DuctilityClass.Text][1], "‰") })
 	}
 	b.Given(def("steel-modulus", "E_s", "Modulus of elasticity of the bars", "GPa", ref(ec2.Code, "3.2.7(4)")), plain("200", "GPa"), "code")
-	b.Given(def("end-cover", "c_e", "Distance of the ends of the bars from the ends of the concrete", "mm"), plain("40", "mm"), "assumption")
+	b.Given(def("end-cover", "c_e", "Distance of the ends of the bars from the ends of the concrete", "mm"), plain(endCover, "mm"), "assumption")
 	if j.hasTopping() {
 		depth := j.shape.Height()
 		column("in-topping", "k_{t,j}", "1 for bars in the topping, above the top of the member, else 0", "", "height against the depth of the member", func(r member.BarRow) quantity.Literal { return flag(r.Height.Base() > depth) })

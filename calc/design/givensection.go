@@ -21,9 +21,7 @@ func (j *job) givenSection(c *trace.Chapter) {
 	}
 	b.Given(def("depth", "h", "Overall depth", "mm"), f.depth, depth)
 	if s.Kind.Text == "T" || s.Kind.Text == "I" {
-		b.Given(def("haunch-depth", "h_h", "Depth of the haunch under the top flange", "mm"), f.haunch, lines(s.HaunchDepth.Origin, s.TopFlange.HaunchDepth.Origin))
-		b.Given(def("web-width", "b_w", "Width of the web", "mm"), f.web, lines(s.WebWidth.Origin))
-		b.Given(def("web-end", "z_w", "Depth from the top to the lower end of the web", "mm"), f.bottom, lines(s.Depth.Origin, s.Chamfer.Origin, s.BottomFlange.Depth.Origin, s.BottomFlange.HaunchDepth.Origin))
+		b.Given(def("web-width", "b_w", "Width of the web", "mm"), s.WebWidth.Literal, given(s.WebWidth))
 	}
 	j.givenParts(b)
 	j.givenOutline(b)

@@ -437,6 +437,33 @@ func TestMends(t *testing.T) {
 	}
 }
 
+// TestMendsOfPolygon: a polygon has no depth to raise, and no remedy claims to have raised it.
+func TestMendsOfPolygon(t *testing.T) {
+	m := read(t, "../../templates/drafts/polygon.yaml")
+	m.Actions[2].Loads[0].Uniform = value(t, "60 kN/m")
+	n, err := design.Run(m)
+	if err != nil {
+		t.Fatal(err)
+	}
+	tried := 0
+	n.Each(func(_ *trace.Chapter, b *trace.Block, e trace.Entry) {
+		if b.Slug != "mends" {
+			return
+		}
+		tried++
+		words := e.Common().Name
+		if text, ok := e.(*trace.Text); ok {
+			words = text.Markdown
+		}
+		if strings.Contains(words, "depth ") {
+			t.Error(words)
+		}
+	})
+	if tried < 2 {
+		t.Errorf("%d entries", tried)
+	}
+}
+
 func BenchmarkDesign(b *testing.B) {
 	for _, file := range samples(b) {
 		m := read(b, file)

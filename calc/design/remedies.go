@@ -66,10 +66,14 @@ func addedRow(m *member.Member, step int) string {
 	if len(m.Strands.Rows) == 0 {
 		return ""
 	}
+	shape, err := m.Shape.Outline()
+	if err != nil {
+		return ""
+	}
 	rows := m.Strands.Rows
 	low, top := *lowest(m), 0.0
 	for _, r := range rows {
-		if h := r.Height.Base(); h < m.Shape.Depth.Base()/2 {
+		if h := r.Height.Base(); h < shape.Height()/2 {
 			top = max(top, h)
 		}
 	}
@@ -78,8 +82,7 @@ func addedRow(m *member.Member, step int) string {
 		return slices.ContainsFunc(rows, func(r member.StrandRow) bool { return r.Name.Text == n })
 	}), 2*step
 	low.Height.Literal = number(top+50, "mm", places(top))
-	shape, err := m.Shape.Outline()
-	if err != nil || !spaced(&low) || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
+	if !spaced(&low) || float64(low.Count.N-1)*low.Spacing.Base() > shape.WidthAt(top+50)-100 {
 		return ""
 	}
 	m.Strands.Rows = append(rows, low)
@@ -125,7 +128,7 @@ func fewerStrands(m *member.Member, step int) string {
 			return ""
 		}
 	}
-	return strandsChanged(m, step, "less")
+	return strandsChanged(m, step, "fewer")
 }
 
 func strandsChanged(m *member.Member, step int, way string) string {
@@ -181,9 +184,17 @@ func strongerConcrete(m *member.Member, step int) string {
 	return fmt.Sprintf("f_ck %s instead of %s", m.Concrete.Fck, before)
 }
 
-// deeperSection raises the depth by 50 mm a step; what is stated of the tendons stays.
+// deeperSection raises the depth by 50 mm a step; what is stated of the tendons stays. A polygon has no depth of its own.
 func deeperSection(m *member.Member, step int) string {
-	before := m.Shape.Depth.String()
-	m.Shape.Depth.Literal = number(m.Shape.Depth.Base()+50*float64(step), "mm", places(m.Shape.Depth.Base()))
+	if !m.Shape.Depth.Present() {
+		return ""
+	}
+	before, top, more := m.Shape.Depth.String(), m.Shape.Depth.Base(), 50*float64(step)
+	for i := range m.Bars.Rows {
+		if r := &m.Bars.Rows[i]; r.Height.Base() > top { // in a topping, which rises too
+			r.Height.Literal = number(r.Height.Base()+more, "mm", places(r.Height.Base()))
+		}
+	}
+	m.Shape.Depth.Literal = number(top+more, "mm", places(top))
 	return fmt.Sprintf("depth %s instead of %s, tendons at the same heights, the stated losses kept", m.Shape.Depth, before)
 }

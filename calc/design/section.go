@@ -53,8 +53,7 @@ func (j *job) grossSection(c *trace.Chapter) {
 	b.Step(mechanics.NotionalSize)
 }
 
-// areaID, centroidID are the IDs of the formulas that give A_c and y_cg.
-func (j *job) areaID() string { return pick(j.hasVoids(), mechanics.AreaWithVoids, mechanics.Area).ID }
+// centroidID is the ID of the formula that gives y_cg.
 func (j *job) centroidID() string {
 	return pick(j.hasVoids(), mechanics.CentroidWithVoids, mechanics.Centroid).ID
 }

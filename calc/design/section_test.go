@@ -7,6 +7,7 @@ import (
 	"strings"
 	"testing"
 
+	"soffit/calc/mechanics"
 	"soffit/calc/member"
 	"soffit/calc/section"
 	"soffit/calc/trace"
@@ -314,3 +315,6 @@ func TestSplit(t *testing.T) {
 		}
 	}
 }
+
+// areaID is the ID of the formula that gives A_c.
+func (j *job) areaID() string { return pick(j.hasVoids(), mechanics.AreaWithVoids, mechanics.Area).ID }

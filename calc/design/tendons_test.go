@@ -388,3 +388,31 @@ func TestRandomProfiles(t *testing.T) {
 		t.Errorf("%d profiles within the concrete", closed)
 	}
 }
+
+// TestShearOnOverhangOfDucts: on an overhang of a post-tensioned member the tension that shear adds is checked at each station
+// that hogs, cracked or not.
+func TestShearOnOverhangOfDucts(t *testing.T) {
+	n := designed(t, girder(t, func(m *member.Member) {
+		bearingAt(t, "4 m", "150 mm")(m)
+		m.Ducts.Rows[0].Profile[0].Height = quantityOf(t, "700 mm")
+	}))
+	closes(t, n)
+	x := trace.LineOf(n.Entry("actions.effects/position"))
+	asked, ok := n.Entry("ultimate.hogging-cracked/hogging-with-shear").(*trace.Check)
+	if !ok {
+		t.Fatal("no check of hogging with the tension that shear adds")
+	}
+	resists := trace.LineOf(n.Entry("ultimate.hogging-bending/moment-resistance"))
+	beyond := 0
+	for i, v := range x.Values {
+		if v < 4000 && resists.Taken(i) && resists.Values[i] > 0 {
+			beyond++
+			if asked.Ratio[i] == "" {
+				t.Errorf("nothing asked at %g mm", v)
+			}
+		}
+	}
+	if beyond < 8 {
+		t.Errorf("%d stations on the overhang", beyond)
+	}
+}

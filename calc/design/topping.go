@@ -14,16 +14,16 @@ func (j *job) toppingMaterial(c *trace.Chapter) {
 	b := c.Block("topping", "Concrete of the topping", nil, trace.Take(j.parameters, j.topping)...)
 	j.toppingStrengths = b
 	b.Steps(ec2.ToppingMeanStrength, ec2.ToppingMeanTensileStrength, ec2.ToppingLowerTensileStrength, ec2.ToppingSecantModulus, ec2.ToppingDesignStrength)
-	b.Steps(ec2.ToppingBlockDepthFactor, ec2.ToppingBlockStressFactor, ec2.ToppingUltimateStrain3, ec2.ToppingBilinearStrain)
-	b.Steps(ec2.ToppingParabolaStrain, ec2.ToppingUltimateStrain2, ec2.ToppingParabolaExponent)
 	if j.law() == "bilinear" {
+		b.Steps(ec2.ToppingBilinearStrain, ec2.ToppingUltimateStrain3)
 		b.Steps(ec2.ToppingBilinearLawStrain, ec2.ToppingBilinearLawUltimate, ec2.ToppingBilinearLawExponent)
 		return
 	}
+	b.Steps(ec2.ToppingParabolaStrain, ec2.ToppingUltimateStrain2, ec2.ToppingParabolaExponent)
 	b.Steps(ec2.ToppingLawStrain, ec2.ToppingLawUltimate, ec2.ToppingLawExponent)
 }
 
-// composite gives the properties of member and topping together, as concrete of the member.
+// compositeSection gives the properties of member and topping together, as concrete of the member.
 func (j *job) compositeSection(c *trace.Chapter) {
 	if !j.hasTopping() {
 		return

@@ -53,12 +53,12 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 		if n.block != nil {
 			with = ", " + n.words
 		}
-		add(asked{words: with, slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, text: pick(n.first, pick(j.fibred(), "fibres", "bending"), ""), check: ec2.BendingSufficient,
+		add(asked{words: with, slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, texts: pick(n.first, j.lawTexts(), nil), check: ec2.BendingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromTop, j.fromTop), places: pick(j.hasTopping(), j.toppedPositions, j.positions), prestrain: pick(j.hasTopping(), p.topped, p.bare), force: p.force,
 			demand: trace.Take(j.ultimate), axial: n.block, topped: j.hasTopping()})
 	}
 	if j.hasTopping() && j.construction != nil {
-		add(asked{slug: "bare-bending", title: "Resistance of the bare member during construction, sagging", text: "bare", check: ec2.BareSufficient,
+		add(asked{slug: "bare-bending", title: "Resistance of the bare member during construction, sagging", texts: []string{"bare"}, check: ec2.BareSufficient,
 			view: j.fromTop, places: j.positions, prestrain: p.bare, force: p.force, demand: trace.Take(j.construction), bare: true})
 	}
 	if !j.hogs() {
@@ -69,7 +69,7 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 		if n.block != nil {
 			with = ", " + n.words
 		}
-		add(asked{words: with, slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, text: pick(n.first, "hogging", ""), check: ec2.HoggingSufficient,
+		add(asked{words: with, slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, texts: pick(n.first, []string{"hogging"}, nil), check: ec2.HoggingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromBelow, j.fromBelow), places: j.positionsBelow, prestrain: pick(j.hasTopping(), hogs.topped, hogs.bare), force: hogs.force,
 			demand: trace.Take(j.hogging), axial: n.block, below: true, topped: j.hasTopping(), hogging: j.hogging})
 	}
@@ -78,6 +78,17 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 			view: j.fromBelow, places: j.positionsBelow, prestrain: hogs.bare, force: hogs.force, demand: trace.Take(j.bareHogging), below: true, bare: true, hogging: j.bareHogging})
 	}
 	return out
+}
+
+// lawTexts are the templates that say how concrete and steel are taken.
+func (j *job) lawTexts() []string {
+	switch {
+	case j.hasTopping():
+		return []string{"fibres", "locked-in", "rows"}
+	case j.fibred():
+		return []string{"fibres", "rows"}
+	}
+	return []string{"bending", "rows"}
 }
 
 // axialBlocks give the axial forces beside which the section is asked: the least, which takes most from the resistance where
@@ -124,7 +135,7 @@ func (j *job) hoggingMoments(c *trace.Chapter) {
 	yes, _ := b.Choose(ec2.Hogging)
 	if !j.hogs() {
 		b.On(yes, func() {
-			b.Steps(ec2.OverhangStress, ec2.PlainTensileStrength)
+			b.Steps(ec2.HoggingTension, ec2.PlainTensileStrength)
 			b.Check(ec2.HoggingResisted)
 		})
 		return

@@ -14,7 +14,7 @@ func (j *job) verdictChapter(c *trace.Chapter) {
 	b := c.Block("checks", "The member in one picture", nil)
 	j.elevation(b)
 	if effect, check := j.n.Rounding(); check != nil {
-		b.Text("rounding", fmt.Sprintf("Rounding to the printed digits moves no ratio of demand to limit by more than %.4f (%s %s).", effect+0.00005, check.Number, check.Name))
+		b.Text("rounding", fmt.Sprintf("Rounding to the printed digits moves no ratio of demand to limit by more than %s (%s %s).", quantity.Format(effect+0.00005, 4), check.Number, check.Name))
 	}
 	b.Text("remarks", j.remarks())
 	if j.trying || j.n.Err() != nil {
@@ -66,9 +66,14 @@ func (j *job) remarks() string {
 		}
 		out = append(out, fmt.Sprintf("No station cracks in bending at the ultimate limit state ([%s](#%s)). %s.", choice.Number, choice.Key, words))
 	}
-	if c, ok := j.n.Entry("ultimate.minimum-steel/bars-reach").(*trace.Choice); ok && count(c, trace.No) > 0 {
-		out = append(out, fmt.Sprintf("The bars alone do not reach the minimum steel ([%s](#%s)), at %d stations: another method of 5.10.1(6) must show that the loss of tendons gives warning.", c.Number, c.Key, count(c, trace.No)))
-	} else if j.ducted() && !ok {
+	told := false
+	for _, place := range []struct{ block, words string }{{"minimum-steel", ""}, {"hogging-minimum-steel", " at the top"}} {
+		c, ok := j.n.Entry("ultimate." + place.block + "/bars-reach").(*trace.Choice)
+		if told = told || ok; ok && count(c, trace.No) > 0 {
+			out = append(out, fmt.Sprintf("The bars alone do not reach the minimum steel%s ([%s](#%s)), at %d stations: another method of 5.10.1(6) must show that the loss of tendons gives warning.", place.words, c.Number, c.Key, count(c, trace.No)))
+		}
+	}
+	if j.ducted() && !told {
 		out = append(out, "There are no bars: another method of 5.10.1(6) than A must show that the loss of tendons gives warning.")
 	}
 	return strings.Join(out, "\n\n")
@@ -146,9 +151,9 @@ func (j *job) mends(c *trace.Chapter, failing []*trace.Check) {
 	}
 	for _, k := range failing {
 		if !found[k.Key] {
-			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: %s, concrete up to 90 MPa, depth up to %d mm more.", k.Name, k.Number,
-				pick(j.ducted(), "up to 8 strands more in each duct as far as they fit, up to 8 strands less", "more tendons in the lowest row and in a further row as far as they fit, fewer tendons, two bars up to 25 mm"),
-				50*remedies[len(remedies)-1].steps))
+			b.Text("none-"+keyed(k.Key), fmt.Sprintf("%s (%s): nothing tried mends it alone. Tried: %s, concrete up to 90 MPa%s.", k.Name, k.Number,
+				pick(j.ducted(), "up to 8 strands more in each duct as far as they fit, up to 8 strands fewer", "more tendons in the lowest row and in a further row as far as they fit, fewer tendons, two bars up to 25 mm"),
+				pick(j.m.Shape.Depth.Present(), fmt.Sprintf(", depth up to %d mm more", 50*remedies[len(remedies)-1].steps), "")))
 		}
 	}
 }

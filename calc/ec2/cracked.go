@@ -9,11 +9,11 @@ import "soffit/calc/clause"
 // one; each also beside an axial force.
 var (
 	BottomStress, AxialBottomStress = edgeStresses("bottom-stress", "Tension at the bottom with the design moment, section uncracked", "(M_Ed − M_P)/W_b",
-		"8.4904 MPa", "M_Ed = 1279.77 kN·m", "M_P = 474.31 kN·m", "W_b = 68744.3 10³ mm³", "P_d = 840.79 kN", "A_c = 260600 mm²")
+		[2]string{"8.4904 MPa", "8.1067 MPa"}, "M_Ed = 1279.77 kN·m", "M_P = 474.31 kN·m", "W_b = 68744.3 10³ mm³", "P_d = 840.79 kN", "A_c = 260600 mm²")
 	TopStress, AxialTopStress = edgeStresses("top-stress", "Tension at the top with the hogging design moment, section uncracked", "(M_{Ed,h} + M_P)/W_t",
-		"4 MPa", "M_{Ed,h} = 400 kN·m", "M_P = 100 kN·m", "W_t = 100000 10³ mm³", "P_d = 200 kN", "A_c = 200000 mm²")
+		[2]string{"4.0 MPa", "3.5 MPa"}, "M_{Ed,h} = 400 kN·m", "M_P = 100 kN·m", "W_t = 100000 10³ mm³", "P_d = 200 kN", "A_c = 200000 mm²")
 	ToppedBottomStress, AxialToppedBottomStress = edgeStresses("topped-bottom-stress", "Tension at the bottom with the design moment, sections uncracked: bare member with its permanent loads at their upper factor, then composite", "(max(γ_{G,sup}·M_0; M_0) − M_P)/W_b + (M_Ed − max(γ_{G,sup}·M_0; M_0))/W_{co,b}",
-		"4 MPa", "M_0 = 300 kN·m", "γ_{G,sup} = 1.0", "M_P = 500 kN·m", "W_b = 100000 10³ mm³", "M_Ed = 1200 kN·m", "W_{co,b} = 150000 10³ mm³", "P_d = 0 kN", "A_c = 200000 mm²")
+		[2]string{"2.0 MPa", "1.5 MPa"}, "M_0 = 300 kN·m", "γ_{G,sup} = 1.5", "M_P = 500 kN·m", "W_b = 100000 10³ mm³", "M_Ed = 1200 kN·m", "W_{co,b} = 150000 10³ mm³", "P_d = 500 kN", "A_c = 200000 mm²")
 
 	ToppedTopStress = clause.Define(&clause.Formula{
 		ID: "topped-top-stress", Name: "Tension at the top of the topping with the hogging moment after it is hard, section uncracked", Ref: en("8.10.2.3(1)", ""),
@@ -21,11 +21,12 @@ var (
 		Examples: hand("3 MPa", "M_{Ed,h} = 400 kN·m", "M_0 = -100 kN·m", "W_{co,o} = 100000 10³ mm³")})
 )
 
-func edgeStresses(id, name, bending, want string, given ...string) (*clause.Formula, *clause.Formula) {
-	define := func(id, force string, given []string) *clause.Formula {
+// edgeStresses are a stress without axial force and beside one; want is what the example gives without, and with a compression of 100 kN.
+func edgeStresses(id, name, bending string, want [2]string, given ...string) (*clause.Formula, *clause.Formula) {
+	define := func(id, force, want string, given []string) *clause.Formula {
 		return clause.Define(&clause.Formula{ID: id, Name: name, Ref: en("8.10.2.3(1)", ""), Text: "σ_b = " + bending + " − " + force + "/A_c", Unit: "MPa", Examples: hand(want, given...)})
 	}
-	return define(id, "P_d", given), define("axial-"+id, "(P_d + N_Ed)", append(given[:len(given):len(given)], "N_Ed = 0 kN"))
+	return define(id, "P_d", want[0], given), define("axial-"+id, "(P_d + N_Ed)", want[1], append(given[:len(given):len(given)], "N_Ed = 100 kN"))
 }
 
 // ToppedMemberStress is the tension at the top of the member below a stretched topping.

@@ -1,6 +1,7 @@
 package ec2
 
 import (
+	"slices"
 	"strings"
 
 	"soffit/calc/clause"
@@ -23,20 +24,33 @@ const (
 
 // The ways of taking the concrete.
 var (
-	BlockCurvature        = curvatureOf("", "the compressed edge at its ultimate strain", "ε_cu3/x", "29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm")
+	BlockCurvature        = curvatureOf("", "the compressed edge at its ultimate strain", "ε_cu3/x", hand("29.429 1/km", "ε_cu3 = 3.5 ‰", "x = 118.93 mm")...)
 	FlangedBlockCurvature = curvatureOf("flanged-", "the compressed edge at its ultimate strain, a wholly compressed flange at its mean strain", "min(ε_cu3/x"+term("ε_c3", "ε_cu3/x")+")",
-		"12.5 1/km", "ε_cu3 = 3.5 ‰", "x = 200 mm", "ε_c3 = 1.75 ‰", "z_fl = 120 mm")
+		append(hand("12.5 1/km", "ε_cu3 = 3.5 ‰", "x = 200 mm", "ε_c3 = 1.75 ‰", "z_fl = 120 mm"), hand("35 1/km", "ε_cu3 = 3.5 ‰", "x = 100 mm", "ε_c3 = 1.75 ‰", "z_fl = 120 mm")...)...)
 	FibreCurvature = curvatureOf("fibre-", "the compressed edge at its ultimate strain, a wholly compressed section at that of its core", coreTerm,
-		"5 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 700 mm", "h_v = 700 mm")
+		append(hand("5 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 700 mm", "h_v = 700 mm"), hand("4 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 800 mm", "h_v = 700 mm")...)...)
 	FlangedFibreCurvature = curvatureOf("flanged-fibre-", "the compressed edge at its ultimate strain, a wholly compressed flange or section at its mean strain", "min("+coreTerm+term("ε_cy", "ε_cu/x")+")",
-		"14.2857 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 200 mm", "h_v = 700 mm", "z_fl = 120 mm")
+		append(hand("14.2857 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 200 mm", "h_v = 700 mm", "z_fl = 120 mm"), hand("35 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "x = 100 mm", "h_v = 700 mm", "z_fl = 120 mm")...)...)
 	ToppedCurvature = curvatureOf("topped-", "topping and member at their ultimate strains, a wholly compressed flange or section at its mean strain",
 		"min("+toppingStrains.Replace(coreTerm+guarded("ε_cy", "ε_cu/x"))+"; cases(x > h_top: (ε_cu − ε_le)/(x − h_top); otherwise: ε_{cu,t}/x))",
-		"11.6667 1/km", "ε_{cu,t} = 3.5 ‰", "ε_{cy,t} = 2 ‰", "ε_cu = 3.5 ‰", "ε_le = 1.1 ‰", "h_top = 100 mm", "x = 300 mm", "h_v = 700 mm", "z_fl = 0 mm")
+		governed("ε_{cu,t} = 3.5 ‰", "ε_{cy,t} = 2 ‰", "ε_cu = 3.5 ‰", "h_top = 100 mm", "x = 300 mm", "h_v = 700 mm")(
+			hand("11.6667 1/km", "ε_le = 1.1 ‰", "z_fl = 0 mm"), hand("7 1/km", "ε_le = 2.1 ‰", "z_fl = 0 mm"), hand("8 1/km", "ε_le = 1.1 ‰", "z_fl = 100 mm"))...)
 	ToppedBelowCurvature = curvatureOf("topped-below-", "the soffit of the member at its ultimate strain beside the strain locked in, the topping at its own, a wholly compressed flange or section at its mean strain",
 		"min("+besideLocked.Replace(coreTerm+guarded("ε_cy", "ε_cu/x"))+"; cases(x > h_v − h_top: ε_{cu,t}/(x − (h_v − h_top)); otherwise: (ε_cu − ε_le)/x))",
-		"10 1/km", "ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "ε_le = 0.5 ‰", "x = 300 mm", "h_v = 700 mm", "h_top = 100 mm", "ε_{cu,t} = 3.5 ‰", "z_fl = 0 mm")
+		governed("ε_cu = 3.5 ‰", "ε_cy = 2 ‰", "ε_le = 0.5 ‰", "x = 300 mm", "h_v = 700 mm", "h_top = 100 mm", "ε_{cu,t} = 3.5 ‰")(
+			hand("10 1/km", "z_fl = 0 mm"), hand("6 1/km", "z_fl = 100 mm"))...)
 )
+
+// governed completes examples, in each of which another limit governs, with the operands that they share.
+func governed(shared ...string) func(lists ...[]clause.Example) []clause.Example {
+	return func(lists ...[]clause.Example) []clause.Example {
+		all := slices.Concat(lists...)
+		for i := range all {
+			all[i].Given = append(all[i].Given, shared...)
+		}
+		return all
+	}
+}
 
 var (
 	toppingStrains = strings.NewReplacer("ε_cy", "ε_{cy,t}", "ε_cu", "ε_{cu,t}")
@@ -52,11 +66,11 @@ func term(strain, edge string) string {
 	return strings.NewReplacer("%", strain, "#", edge).Replace(flangeTerm)
 }
 
-func curvatureOf(id, words, text, want string, given ...string) Curvature {
+func curvatureOf(id, words, text string, examples ...clause.Example) Curvature {
 	ref := en("6.1(3)P to (6) Figure 6.1", "")
 	return Curvature{
-		Alone:    clause.Define(&clause.Formula{ID: id + "curvature", Name: "Curvature: " + words, Ref: ref, Text: "κ = " + text, Unit: "1/km", Digits: 8, Examples: hand(want, given...)}),
-		Concrete: clause.Define(&clause.Formula{ID: id + "concrete-curvature", Name: "Curvature that the concrete allows: " + words, Ref: ref, Text: "κ_c = " + text, Unit: "1/km", Digits: 8, Examples: hand(want, given...)}),
+		Alone:    clause.Define(&clause.Formula{ID: id + "curvature", Name: "Curvature: " + words, Ref: ref, Text: "κ = " + text, Unit: "1/km", Digits: 8, Examples: examples}),
+		Concrete: clause.Define(&clause.Formula{ID: id + "concrete-curvature", Name: "Curvature that the concrete allows: " + words, Ref: ref, Text: "κ_c = " + text, Unit: "1/km", Digits: 8, Examples: examples}),
 	}
 }
 
@@ -77,16 +91,17 @@ const (
 )
 
 func limitedCurvature(id, what, limits string) *clause.Formula {
-	given, want := []string{"κ_c = 29.429 1/km", "x = 118.93 mm"}, "29.429 1/km"
+	given, want := []string{"κ_c = 29.429 1/km", "x = 118.93 mm"}, ""
 	if strings.Contains(limits, "_i(") {
 		given, want = append(given, "d_{p,i} = 1140 mm", "ε_{pud,i} = 31.5 ‰", "ε_{p0,i} = 6.087 ‰", "σ_{av,i} = 1426.1 MPa", "f_{pd,i} = 1426.1 MPa"), "24.889 1/km"
 	}
 	if strings.Contains(limits, "_j(") {
-		given = append(given, "d_{s,j} = 1140 mm", "ε_{sud,j} = 45 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa")
+		given, want = append(given, "d_{s,j} = 1140 mm", "ε_{sud,j} = 22.5 ‰", "σ_{sa,j} = 465.9 MPa", "f_{yd,j} = 434.78 MPa"), "22.036 1/km"
 	}
 	if strings.Contains(limits, "ε_{s0,j}") {
-		given = append(given, "ε_{s0,j} = 0.1 ‰")
+		given, want = append(given, "ε_{s0,j} = 0.1 ‰"), "21.938 1/km"
 	}
+	examples := append(hand(want, given...), hand("20 1/km", append([]string{"κ_c = 20 1/km"}, given[1:]...)...)...)
 	return clause.Define(&clause.Formula{ID: id, Name: "Curvature: what the concrete allows, or " + what + " at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),
-		Text: "κ = min(κ_c" + limits + ")", Unit: "1/km", Digits: 8, Examples: hand(want, given...)})
+		Text: "κ = min(κ_c" + limits + ")", Unit: "1/km", Digits: 8, Examples: examples})
 }

@@ -4,8 +4,8 @@ import "soffit/calc/clause"
 
 // Hogging from external loads at and beyond the bearings.
 
-// OverhangStress is the tension at the top over a bearing from external loads.
-var OverhangStress = clause.Define(&clause.Formula{
+// HoggingTension is the tension at the top from external loads.
+var HoggingTension = clause.Define(&clause.Formula{
 	ID: "hogging-stress", Name: "Tension at the top from the hogging moment of the loads alone, section uncracked", Ref: en("12.3.1(2)", ""),
 	Text: "σ_ct = M_{Ed,h}/W_t", Unit: "MPa",
 	Examples: hand("0.002 MPa", "M_{Ed,h} = 0.16 kN·m", "W_t = 80000 10³ mm³"),

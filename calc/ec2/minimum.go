@@ -118,7 +118,7 @@ var PostTensionSteelWithBars, PostTensionSteel = steelSums(
 		Text: "A_{s,prov} = Σ_i(t_{p,i}·A_{p,i}·(f_{p0,1k,i} − σ_{pt,i})/f_yk)", Unit: "mm²",
 		Examples: hand("1100.9 mm²", "t_{p,i} = 1", "A_{p,i} = 1112 mm²", "f_{p0,1k,i} = 1640 MPa", "σ_{pt,i} = 1145 MPa", "f_yk = 500 MPa")})
 
-// MinimumSteelProvided is A_s,min ≤ A_s,prov; TopSteelProvided the same where the moment hogs.
+// TopSteelProvided is A_s,min ≤ A_s,prov where the moment hogs.
 var TopSteelProvided = &clause.Check{ID: "minimum-top-steel-provided", Name: "Minimum steel in tension, at the top", Ref: en("9.2.1.1(1)", "9.1N"),
 	Demand: "A_{s,min}", Limit: "A_{s,prov}"}
 

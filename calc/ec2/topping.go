@@ -18,8 +18,6 @@ var (
 	ToppingLowerTensileStrength = ofTopping(LowerTensileStrength)
 	ToppingSecantModulus        = ofTopping(SecantModulus)
 	ToppingDesignStrength       = ofTopping(DesignStrength)
-	ToppingBlockDepthFactor     = ofTopping(BlockDepthFactor)
-	ToppingBlockStressFactor    = ofTopping(BlockStressFactor)
 	ToppingUltimateStrain3      = ofTopping(UltimateStrain3)
 	ToppingBilinearStrain       = ofTopping(BilinearStrain)
 	ToppingParabolaStrain       = ofTopping(ParabolaStrain)
@@ -46,7 +44,7 @@ func stretched(id, name, symbol, from string) *clause.Formula {
 // n_t is the ratio of the moduli.
 var toppingSymbols = map[string]string{
 	"f_ck": "f_{ck,t}", "f_cm": "f_{cm,t}", "f_ctm": "f_{ctm,t}", "f_{ctk,0.05}": "f_{ctk,0.05,t}", "E_cm": "E_{cm,t}", "k_agg": "k_{agg,t}", "f_cd": "f_{cd,t}",
-	"λ": "λ_t", "η": "η_t", "ε_cu3": "ε_{cu3,t}", "ε_c3": "ε_{c3,t}", "ε_c2": "ε_{c2,t}", "ε_cu2": "ε_{cu2,t}", "n": "n_{c,t}",
+	"ε_cu3": "ε_{cu3,t}", "ε_c3": "ε_{c3,t}", "ε_c2": "ε_{c2,t}", "ε_cu2": "ε_{cu2,t}", "n": "n_{c,t}",
 	"ε_cy": "ε_{cy,t}", "ε_cu": "ε_{cu,t}", "n_σ": "n_{σ,t}",
 }
 

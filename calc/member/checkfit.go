@@ -1,6 +1,7 @@
 package member
 
 import (
+	"cmp"
 	"fmt"
 	"math"
 	"slices"
@@ -11,8 +12,6 @@ import (
 
 // fine is at how many places a way along the member is looked at.
 const fine = 200
-
-func sortFloats(x []float64) { slices.Sort(x) }
 
 // checkFit looks for strands, ducts and bars that lie outside the concrete or in one another.
 func (r *reader) checkFit(m *Member, o section.Outline, ok bool) {
@@ -208,16 +207,9 @@ func widths(o section.Outline, y float64) []chord {
 func spread(chords []chord, x float64) string {
 	far := func(c chord) float64 { return max(c.From-x, x-c.To, 0) }
 	list := slices.Clone(chords)
-	slices.SortStableFunc(list, func(a, b chord) int {
-		if far(a) < far(b) {
-			return -1
-		} else if far(a) > far(b) {
-			return 1
-		}
-		return 0
-	})
+	slices.SortStableFunc(list, func(a, b chord) int { return cmp.Compare(far(a), far(b)) })
 	list = list[:min(len(list), 4)]
-	slices.SortFunc(list, func(a, b chord) int { return int(math.Copysign(1, a.From-b.From)) })
+	slices.SortFunc(list, func(a, b chord) int { return cmp.Compare(a.From, b.From) })
 	var parts []string
 	for _, c := range list {
 		parts = append(parts, "from "+tenth(c.From)+" to "+tenth(c.To))

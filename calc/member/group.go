@@ -4,23 +4,23 @@ import "fmt"
 
 // common is one thing that a group may state for its rows.
 type common struct {
-	key        string
-	written    bool // in the row
-	stated     bool // in the group
-	wanted     bool // has to stand in one of them
-	row, group Origin
-	copy       func()
+	key     string
+	written bool // in the row
+	stated  bool // in the group
+	wanted  bool // has to stand in one of them
+	row     Origin
+	copy    func()
 }
 
 // sharing lists what a row may have from its group.
 func (s *StrandRow) sharing(g *Group) []common {
 	value := func(key string, row, group *Value, wanted bool) common {
-		return common{key, *row != (Value{}), *group != (Value{}), wanted, row.Origin, group.Origin, func() { *row = *group }}
+		return common{key, *row != (Value{}), *group != (Value{}), wanted, row.Origin, func() { *row = *group }}
 	}
-	product := common{"product", s.Product != (Word{}), g.Product != (Word{}), true, s.Product.Origin, g.Product.Origin, func() { s.Product = g.Product }}
-	losses := common{"stated losses", s.StatedLosses.Present(), g.StatedLosses.Present(), true, Origin{Pos: s.StatedLosses.Pos}, Origin{Pos: g.StatedLosses.Pos},
+	product := common{"product", s.Product != (Word{}), g.Product != (Word{}), true, s.Product.Origin, func() { s.Product = g.Product }}
+	losses := common{"stated losses", s.StatedLosses.Present(), g.StatedLosses.Present(), true, Origin{Pos: s.StatedLosses.Pos},
 		func() { s.StatedLosses = g.StatedLosses }}
-	deflected := common{"deflected", s.Deflected.Present(), g.Deflected.Present(), false, Origin{Pos: s.Deflected.Pos}, Origin{Pos: g.Deflected.Pos},
+	deflected := common{"deflected", s.Deflected.Present(), g.Deflected.Present(), false, Origin{Pos: s.Deflected.Pos},
 		func() { s.Deflected = g.Deflected }}
 	return []common{
 		product,

@@ -2,6 +2,7 @@ package member
 
 import (
 	"math"
+	"slices"
 
 	"soffit/calc/quantity"
 	"soffit/calc/tendon"
@@ -121,7 +122,7 @@ func nearest(p, q tendon.Profile) (dy, at float64) {
 			places = append(places, looked(p, fine)...)
 		}
 	}
-	sortFloats(places)
+	slices.Sort(places)
 	var before float64
 	for i, x := range places {
 		d := p.Height(x) - q.Height(x)
