@@ -1,7 +1,7 @@
 // Package statics finds the reactions, moments and shears of a beam on two bearings, overhanging ends
-// included. Lengths are in mm from end A of the concrete, forces in N and positive downward as loads,
-// upward as reactions; sagging moments, N·mm, are positive, and so is a shear, N, that pushes the part
-// left of the section up.
+// included, and from the curvature along it its deflections. Lengths are in mm from end A of the concrete,
+// forces in N and positive downward as loads, upward as reactions; sagging moments, N·mm, are positive, and
+// so is a shear, N, that pushes the part left of the section up.
 package statics
 
 import (

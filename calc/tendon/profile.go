@@ -45,6 +45,9 @@ func (s Segment) HeightAt(u float64) float64 { return s.Height + (s.Slope+s.Half
 // SlopeAt is the slope at u from the start.
 func (s Segment) SlopeAt(u float64) float64 { return s.Slope + 2*s.Half*u }
 
+// Turn is the change of direction over the first u of the segment, taken as change of slope: see Profile.Angle.
+func (s Segment) Turn(u float64) float64 { return math.Abs(2 * s.Half * u) }
+
 // Vertex is where the segment is level within itself, ends left out; ok is false where it is level nowhere there.
 func (s Segment) Vertex() (u float64, ok bool) {
 	if s.Half == 0 {
