@@ -369,6 +369,37 @@ func TestConstruction(t *testing.T) {
 	}
 }
 
+// TestConstructionOnProps: construction loads on a member on props enter no check, which the verdict says of them alone.
+func TestConstructionOnProps(t *testing.T) {
+	for _, c := range []struct {
+		casting, on string
+		sizes       []string
+		told        bool
+	}{
+		{"propped", "", []string{"1.5 kN/m", "0.5 kN/m"}, true},
+		{"propped", "composite member", []string{"1.5 kN/m"}, false},
+		{"propped", "", nil, false},
+		{"unpropped", "", []string{"1.5 kN/m"}, false},
+		{"", "", []string{"1.5 kN/m"}, false},
+	} {
+		n := edited(t, beam{}, func(m *member.Member) {
+			topped(t, c.casting, c.sizes...)(m)
+			for i := range m.Actions {
+				if a := &m.Actions[i]; a.Kind.Text == "construction" {
+					a.ActsOn.Text = c.on
+				}
+			}
+		})
+		told := ""
+		if text, ok := n.Entry("verdict.checks/remarks").(*trace.Text); ok {
+			told = text.Markdown
+		}
+		if strings.Contains(told, "enter no check") != c.told || c.told && !strings.Contains(told, "(working platform 1.5 kN/m, working platform 0.5 kN/m)") {
+			t.Errorf("%s, %v %s: %q", c.casting, c.sizes, c.on, told)
+		}
+	}
+}
+
 // TestActsOn: what the member file says of the section that carries an action goes before what is usual: a screed on the bare
 // member is locked in and counts while it is built; a construction load on the member with its topping does not, and leads in
 // use.

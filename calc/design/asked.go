@@ -86,6 +86,7 @@ func (j *job) limited() bool { return j.inclined() || (j.hasBars() && j.barIncli
 func (j *job) curvatures(q *asked) []*clause.Formula {
 	c := j.curvature(q)
 	locked := q.topped && j.hasBars() && j.barInclined()
+	bare := j.hasTopping() && !q.topped && j.hasBars() && j.barInclined() // bars of the topping are not there yet
 	switch {
 	case !j.limited():
 		return []*clause.Formula{c.Alone}
@@ -93,6 +94,10 @@ func (j *job) curvatures(q *asked) []*clause.Formula {
 		return []*clause.Formula{c.Concrete, ec2.LockedCurvatureWithBothLimits}
 	case locked:
 		return []*clause.Formula{c.Concrete, ec2.LockedCurvatureWithBarLimit}
+	case j.inclined() && bare:
+		return []*clause.Formula{c.Concrete, ec2.BareCurvatureWithBothLimits}
+	case bare:
+		return []*clause.Formula{c.Concrete, ec2.BareCurvatureWithBarLimit}
 	case j.inclined() && j.hasBars() && j.barInclined():
 		return []*clause.Formula{c.Concrete, ec2.CurvatureWithBothLimits}
 	case j.inclined():

@@ -2,7 +2,6 @@ package design
 
 import (
 	"errors"
-	"fmt"
 	"math"
 
 	"soffit/calc/bending"
@@ -30,7 +29,7 @@ func (j *job) neutralAxis(q *asked) func(*trace.Row) (trace.Proposal, error) {
 		if err == nil && axis.X <= 0 {
 			err = errors.New("with the strain locked in, the steel reaches its strain limit before the plane of strain has a neutral axis in the section: write more steel, or the horizontal branch")
 		}
-		return trace.Proposal{X: axis.X, Lo: axis.Lo, Hi: axis.Hi}, inWords(err)
+		return trace.Proposal{X: axis.X, Lo: axis.Lo, Hi: axis.Hi}, j.inWords(err, r, q)
 	}
 }
 
@@ -60,15 +59,6 @@ func (j *job) flangeStrain(r *trace.Row, q *asked) float64 {
 		return r.Value("ε_cy")
 	}
 	return r.Value("ε_c3")
-}
-
-// inWords says of a section without a neutral axis what an engineer can do about it.
-func inWords(err error) error {
-	var r *bending.Refusal
-	if errors.As(err, &r) && r.Reason == bending.WhollyCompressed {
-		return fmt.Errorf("the steel and the axial force press with %.0f kN where the whole section in compression gives %.0f kN at most: take out tendons, or enlarge the section", r.Have/1e3, r.Limit/1e3)
-	}
-	return err
 }
 
 // block is the rectangular block at a station.

@@ -201,6 +201,51 @@ func TestAxialForceByHand(t *testing.T) {
 	}
 }
 
+// TestAxialForceWhileBuilt: what presses or pulls while the member is built counts beside that in use; of a member with topping
+// it acts on the bare member alone. By hand as above: 300 kN permanent, which may not be there yet, and a construction load.
+func TestAxialForceWhileBuilt(t *testing.T) {
+	const b, fcd = 300.0, 40 / 1.5
+	force := 6 * 93 * fpd125
+	lift := func(size string) string {
+		return axially("300 kN") + "\n  - {name: lifting, kind: construction, loads: [{axial: " + size + "}]}"
+	}
+	holds := func(n *trace.Note, name, block string, h, axial float64) {
+		t.Helper()
+		d := h - 50
+		a := (force + axial) / (b * fcd)
+		_, got := resisted(t, n, block, "mid-span")
+		near(t, name+", "+block, got, (force*(d-a/2)+axial*(h/2-a/2))/kNm, 1e-9)
+	}
+	check := func(n *trace.Note, key string) {
+		t.Helper()
+		if k, ok := n.Entry("ultimate." + key).(*trace.Check); !ok || k.Failed() {
+			t.Errorf("%s: %v", key, k)
+		}
+	}
+	for size, want := range map[string][2]float64{"-100 kN": {-150e3, 405e3}, "200 kN": {0, 705e3}} {
+		n := agreeing(t, beam{actions: lift(size)})
+		holds(n, size, "bending-least", 600, want[0])
+		holds(n, size, "bending-greatest", 600, want[1])
+		for _, key := range []string{"construction-least/construction-sufficient", "construction-greatest/construction-sufficient"} {
+			check(n, key)
+		}
+	}
+	wet := toppedBeam(40, "unpropped", "")
+	wet.actions = lift("-100 kN")
+	n := agreeing(t, wet)
+	holds(n, "wet topping", "bare-bending-least", 500, -150e3)
+	holds(n, "wet topping", "bare-bending-greatest", 500, 0)
+	check(n, "bare-bending-least/bare-sufficient")
+	check(n, "bare-bending-greatest/bare-sufficient")
+	near(t, "in use", at(t, n, "ultimate.axial-least/least-axial")/kN, 300, 1e-12)
+	wet.actions = axially("300 kN") // on the member with its topping alone
+	n = agreeing(t, wet)
+	holds(n, "none on the bare member", "bare-bending", 500, 0)
+	if n.Entry("actions.construction/construction-axial") != nil {
+		t.Error("an axial force on the bare member, where there is none")
+	}
+}
+
 // TestNoAxialForce: an axial force of 0 kN changes nothing.
 func TestNoAxialForce(t *testing.T) {
 	for _, law := range []string{"block", "parabola-rectangle"} {
@@ -401,6 +446,22 @@ func TestLawsOfConcrete(t *testing.T) {
 // toppedBeam is a rectangle 300 × 500 with a topping as wide as it, 100 mm deep.
 func toppedBeam(fck int, casting, bars string) beam {
 	return beam{shape: "{kind: rectangle, width: 300 mm, depth: 500 mm}", topping: fmt.Sprintf("{width: 300 mm, depth: 100 mm, f_ck: %d MPa, unit weight: 25 kN/m³, casting: %s}", fck, casting), bars: bars}
+}
+
+// TestBarsToComeLimitNothing: bars of a topping that is not there yet do not limit the curvature of the bare member, whatever
+// branch their steel has.
+func TestBarsToComeLimitNothing(t *testing.T) {
+	var got [2]float64
+	for i, diagram := range []string{"horizontal", "inclined"} {
+		b := toppedBeam(30, "unpropped", barRow(diagram, 20, 550))
+		b.strands, b.fromEnd = strandRows("horizontal", row("low", 2, 50)), [2]string{"2.5 m", ""}
+		n := agreeing(t, b)
+		_, got[i] = resisted(t, n, "bare-hogging-bending", "overhang A 0.7")
+		if axis := trace.LineOf(n.Entry("ultimate.bare-hogging-bending/axis-root")); i == 1 && (axis == nil || axis.Values[rowOf(axis, "overhang A 0.7")] > 40) {
+			t.Errorf("with the neutral axis so deep no bar could limit the curvature: %+v", axis)
+		}
+	}
+	near(t, "M_Rd", got[1], got[0], 1e-6)
 }
 
 // TestToppingOfTheSameConcrete: propped, so that nothing but the prestress is locked into the member, a topping of its concrete

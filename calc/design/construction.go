@@ -33,7 +33,7 @@ func (j *job) constructionCombinations(c *trace.Chapter) {
 	b.Step(ec2.ConstructionLowerFactor)
 	b.Steps(ec2.ConstructionMoment, ec2.ConstructionMomentMin, ec2.ConstructionShearLeft, ec2.ConstructionShearRight, ec2.ConstructionShearLeftMin, ec2.ConstructionShearRightMin)
 	b.Steps(ec2.ConstructionMomentEnvelope, ec2.ConstructionMomentEnvelopeMin, ec2.ConstructionShearLeftEnvelope, ec2.ConstructionShearRightEnvelope, ec2.ConstructionShearLeftEnvelopeMin, ec2.ConstructionShearRightEnvelopeMin)
-	if j.hasAxial() {
+	if j.axialWhileBuilt() {
 		b.Steps(ec2.ConstructionAxial, ec2.ConstructionAxialMin, ec2.ConstructionAxialEnvelope, ec2.ConstructionAxialEnvelopeMin)
 	}
 	b.Row = j.midSpan()

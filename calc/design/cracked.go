@@ -27,7 +27,7 @@ func (j *job) crackedWhileBuilt(c *trace.Chapter) {
 	b.Steps(ec2.BuiltMoment, ec2.BuiltShearLeft, ec2.BuiltShearLeftMin, ec2.BuiltShearRight, ec2.BuiltShearRightMin)
 	d := demand{block: b, key: b.Path() + "/" + ec2.BuiltMoment.ID, suffix: "-while-built", words: ", while the member is built"}
 	for _, q := range j.asked {
-		if q.bare || !j.hasTopping() && !q.below && q.block == j.resistance {
+		if q.bare || !j.hasTopping() && !q.below {
 			j.cracked(c, q, d)
 		}
 	}

@@ -40,8 +40,8 @@ type job struct {
 	construction                                                 *trace.Block // combination during construction; nil for none
 	hogging, bareHogging                                         *trace.Block // hogging moments; bare only with a topping that the member carries
 
-	axialForces []axialForce // one without a block where there is none
-	asked       []*asked     // the ways in which the section was asked for its resistance
+	axialForces, bareAxialForces []axialForce // one without a block where there is none
+	asked                        []*asked     // the ways in which the section was asked for its resistance
 
 	form  form          // the shape as the record has it
 	shape section.Shape // the same for the kernels

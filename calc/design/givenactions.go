@@ -136,6 +136,12 @@ func (j *job) hasAxial() bool {
 	return j.anyLoad(func(_ *member.Action, l *member.Load) bool { return l.Axial.Present() })
 }
 
+// axialWhileBuilt says that an axial force counts while the member is built. Without a topping one in use does too: that it may
+// not be there yet.
+func (j *job) axialWhileBuilt() bool {
+	return j.hasAxial() && (!j.hasTopping() || j.anyLoad(func(a *member.Action, l *member.Load) bool { return l.Axial.Present() && j.onBare(a) }))
+}
+
 // anyLoad says that one of the loads in the member file is of a kind.
 func (j *job) anyLoad(is func(*member.Action, *member.Load) bool) bool {
 	for k := range j.m.Actions {

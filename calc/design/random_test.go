@@ -119,6 +119,9 @@ func anyBeam(r wild) beam {
 	if r.oneIn(5) {
 		more("building", "construction", "uniform: 1.5 kN/m")
 	}
+	if r.oneIn(6) {
+		more("bracing", "construction", fmt.Sprintf("axial: %d kN", r.between(-100, 200, 50)))
+	}
 	return b
 }
 
@@ -180,7 +183,7 @@ func settled(text string) (*member.Member, string, error) {
 }
 
 // refusals are the words in which a design may end without a note.
-var refusals = []string{"take out tendons", "write more steel, or the horizontal branch", "leaves nothing below", "outweighs the steel"}
+var refusals = []string{"take out tendons", "write more steel, or the horizontal branch", "where its strain limit is", "cast the topping on props"}
 
 // trials is how many random members are run.
 var trials = 80

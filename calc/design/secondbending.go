@@ -57,7 +57,7 @@ func (j *job) integrated(q *asked) func(*trace.Row) ([]float64, error) {
 			}
 			axis, err = beam.FibresUnder(c, parabola(r), layers)
 		}
-		return []float64{axis.X, axis.Moment}, err
+		return []float64{axis.X, axis.Moment}, j.inWords(err, r, q)
 	}
 }
 

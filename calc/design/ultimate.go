@@ -1,6 +1,8 @@
 package design
 
 import (
+	"strings"
+
 	"soffit/calc/clause"
 	"soffit/calc/ec2"
 	"soffit/calc/trace"
@@ -49,33 +51,31 @@ func (j *job) questions(p, hogs prestressed) []*asked {
 		out = append(out, &q)
 	}
 	for _, n := range j.axialForces {
-		with := ""
-		if n.block != nil {
-			with = ", " + n.words
-		}
+		with := n.with()
 		add(asked{words: with, slug: "bending" + n.slug, title: "Resistance along the span, sagging" + with, texts: pick(n.first, j.lawTexts(), nil), check: ec2.BendingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromTop, j.fromTop), places: pick(j.hasTopping(), j.toppedPositions, j.positions), prestrain: pick(j.hasTopping(), p.topped, p.bare), force: p.force,
 			demand: trace.Take(j.ultimate), axial: n.block, topped: j.hasTopping()})
 	}
 	if j.hasTopping() && j.construction != nil {
-		add(asked{slug: "bare-bending", title: "Resistance of the bare member during construction, sagging", texts: []string{"bare"}, check: ec2.BareSufficient,
-			view: j.fromTop, places: j.positions, prestrain: p.bare, force: p.force, demand: trace.Take(j.construction), bare: true})
+		for _, n := range j.bareAxialForces {
+			add(asked{words: n.with(), slug: "bare-bending" + n.slug, title: "Resistance of the bare member during construction, sagging" + n.with(), texts: pick(n.first, []string{"bare"}, nil), check: ec2.BareSufficient,
+				view: j.fromTop, places: j.positions, prestrain: p.bare, force: p.force, demand: trace.Take(j.construction), axial: n.block, bare: true})
+		}
 	}
 	if !j.hogs() {
 		return out
 	}
 	for _, n := range j.axialForces {
-		with := ""
-		if n.block != nil {
-			with = ", " + n.words
-		}
+		with := n.with()
 		add(asked{words: with, slug: "hogging-bending" + n.slug, title: "Resistance where the moment hogs" + with, texts: pick(n.first, []string{"hogging"}, nil), check: ec2.HoggingSufficient,
 			view: pick(j.hasTopping(), j.toppedFromBelow, j.fromBelow), places: j.positionsBelow, prestrain: pick(j.hasTopping(), hogs.topped, hogs.bare), force: hogs.force,
 			demand: trace.Take(j.hogging), axial: n.block, below: true, topped: j.hasTopping(), hogging: j.hogging})
 	}
 	if j.bareHogging != nil {
-		add(asked{slug: "bare-hogging-bending", title: "Resistance of the bare member during construction where the moment hogs", check: ec2.BareHoggingSufficient,
-			view: j.fromBelow, places: j.positionsBelow, prestrain: hogs.bare, force: hogs.force, demand: trace.Take(j.bareHogging), below: true, bare: true, hogging: j.bareHogging})
+		for _, n := range j.bareAxialForces {
+			add(asked{words: n.with(), slug: "bare-hogging-bending" + n.slug, title: "Resistance of the bare member during construction where the moment hogs" + n.with(), check: ec2.BareHoggingSufficient,
+				view: j.fromBelow, places: j.positionsBelow, prestrain: hogs.bare, force: hogs.force, demand: trace.Take(j.bareHogging), axial: n.block, below: true, bare: true, hogging: j.bareHogging})
+		}
 	}
 	return out
 }
@@ -92,18 +92,31 @@ func (j *job) lawTexts() []string {
 }
 
 // axialBlocks give the axial forces beside which the section is asked: the least, which takes most from the resistance where
-// it does not crush the concrete, and the greatest.
+// it does not crush the concrete, and the greatest. Those on the bare member stand by themselves where there is a topping.
 func (j *job) axialBlocks(c *trace.Chapter) {
-	j.axialForces = []axialForce{{first: true}}
+	j.axialForces, j.bareAxialForces = []axialForce{{first: true}}, []axialForce{{first: true}}
 	if !j.hasAxial() {
 		return
 	}
-	axial := func(slug, words string, f *clause.Formula, first bool) axialForce {
-		b := c.Block("axial"+slug, "Axial force, "+words, nil, trace.Take(j.ultimate)...)
+	axial := func(slug, title, words string, f *clause.Formula, first bool, from ...*trace.Block) axialForce {
+		b := c.Block("axial"+slug, title+", "+words, nil, trace.Take(from...)...)
 		b.Step(f)
-		return axialForce{slug: slug, words: words, block: b, first: first}
+		return axialForce{slug: strings.TrimPrefix(slug, "-bare"), words: words, block: b, first: first}
 	}
-	j.axialForces = []axialForce{axial("-least", "least axial force", ec2.LeastAxial, true), axial("-greatest", "greatest axial force", ec2.GreatestAxial, false)}
+	both := func(slug, title string, least, greatest *clause.Formula, from ...*trace.Block) []axialForce {
+		return []axialForce{axial(slug+"-least", title, "least axial force", least, true, from...), axial(slug+"-greatest", title, "greatest axial force", greatest, false, from...)}
+	}
+	switch {
+	case j.construction == nil:
+		j.axialForces = both("", "Axial force", ec2.LeastAxial, ec2.GreatestAxial, j.ultimate)
+	case !j.hasTopping():
+		j.axialForces = both("", "Axial force", ec2.LeastAxialBuilt, ec2.GreatestAxialBuilt, j.ultimate, j.construction)
+	default:
+		j.axialForces = both("", "Axial force", ec2.LeastAxial, ec2.GreatestAxial, j.ultimate)
+		if j.axialWhileBuilt() {
+			j.bareAxialForces = both("-bare", "Axial force on the bare member", ec2.LeastAxialBare, ec2.GreatestAxialBare, j.construction)
+		}
+	}
 }
 
 // largest is the station with the largest value of a recorded column.
@@ -172,14 +185,22 @@ func (j *job) rowsOf(key string) trace.Rows {
 	return out
 }
 
-// constructionOnMember holds the moments during construction against the resistance of a member without topping.
+// constructionOnMember holds the moments during construction against the resistance of a member without topping, beside each
+// axial force.
 func (j *job) constructionOnMember(c *trace.Chapter) {
 	if j.hasTopping() || j.construction == nil {
 		return
 	}
-	b := c.Block("construction", "Bending during construction, sagging", j.stations, trace.Take(j.construction, j.resistance)...)
-	b.Text("construction", templates.Text("built"))
-	b.Check(ec2.ConstructionSufficient)
+	for _, q := range j.asked {
+		if q.below {
+			continue
+		}
+		b := c.Block(strings.Replace(q.block.Slug, "bending", "construction", 1), "Bending during construction, sagging"+q.words, j.stations, trace.Take(j.construction, q.block)...)
+		if q.block == j.resistance {
+			b.Text("construction", templates.Text("built"))
+		}
+		b.Check(named(ec2.ConstructionSufficient, q.words))
+	}
 }
 
 // minimumSteel checks minimum steel at every station where steel is bonded in the tension zone.
@@ -272,4 +293,12 @@ type axialForce struct {
 	slug, words string
 	block       *trace.Block // gives N_Ed; nil for none
 	first       bool
+}
+
+// with says beside which axial force, "" where there is none.
+func (n axialForce) with() string {
+	if n.block == nil {
+		return ""
+	}
+	return ", " + n.words
 }

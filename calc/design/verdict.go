@@ -76,7 +76,21 @@ func (j *job) remarks() string {
 	if j.ducted() && !told {
 		out = append(out, "There are no bars: another method of 5.10.1(6) than A must show that the loss of tendons gives warning.")
 	}
+	if names := j.onProps(); len(names) > 0 {
+		out = append(out, fmt.Sprintf("The topping is cast on props: the construction loads on the bare member (%s) enter no check. The bare member on its props, under these loads, and the props themselves are to be justified elsewhere.", strings.Join(names, ", ")))
+	}
 	return strings.Join(out, "\n\n")
+}
+
+// onProps are the construction loads on a bare member that props carry until its topping is hard.
+func (j *job) onProps() []string {
+	var out []string
+	for k := range j.m.Actions {
+		if a := &j.m.Actions[k]; j.propped() && a.Kind.Text == "construction" && j.onBare(a) {
+			out = append(out, a.Name.Text)
+		}
+	}
+	return out
 }
 
 // count is how many stations have an outcome.

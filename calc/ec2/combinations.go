@@ -209,8 +209,17 @@ var (
 	AxialEnvelopeMin = envelope("axial-least", "Least axial force", "N_{Ed,min}", "min", "N_{Ed,min,n}", "kN")
 )
 
-// The axial force beside which the section is asked for its resistance.
+// The axial force beside which the section is asked for its resistance: in use, and of a member without topping also while it
+// is built; and that on the bare member of one with a topping.
 var (
-	GreatestAxial = clause.Define(&clause.Formula{ID: "greatest-axial", Name: "Axial force, the greatest of the combinations, compression positive", Text: "N_Ed = N_{Ed,max}", Unit: "kN", Digits: 6, Examples: hand("162 kN", "N_{Ed,max} = 162 kN")})
-	LeastAxial    = clause.Define(&clause.Formula{ID: "least-axial", Name: "Axial force, the least of the combinations, compression positive", Text: "N_Ed = N_{Ed,min}", Unit: "kN", Digits: 6, Examples: hand("-45 kN", "N_{Ed,min} = -45 kN")})
+	GreatestAxial      = besideAxial("greatest-axial", "Axial force, the greatest of the combinations, compression positive", "N_{Ed,max}", "162 kN", "N_{Ed,max} = 162 kN")
+	LeastAxial         = besideAxial("least-axial", "Axial force, the least of the combinations, compression positive", "N_{Ed,min}", "-45 kN", "N_{Ed,min} = -45 kN")
+	GreatestAxialBuilt = besideAxial("greatest-axial-built", "Axial force, the greatest of the combinations in use and while the member is built, compression positive", "max(N_{Ed,max}; N_{Ed,b})", "180 kN", "N_{Ed,max} = 162 kN", "N_{Ed,b} = 180 kN")
+	LeastAxialBuilt    = besideAxial("least-axial-built", "Axial force, the least of the combinations in use and while the member is built, compression positive", "min(N_{Ed,min}; N_{Ed,b,min})", "-60 kN", "N_{Ed,min} = 45 kN", "N_{Ed,b,min} = -60 kN")
+	GreatestAxialBare  = besideAxial("greatest-axial-bare", "Axial force on the bare member, the greatest of the combinations, compression positive", "N_{Ed,b}", "162 kN", "N_{Ed,b} = 162 kN")
+	LeastAxialBare     = besideAxial("least-axial-bare", "Axial force on the bare member, the least of the combinations, compression positive", "N_{Ed,b,min}", "-45 kN", "N_{Ed,b,min} = -45 kN")
 )
+
+func besideAxial(id, name, from, want string, given ...string) *clause.Formula {
+	return clause.Define(&clause.Formula{ID: id, Name: name, Text: "N_Ed = " + from, Unit: "kN", Digits: 6, Examples: hand(want, given...)})
+}

@@ -80,6 +80,9 @@ var (
 	CurvatureWithBarLimit   = limitedCurvature("curvature-with-bar-limit", "an anchored row of bars", barLimit)
 	CurvatureWithBothLimits = limitedCurvature("curvature-with-both-limits", "an anchored row of steel", tendonLimit+barLimit)
 
+	BareCurvatureWithBarLimit   = limitedCurvature("curvature-with-bare-bar-limit", "an anchored row of bars of the bare member", bareBarLimit)
+	BareCurvatureWithBothLimits = limitedCurvature("curvature-with-bare-limits", "an anchored row of steel of the bare member", tendonLimit+bareBarLimit)
+
 	LockedCurvatureWithBarLimit   = limitedCurvature("curvature-with-locked-bar-limit", "an anchored row of bars", lockedBarLimit)
 	LockedCurvatureWithBothLimits = limitedCurvature("curvature-with-both-locked-limits", "an anchored row of steel", tendonLimit+lockedBarLimit)
 )
@@ -87,6 +90,7 @@ var (
 const (
 	tendonLimit    = "; min_i(cases(d_{p,i} > x and σ_{av,i} ≥ f_{pd,i}: (ε_{pud,i} − ε_{p0,i})/(d_{p,i} − x); otherwise: κ_c))"
 	barLimit       = "; min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: κ_c))"
+	bareBarLimit   = "; min_j(cases(A_{s,j} > 0·[mm²] and d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: ε_{sud,j}/(d_{s,j} − x); otherwise: κ_c))"
 	lockedBarLimit = "; min_j(cases(d_{s,j} > x and σ_{sa,j} ≥ f_{yd,j}: (ε_{sud,j} − ε_{s0,j})/(d_{s,j} − x); otherwise: κ_c))"
 )
 
@@ -100,6 +104,13 @@ func limitedCurvature(id, what, limits string) *clause.Formula {
 	}
 	if strings.Contains(limits, "ε_{s0,j}") {
 		given, want = append(given, "ε_{s0,j} = 0.1 ‰"), "21.938 1/km"
+	}
+	if strings.Contains(limits, "A_{s,j}") { // a second row, which is not there yet, would allow less
+		two := strings.NewReplacer("d_{s,j} = 1140 mm", "d_{s,j} = 1140 mm, 1240 mm", "22.5 ‰", "22.5 ‰, 22.5 ‰", "465.9 MPa", "465.9 MPa, 465.9 MPa", "434.78 MPa", "434.78 MPa, 434.78 MPa")
+		for i := range given {
+			given[i] = two.Replace(given[i])
+		}
+		given = append(given, "A_{s,j} = 402 mm², 0 mm²")
 	}
 	examples := append(hand(want, given...), hand("20 1/km", append([]string{"κ_c = 20 1/km"}, given[1:]...)...)...)
 	return clause.Define(&clause.Formula{ID: id, Name: "Curvature: what the concrete allows, or " + what + " at ε_ud, whichever is less", Ref: en("6.1(3)P Figure 6.1", ""),

@@ -63,7 +63,7 @@ var AngleFromB = clause.Define(&clause.Formula{
 
 const (
 	raju  = "Krishna Raju, Prestressed Concrete, ch. 5: 10 m, 1200 MPa, μ 0.35, wobble 0.0015/m taken beside μ, so k = 0.0015/0.35; published with the exponential made linear, for which the tolerance allows"
-	tunis = "student's report on a bridge beam, ENIT Tunis 2020/21: f 0.18, wobble 0.002/m taken beside f, so k = 0.002/0.18, angle 0.006·x; it states 1488 MPa, its figures need 1455 MPa"
+	tunis = "project report on a bridge beam, ENIT Tunis 2020/21 (weak source): f 0.18, wobble 0.002/m taken beside f, so k = 0.002/0.18, angle 0.006·x; it states 1488 MPa, its figures need 1455 MPa"
 )
 
 // linear is a published example in which the exponential was made linear.

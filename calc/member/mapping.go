@@ -222,6 +222,10 @@ func (r *reader) belongs(f *field, p *plan, seen map[string]node.Entry, e node.E
 // read reads a value of whatever type into its field.
 func (r *reader) read(e node.Entry, f *field, to reflect.Value) {
 	mark(to, e.Value.Pos)
+	if n, ok := to.Addr().Interface().(**node.Node); ok {
+		*n = e.Value
+		return
+	}
 	if e.Value.Kind == node.Broken {
 		return
 	}
@@ -240,8 +244,6 @@ func (r *reader) read(e node.Entry, f *field, to reflect.Value) {
 		r.nationalParameters(e.Value, to)
 	case *Narrative:
 		r.narrative(e.Value, to)
-	case **node.Node:
-		*to = e.Value
 	default:
 		r.group(e, f, reflect.ValueOf(to).Elem())
 	}

@@ -1,6 +1,10 @@
 package member
 
-import "soffit/calc/section"
+import (
+	"slices"
+
+	"soffit/calc/section"
+)
 
 // Outline sets the shape out: axis of symmetry at x = 0 and soffit at y = 0, a polygon as written. Errors are
 // *section.Measure or *section.Refusal, in the words of calc/section.
@@ -56,3 +60,6 @@ func (s *Shape) polygon() section.Contour {
 	}
 	return c
 }
+
+// ShapeKinds are the kinds of cross-section by their words in the member file.
+func ShapeKinds() []string { return slices.Clone(planOf(shapeType).find("kind").words) }

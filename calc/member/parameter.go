@@ -6,6 +6,7 @@ import (
 	"reflect"
 	"slices"
 	"strings"
+	"unicode/utf8"
 
 	"soffit/calc/diag"
 	"soffit/calc/formula"
@@ -61,7 +62,7 @@ func (r *reader) nationalParameters(n *node.Node, to *NationalParameters) {
 	for _, e := range n.Entries {
 		s := byName[spelled(e.Key.Text)]
 		if s == nil {
-			r.find(placeOf(e.Key), clip(e.Key.Text)+": unknown national parameter", instead(e.Key.Text, names))
+			r.find(placeOf(e.Key), clip(e.Key.Text)+": unknown national parameter", r.insteadParameter(e.Key.Text, names))
 			continue
 		}
 		if line := first[s]; line > 0 {
@@ -79,6 +80,33 @@ func (r *reader) nationalParameters(n *node.Node, to *NationalParameters) {
 			*to = append(*to, r.parameter(e.Key, s, &text))
 		}
 	}
+}
+
+// insteadParameter proposes the parameters that a key was likely meant for: those whose symbols begin with it, in whichever
+// spelling, "γ_G" γ_{G,sup} and γ_{G,inf}; and those whose table holds it, "ψ_0" ψ. Else the nearest.
+func (r *reader) insteadParameter(key string, names []string) string {
+	word := strings.ToLower(spelled(key))
+	if utf8.RuneCountInString(word) < 3 {
+		return instead(key, names)
+	}
+	var begun, within []string
+	for _, s := range r.opt.NationalParameters {
+		for _, name := range []string{s.Key, s.Ascii} {
+			known := strings.ToLower(spelled(name))
+			if strings.HasPrefix(known, word) {
+				begun = append(begun, name)
+				break
+			}
+			if s.Kind == Table && strings.HasPrefix(word, known+"_") {
+				within = append(within, name)
+				break
+			}
+		}
+	}
+	if meant := append(begun, within...); len(meant) > 0 && len(meant) <= mostMeant {
+		return "write " + either(meant)
+	}
+	return instead(key, names)
 }
 
 // forms are the keys under which the parameter may be stated.
@@ -213,7 +241,11 @@ func (r *reader) table(n, key *node.Node, s *ParameterSpec, p *NationalParameter
 func (r *reader) cells(n *node.Node, name string, s *ParameterSpec) []Value {
 	if n.Kind != node.List || len(n.Items) != s.Columns {
 		if n.Kind != node.Broken {
-			r.find(placeOf(n), fmt.Sprintf("%s: have %s, want a list of %d values", name, haveRow(n), s.Columns), "")
+			hint := ""
+			if n.Kind == node.List && len(n.Items) == 2*s.Columns {
+				hint = "a comma separates values: write decimals with a point, 0.5"
+			}
+			r.find(placeOf(n), fmt.Sprintf("%s: have %s, want a list of %d values", name, haveRow(n), s.Columns), hint)
 		}
 		return nil
 	}

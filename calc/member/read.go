@@ -124,8 +124,11 @@ func either(words []string) string {
 	return words[0]
 }
 
-// instead proposes the word that was likely meant, or all of them. A word that one alone begins with means that one, and
-// so does the first of several words.
+// mostMeant is how many words a beginning may stand for and still be told apart by whoever reads them.
+const mostMeant = 4
+
+// instead proposes the word that was likely meant, or all of them. A word that one alone begins with means that one, one
+// that a few begin with any of them, and the first of several words likewise.
 func instead(word string, known []string) string {
 	begins := func(with string) []string {
 		return slices.DeleteFunc(slices.Clone(known), func(k string) bool { return len(with) < 3 || !strings.HasPrefix(k, with) })
@@ -133,8 +136,8 @@ func instead(word string, known []string) string {
 	near, ok := quantity.Nearest(word, known)
 	first, _, several := strings.Cut(word, " ")
 	switch begun := begins(word); {
-	case len(begun) == 1:
-		return "write " + begun[0]
+	case len(begun) > 0 && len(begun) <= mostMeant:
+		return "write " + either(begun)
 	case ok:
 		return "write " + near
 	case several && len(begins(first+" ")) == 1:

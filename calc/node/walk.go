@@ -83,10 +83,16 @@ func (w *walker) node(y *yaml.Node, depth int) *Node {
 			}
 			n.Items = append(n.Items, w.node(c, depth+1))
 		}
+		if y.Style&yaml.FlowStyle != 0 {
+			w.listCommas(n)
+		}
 	case yaml.MappingNode:
 		n.Kind = Mapping
 		for i := 0; i+1 < len(y.Content) && w.nodes <= maxNodes; i += 2 {
 			w.entry(n, y.Content[i], y.Content[i+1], depth)
+		}
+		if y.Style&yaml.FlowStyle != 0 {
+			w.commas(n)
 		}
 	default:
 		n.Kind = Broken

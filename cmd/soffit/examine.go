@@ -13,20 +13,28 @@ type examineCommand struct {
 	Files []string `arg:"" name:"file" help:"Member files."`
 }
 
-// run makes each note and throws it away: what only the finished design can judge is found too.
+// run makes each note and throws it away: what only the finished design can judge is found too, and what the checks come to
+// is said.
 func (c *examineCommand) run(out, problems io.Writer) int {
 	code := passes
 	for _, file := range c.Files {
 		m, err := read(file)
+		var made made
 		if err == nil {
-			_, err = compose(m)
+			made, err = compose(m)
 		}
 		if err != nil {
 			say(problems, "%v\n", err)
 			code = noNote
 			continue
 		}
-		say(out, "%s: no faults found; %s\n", file, m.Document.Title.Text)
+		say(out, "%s: no faults found; %s: %s\n", file, m.Document.Title.Text, summary(made.note))
+		for _, line := range failing(made.note) {
+			say(out, "  %s\n", line)
+		}
+		if failed(made.note) && code == passes {
+			code = fails
+		}
 	}
 	return code
 }

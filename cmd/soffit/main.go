@@ -1,8 +1,8 @@
 // Command soffit writes the design note of a prestressed concrete member from its member file; and the member file to
 // start from, and the schemas of member file and record.
 //
-// It ends with 0 if it did what was asked and every check passes, with 1 if a check fails (the note is written and says
-// so), and with 2 if there is no note, draft or schema.
+// It ends with 0 if it did what was asked and every check passes, with 1 if a check fails (a note is written all the same and
+// says so), and with 2 if there is no note, draft or schema.
 package main
 
 import (
@@ -27,7 +27,7 @@ type commands struct {
 	Version kong.VersionFlag `help:"Print the version."`
 
 	Note    noteCommand    `cmd:"" help:"Write the design note of each member file, as PDF, and its record, as JSON."`
-	Examine examineCommand `cmd:"" help:"Read each member file and say what is wrong with it; write nothing."`
+	Examine examineCommand `cmd:"" help:"Read each member file, say what is wrong with it and what its checks come to; write nothing."`
 	Draft   draftCommand   `cmd:"" help:"Write a member file to start from, with a comment on each key."`
 	Schema  schemaCommand  `cmd:"" help:"Print the JSON Schema of the member file or of the record; editors complete and check the file by it."`
 }

@@ -39,11 +39,26 @@ func summary(n *trace.Note) string {
 	if failing == 0 {
 		return fmt.Sprintf("all %d checks pass; highest ratio %s, %s%s", len(checks), worst.Ratio[worst.Worst], worst.Name, place(worst))
 	}
-	size := "ratio " + worst.Ratio[worst.Worst]
-	if worst.Ratio[worst.Worst] == "" {
-		size = "margin " + worst.Margin[worst.Worst] + " " + worst.Unit.String()
+	return fmt.Sprintf("%d of %d checks fail: not for construction; worst %s, %s%s", failing, len(checks), size(worst), worst.Name, place(worst))
+}
+
+// size is by how much a check is met or missed: its ratio, or its margin where there is none.
+func size(c *trace.Check) string {
+	if c.Ratio[c.Worst] == "" {
+		return "margin " + c.Margin[c.Worst] + " " + c.Unit.String()
 	}
-	return fmt.Sprintf("%d of %d checks fail: not for construction; worst %s, %s%s", failing, len(checks), size, worst.Name, place(worst))
+	return "ratio " + c.Ratio[c.Worst]
+}
+
+// failing says of each check that fails, the worst first, by how much and where.
+func failing(n *trace.Note) []string {
+	var out []string
+	for _, c := range n.Ranked() {
+		if c.Failed() {
+			out = append(out, fmt.Sprintf("fails: %s %s, %s%s", c.Number, c.Name, size(c), place(c)))
+		}
+	}
+	return out
 }
 
 // place is where a check is worst.

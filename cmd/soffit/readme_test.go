@@ -9,6 +9,7 @@ import (
 
 	"soffit/calc/design"
 	"soffit/calc/ec2"
+	"soffit/calc/member"
 )
 
 // TestReadme runs every command of the README in the order in which it stands there, but for the test command
@@ -49,7 +50,8 @@ func TestReadme(t *testing.T) {
 	}
 }
 
-// TestReadmeWords: the README names every product, category, national parameter and chapter that the member file takes.
+// TestReadmeWords: the README names every kind of section, product, category, national parameter and chapter that the member
+// file takes.
 func TestReadmeWords(t *testing.T) {
 	data, err := os.ReadFile("../../README.md")
 	if err != nil {
@@ -65,6 +67,12 @@ func TestReadmeWords(t *testing.T) {
 	}
 	words = append(words, ec2.Categories[len("ABCDEFGH"):]...)
 	words = append(words, design.Narratives...)
+	for _, kind := range member.ShapeKinds() {
+		words = append(words, "`"+kind+"`")
+	}
+	if len(words) < 50 {
+		t.Errorf("%d words", len(words))
+	}
 	for _, w := range words {
 		if !strings.Contains(readme, w) {
 			t.Errorf("README.md does not name %s", w)

@@ -9,6 +9,7 @@ package diagram
 
 import (
 	"fmt"
+	"math"
 	"slices"
 
 	"soffit/calc/trace"
@@ -49,9 +50,12 @@ type Figure struct {
 	tape          *tape
 }
 
-// Lay lays a figure out for a width of paper. It is made narrower where its scale asks for it. An error
-// names the figure and the role that is missing, not computed, or runs over the wrong rows; or the kind,
-// if there is none of that name; or the width it needs.
+// excess is how much wider than asked a figure may come out: into the margins, where nothing else stands.
+const excess = 6 * draw.Mm
+
+// Lay lays a figure out for a width of paper. It is made narrower where its scale asks for it, and comes out up to 6 mm
+// wider where its numbers need that. An error names the figure and the role that is missing, not computed, or runs over the
+// wrong rows; or the kind, if there is none of that name; or the width it needs.
 func Lay(n *trace.Note, f *trace.Figure, width draw.Pt) (*Figure, error) {
 	m, ok := kinds[f.Kind]
 	if !ok {
@@ -65,8 +69,8 @@ func Lay(n *trace.Note, f *trace.Figure, width draw.Pt) (*Figure, error) {
 	if d.err != nil {
 		return nil, d.err
 	}
-	if w := t.ink.Width(); w > width+0.01 {
-		return nil, fmt.Errorf("figure %s: needs %.0f mm of width, has %.0f mm", f.Key, float64(w/draw.Mm), float64(width/draw.Mm))
+	if w := t.ink.Width(); w > width+excess {
+		return nil, fmt.Errorf("figure %s: needs %.0f mm of width, has %.0f mm", f.Key, math.Ceil(float64(w/draw.Mm)), float64(width/draw.Mm))
 	}
 	return &Figure{t.ink.Width(), t.ink.Height(), t}, nil
 }

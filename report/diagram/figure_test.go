@@ -5,6 +5,7 @@ import (
 	"math"
 	"reflect"
 	"regexp"
+	"strconv"
 	"strings"
 	"testing"
 
@@ -204,6 +205,63 @@ func TestErrors(t *testing.T) {
 		_, err := Lay(n, c.f, c.width)
 		if err == nil || !strings.Contains(err.Error(), c.want) || !strings.Contains(err.Error(), c.f.Key) {
 			t.Errorf("error is %v, want %q", err, c.want)
+		}
+	}
+}
+
+// TestSlightlyTooWide: a figure that needs up to 6 mm more than there is is laid out all the same; one that needs more says
+// how much, in numbers that differ.
+func TestSlightlyTooWide(t *testing.T) {
+	said := regexp.MustCompile(`needs (\d+) mm of width, has (\d+) mm`)
+	laid, over, refused := 0, 0, 0
+	for _, m := range samples() {
+		n, figs := m.note(t)
+		for id, f := range figs {
+			for width := 20 * draw.Mm; width < 200*draw.Mm; width += 9.7 {
+				fig, err := Lay(n, f, width)
+				if err == nil {
+					laid++
+					if fig.Width > width+6*draw.Mm {
+						t.Errorf("%s, %s in %.1f mm is %.1f mm wide", m.name, id, width/draw.Mm, fig.Width/draw.Mm)
+					} else if fig.Width > width+0.01 {
+						over++
+					}
+					continue
+				}
+				refused++
+				k := said.FindStringSubmatch(err.Error())
+				if k == nil {
+					t.Fatal(err)
+				}
+				needs, _ := strconv.Atoi(k[1])
+				has, _ := strconv.Atoi(k[2])
+				if needs < has+6 {
+					t.Errorf("%s, %s: %v", m.name, id, err)
+				}
+			}
+		}
+	}
+	if laid == 0 || over == 0 || refused == 0 {
+		t.Errorf("%d laid out, %d of them wider than asked, %d refused", laid, over, refused)
+	}
+}
+
+// TestBarsOfAToppingToCome: bars above the section that have no force yet are not on it, nor in the listing; with a force
+// they are.
+func TestBarsOfAToppingToCome(t *testing.T) {
+	for _, c := range []struct {
+		diameter float64
+		listed   bool
+	}{{0.01, false}, {12, true}} {
+		m := tBeam()
+		m.bars = append(m.bars, row{name: "slab bars", count: 2, spacing: 200, level: 800, diameter: c.diameter})
+		n, figs := m.note(t)
+		for _, id := range []string{"fig-ultimate-bare", "fig-ultimate", "fig-ultimate-hogging"} {
+			ink := drawn(t, n, figs[id], 510)
+			texts := strings.Join(ink.Texts(), "|")
+			if got := strings.Contains(texts, "slab bars"); got != c.listed || !strings.Contains(texts, "soffit") {
+				t.Errorf("%s, bars of %g mm: texts are %s", id, c.diameter, texts)
+			}
 		}
 	}
 }

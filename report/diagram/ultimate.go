@@ -121,6 +121,8 @@ type stressed struct {
 	row                                             int
 }
 
+// stressed are the rows of tendons, or with the prefix bar- those of bars. Bars outside the section and without a force are
+// left out: a topping that is not there yet will hold them.
 func (d *data) stressed(prefix, prestrain string, in *shape) []stressed {
 	depth := d.rows(prefix + "depth")
 	strain, force, lever := d.beside(prefix+"strain", depth), d.beside(prefix+"force", depth), d.beside(prefix+"lever", depth)
@@ -141,6 +143,9 @@ func (d *data) stressed(prefix, prestrain string, in *shape) []stressed {
 	}
 	var out []stressed
 	for i, v := range depth.cells {
+		if outside := v.value < 0 || v.value > in.total(); prefix != "" && outside && force.cells[i].value == 0 {
+			continue
+		}
 		r := stressed{name: depth.axis.Rows[i], depth: v, strain: strain.cells[i], bending: bend.cells[i], force: force.cells[i],
 			lever: lever.cells[i], bar: prefix != "", seen: seen, row: i}
 		if before.len() > 0 {

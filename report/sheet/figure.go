@@ -33,6 +33,10 @@ func (c *composer) figure(b *trace.Block, f *trace.Figure) {
 		c.fail("%w", err)
 		return
 	}
+	if fw > col.w && s == spanWide { // beyond the hairlines
+		s = spanFull
+		col = s.column()
+	}
 	label := "Figure " + f.Number
 	lead := draw.Width(draw.Bold, noteSize, label+"  ")
 	caption := stack{w: col.w - lead}
